@@ -1,0 +1,146 @@
+import { sql } from "drizzle-orm";
+import {
+  check,
+  date,
+  foreignKey,
+  index,
+  integer,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from "drizzle-orm/pg-core";
+import { cells } from "@/db/cells/tables";
+import { id, instantAt, siteId } from "@/db/columns";
+import { sites } from "@/db/sites/tables";
+
+/** What the factory builds. */
+export const models = pgTable(
+  "models",
+  {
+    siteId: siteId().references(() => sites.id),
+    id: id(),
+    name: text().notNull(),
+    kind: text().notNull(),
+    createdAt: instantAt().notNull().defaultNow(),
+  },
+  (t) => [primaryKey({ columns: [t.siteId, t.id] }), unique().on(t.siteId, t.name)],
+);
+
+/** What an order may choose for a model: a finish, a pickup set, an inlay. */
+export const options = pgTable(
+  "options",
+  {
+    siteId: siteId(),
+    id: id(),
+    modelId: uuid().notNull(),
+    name: text().notNull(),
+  },
+  (t) => [
+    primaryKey({ columns: [t.siteId, t.id] }),
+    foreignKey({ columns: [t.siteId, t.modelId], foreignColumns: [models.siteId, models.id] }),
+    unique().on(t.siteId, t.modelId, t.name),
+  ],
+);
+
+/** A piece of work of the trade, done in one cell. `hazards` name the cautions before it. */
+export const operations = pgTable(
+  "operations",
+  {
+    siteId: siteId().references(() => sites.id),
+    id: id(),
+    code: text().notNull(),
+    name: text().notNull(),
+    stage: text().notNull(),
+    cellId: uuid().notNull(),
+    /** How concurrent items share time (CALCULATIONS.md 2). */
+    shareBy: text({ enum: ["standard", "equal"] })
+      .notNull()
+      .default("standard"),
+    hazards: text().array().notNull().default(sql`'{}'::text[]`),
+  },
+  (t) => [
+    primaryKey({ columns: [t.siteId, t.id] }),
+    unique().on(t.siteId, t.code),
+    foreignKey({ columns: [t.siteId, t.cellId], foreignColumns: [cells.siteId, cells.id] }),
+    index().on(t.siteId, t.cellId),
+    check("operations_share_by", sql`${t.shareBy} in ('standard', 'equal')`),
+  ],
+);
+
+/** The order of operations for a model; a ticket copies the one in force when it is made. */
+export const routings = pgTable(
+  "routings",
+  {
+    siteId: siteId(),
+    id: id(),
+    modelId: uuid().notNull(),
+    revision: integer().notNull(),
+    createdAt: instantAt().notNull().defaultNow(),
+  },
+  (t) => [
+    primaryKey({ columns: [t.siteId, t.id] }),
+    foreignKey({ columns: [t.siteId, t.modelId], foreignColumns: [models.siteId, models.id] }),
+    unique().on(t.siteId, t.modelId, t.revision),
+  ],
+);
+
+export const routingOperations = pgTable(
+  "routing_operations",
+  {
+    siteId: siteId(),
+    id: id(),
+    routingId: uuid().notNull(),
+    operationId: uuid().notNull(),
+    position: integer().notNull(),
+  },
+  (t) => [
+    primaryKey({ columns: [t.siteId, t.id] }),
+    foreignKey({
+      columns: [t.siteId, t.routingId],
+      foreignColumns: [routings.siteId, routings.id],
+    }),
+    foreignKey({
+      columns: [t.siteId, t.operationId],
+      foreignColumns: [operations.siteId, operations.id],
+    }),
+    unique().on(t.siteId, t.routingId, t.position),
+    index().on(t.siteId, t.operationId),
+  ],
+);
+
+/**
+ * Standard times in person-seconds, effective-dated and insert-only (CALCULATIONS.md 3).
+ * `optionId` null is the base, otherwise an adder for that option. `seq` decides ties of one day.
+ */
+export const standards = pgTable(
+  "standards",
+  {
+    siteId: siteId(),
+    id: id(),
+    seq: integer().generatedAlwaysAsIdentity(),
+    modelId: uuid().notNull(),
+    operationId: uuid().notNull(),
+    optionId: uuid(),
+    setupSeconds: integer().notNull(),
+    runSeconds: integer().notNull(),
+    effectiveFrom: date({ mode: "string" }).notNull(),
+    enteredBy: text().notNull(),
+    reason: text().notNull(),
+    createdAt: instantAt().notNull().defaultNow(),
+  },
+  (t) => [
+    primaryKey({ columns: [t.siteId, t.id] }),
+    foreignKey({ columns: [t.siteId, t.modelId], foreignColumns: [models.siteId, models.id] }),
+    foreignKey({
+      columns: [t.siteId, t.operationId],
+      foreignColumns: [operations.siteId, operations.id],
+    }),
+    foreignKey({ columns: [t.siteId, t.optionId], foreignColumns: [options.siteId, options.id] }),
+    index().on(t.siteId, t.modelId, t.operationId, t.effectiveFrom),
+    index().on(t.siteId, t.operationId),
+    index().on(t.siteId, t.optionId),
+    check("standards_seconds", sql`${t.setupSeconds} >= 0 and ${t.runSeconds} >= 0`),
+  ],
+);

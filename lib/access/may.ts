@@ -1,0 +1,49 @@
+import type { Role } from "@/lib/access/roles";
+
+/** How far a permission reaches: the whole site, the person's own cells, or the person alone. */
+export type Reach = "site" | "cells" | "self";
+
+/**
+ * Who may do what, and how far. The only table of permissions: every page, action and route handler
+ * names its action here, and a test walks them all. An analytic figure stops at the cell; a
+ * person's own hours are for that person, the lead of the home cell and payroll.
+ */
+export const permissions = {
+  "floor.see": { admin: "site", planner: "site", lead: "site", inspector: "site", payroll: "site" },
+  "tickets.see": { admin: "site", planner: "site", lead: "site", inspector: "site" },
+  "people.see": { admin: "site", lead: "cells", payroll: "site" },
+  "people.change": { admin: "site" },
+  "people.reset-pin": { admin: "site", lead: "cells" },
+  "people.give-roles": { admin: "site" },
+  "kiosks.see": { admin: "site" },
+  "kiosks.change": { admin: "site" },
+  "hours.see": { payroll: "site", lead: "cells", worker: "self" },
+  "hours.export": { payroll: "site", lead: "cells" },
+  "segments.read": { planner: "site", lead: "site" },
+  "segments.name-people": { payroll: "site" },
+  "standards.read": { planner: "site", lead: "site" },
+  calculate: { planner: "site", lead: "site", payroll: "site", admin: "site" },
+} as const satisfies Record<string, Partial<Record<Role, Reach>>>;
+
+export type Action = keyof typeof permissions;
+
+/** A role that someone holds; a lead's names the cells it is for. */
+export interface Held {
+  role: Role;
+  cells: readonly string[];
+}
+
+/**
+ * Answers how far someone with these roles may go with an action; null means not at all.
+ * The widest reach wins: site before cells before self.
+ */
+export function reachOf(held: readonly Held[], action: Action): Reach | null {
+  const table: Partial<Record<Role, Reach>> = permissions[action];
+  const reaches = held.map(({ role }) => table[role]);
+  return (["site", "cells", "self"] as const).find((reach) => reaches.includes(reach)) ?? null;
+}
+
+/** The cells that someone leads: what reach `cells` means for them. */
+export function cellsOf(held: readonly Held[]): string[] {
+  return [...new Set(held.filter(({ role }) => role === "lead").flatMap(({ cells }) => cells))];
+}

@@ -1,0 +1,9 @@
+/** @type {import('next').NextConfig} */
+const config = {
+  reactStrictMode: true,
+  poweredByHeader: false,
+  typescript: { ignoreBuildErrors: false },
+  serverExternalPackages: ["@node-rs/argon2", "pg", "pino", "bwip-js"],
+};
+
+export default config;
