@@ -5,7 +5,14 @@ import pg from "pg";
 /** A pool or an open transaction: every query and command takes one, inside a `Scope`. */
 export type Db = Pick<
   NodePgDatabase,
-  "select" | "selectDistinct" | "insert" | "update" | "delete" | "execute" | "transaction" | "$count"
+  | "select"
+  | "selectDistinct"
+  | "insert"
+  | "update"
+  | "delete"
+  | "execute"
+  | "transaction"
+  | "$count"
 >;
 
 /** Where a query or command works: which connection, which site (LEDGER.md 11). */

@@ -1,6 +1,6 @@
 import "server-only";
-import { kioskOf, workerOf } from "@/app/_server/kiosk-actor";
 import { keyOf } from "@/app/_server/key-actor";
+import { kioskOf, workerOf } from "@/app/_server/kiosk-actor";
 import { personOf } from "@/app/_server/person";
 import { type Action, type Held, type Reach, reachOf } from "@/lib/access/may";
 import { no, ok, type Result } from "@/lib/result";

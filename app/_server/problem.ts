@@ -31,7 +31,13 @@ const titles = {
 export function problemResponse(problem: Problem): Response {
   const { code, detail, errors, retryAfterSeconds } = problem;
   const status = statuses[code];
-  const body = { type: `urn:bookmatch:problem:${code}`, title: titles[code], status, detail, errors };
+  const body = {
+    type: `urn:bookmatch:problem:${code}`,
+    title: titles[code],
+    status,
+    detail,
+    errors,
+  };
   return Response.json(body, {
     status,
     headers: {

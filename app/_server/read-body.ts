@@ -46,7 +46,8 @@ export function check<T>(value: unknown, schema: z.ZodType<T>): Result<T> {
 export function fieldErrors(error: z.ZodError): FieldError[] {
   return error.issues.flatMap((issue) => {
     const path = issue.path.map(String);
-    if (issue.code !== "unrecognized_keys") return [{ path: path.join("."), message: issue.message }];
+    if (issue.code !== "unrecognized_keys")
+      return [{ path: path.join("."), message: issue.message }];
     return issue.keys.map((key) => ({
       path: [...path, key].join("."),
       message: "This field is not known here.",
