@@ -1,0 +1,43 @@
+import "server-only";
+import type { KioskActor, WorkerActor } from "@/app/_server/actor";
+import { bearerOf } from "@/app/_server/bearer";
+import { database } from "@/app/_server/database";
+import { hashSecret } from "@/app/_server/secret";
+import { listRolesOfWorker } from "@/db/access/queries";
+import { findKioskByToken, findKioskSession } from "@/db/kiosks/queries";
+import { no, ok, type Result } from "@/lib/result";
+
+/** The device cookie that enrolment sets. */
+export const KIOSK_COOKIE = "bookmatch_kiosk";
+/** A session holds until its worker's shift ends, 16 hours at most (LEDGER.md 9). */
+export const SESSION_MAX_MS = 16 * 3_600_000;
+
+/** Finds the kiosk of a request by its device cookie; a revoked one is found too. */
+export async function kioskOf(request: Request): Promise<Result<KioskActor>> {
+  const token = cookieOf(request, KIOSK_COOKIE);
+  const kiosk = token ? await findKioskByToken(database(), hashSecret(token)) : null;
+  if (!kiosk) return no("unauthenticated", "This tablet is not enrolled. Ask an admin for a code.");
+  return ok({ kind: "kiosk", ...kiosk });
+}
+
+/** Finds the worker whose session is open on this kiosk: device cookie and Bearer token together. */
+export async function workerOf(request: Request): Promise<Result<WorkerActor>> {
+  const kiosk = await kioskOf(request);
+  if (!kiosk.ok) return kiosk;
+  const { siteId, kioskId, revokedAt } = kiosk.value;
+  if (revokedAt) return no("forbidden", "This tablet was taken out of use. Use another one.");
+  const scope = { db: database(), siteId };
+  const token = bearerOf(request);
+  const session = token ? await findKioskSession(scope, kioskId, hashSecret(token)) : null;
+  const isOver =
+    !session || session.endedAt || Date.now() - session.openedAt.getTime() > SESSION_MAX_MS;
+  if (isOver) return no("unauthenticated", "Sign in at this tablet first: number and PIN.");
+  const held = await listRolesOfWorker(scope, session.workerId);
+  const { sessionId, workerId, number } = session;
+  return ok({ kind: "worker", siteId, kioskId, sessionId, workerId, number, held });
+}
+
+function cookieOf(request: Request, name: string): string | null {
+  const cookies = (request.headers.get("cookie") ?? "").split(/;\s*/);
+  return cookies.find((cookie) => cookie.startsWith(`${name}=`))?.slice(name.length + 1) ?? null;
+}
