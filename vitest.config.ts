@@ -10,6 +10,13 @@ const alias = [
   { find: "server-only", replacement: empty },
 ];
 
+/** Server code reads its environment at the first use; its pool comes from `ownDatabase`. */
+const env = {
+  DATABASE_URL: "postgres://nobody@127.0.0.1:1/use-ownDatabase",
+  SESSION_SECRET: "a secret of the tests, known to all of them",
+  LOG_LEVEL: "silent",
+};
+
 export default defineConfig({
   resolve: { alias },
   test: {
@@ -18,6 +25,7 @@ export default defineConfig({
         resolve: { alias },
         test: {
           name: "unit",
+          env,
           include: ["tests/**/*.test.{ts,tsx}"],
           exclude: ["tests/**/*.db.test.ts"],
           setupFiles: ["tests/setup/console-clean.ts"],
@@ -27,9 +35,11 @@ export default defineConfig({
         resolve: { alias },
         test: {
           name: "db",
+          env,
           include: ["tests/**/*.db.test.ts"],
           globalSetup: ["tests/setup/database.ts"],
           setupFiles: ["tests/setup/console-clean.ts"],
+          isolate: false,
           testTimeout: 20_000,
           hookTimeout: 60_000,
         },

@@ -28,7 +28,7 @@ export function openPool(url: string, onError: (error: Error) => void, max = 20)
   return pool;
 }
 
-/** Wraps a pool or one client of it in Drizzle, with snake_case columns. */
-export function wrap(client: pg.Pool | pg.PoolClient): NodePgDatabase {
+/** Wraps a pool or one connection in Drizzle, with snake_case columns. */
+export function wrap(client: pg.Pool | pg.PoolClient | pg.Client): NodePgDatabase {
   return drizzle({ client, casing: "snake_case" });
 }

@@ -1,3 +1,4 @@
+-- Oldest code served: 0000_ledger
 CREATE TABLE "account_roles" (
 	"site_id" uuid NOT NULL,
 	"id" uuid NOT NULL,
