@@ -1,10 +1,11 @@
 import "server-only";
 import { sealData, unsealData } from "iron-session";
 import { cookies } from "next/headers";
+import { cache } from "react";
 import type { PersonActor } from "@/app/_server/actor";
 import { database } from "@/app/_server/database";
 import { env } from "@/app/_server/env";
-import { findOfficeSession, findOwnWorker, heldOf, listRoles } from "@/db/access/queries";
+import { heldOf, listSessionRoles } from "@/db/access/queries";
 import { no, ok, type Result } from "@/lib/result";
 
 /** What the office's cookie carries: the id of a row that can be revoked. */
@@ -32,26 +33,21 @@ export async function closeOffice(): Promise<void> {
   (await cookies()).delete(OFFICE_COOKIE);
 }
 
-/** Finds who is signed in to the office, with roles at their site; the server's row decides. */
-export async function personOf(): Promise<Result<PersonActor>> {
+/**
+ * Finds who is signed in to the office, with the roles at their site; the server's row decides.
+ * Within one request it is asked once, however many parts of a page want to know.
+ */
+export const personOf = cache(async (): Promise<Result<PersonActor>> => {
   const sealed = (await cookies()).get(OFFICE_COOKIE)?.value;
   const { sessionId } = sealed ? await unsealData<OfficeCookie>(sealed, sealing()) : {};
-  const session = sessionId ? await findOfficeSession(database(), sessionId, new Date()) : null;
-  if (!session) return no("unauthenticated", "Sign in first.");
-  const rows = await listRoles(database(), session.accountId);
-  const siteId = rows[0]?.siteId;
+  const rows = sessionId ? await listSessionRoles(database(), sessionId, new Date()) : [];
+  const [first] = rows;
+  if (!first) return no("unauthenticated", "Sign in first.");
+  const { siteId } = first;
   if (!siteId) return no("forbidden", "Your account has no role here yet. Ask an admin for one.");
-  const { accountId, name, email } = session;
-  const workerId = await findOwnWorker({ db: database(), siteId }, accountId);
-  const held = heldOf(rows.filter((row) => row.siteId === siteId));
-  return ok({
-    kind: "person",
-    siteId,
-    accountId,
-    sessionId: session.id,
-    name,
-    email,
-    workerId,
-    held,
-  });
-}
+  const atSite = rows.filter((row) => row.siteId === siteId);
+  const held = heldOf(atSite.flatMap(({ role, cellId }) => (role ? [{ role, cellId }] : [])));
+  const { accountId, name, email, workerId } = first;
+  const who = { siteId, accountId, sessionId: first.sessionId, name, email, workerId };
+  return ok({ kind: "person", ...who, held });
+});

@@ -5,6 +5,7 @@ import {
   accountWorkers,
   apiKeys,
   officeSessions,
+  setupLinks,
 } from "@/db/access/tables";
 import type { Db, Scope } from "@/db/client";
 import type { Held } from "@/lib/access/may";
@@ -20,18 +21,33 @@ export async function findKey(db: Db, keyHash: string) {
   return key ? { ...key, role: role.parse(key.role) } : null;
 }
 
-/** Finds an office session that is neither revoked nor over, with its account; null otherwise. */
-export async function findOfficeSession(db: Db, sessionId: string, now: Date) {
-  const [session] = await db
+/**
+ * Finds who an office session belongs to, with the roles at each site and the worker that the
+ * account is there: one row per role, none where the session is revoked or over or the account is
+ * disabled, and one without a role where it has none.
+ */
+export async function listSessionRoles(db: Db, sessionId: string, now: Date) {
+  return db
     .select({
-      id: officeSessions.id,
+      sessionId: officeSessions.id,
       accountId: accounts.id,
       name: accounts.name,
       email: accounts.email,
-      lastSeenAt: officeSessions.lastSeenAt,
+      siteId: accountRoles.siteId,
+      role: accountRoles.role,
+      cellId: accountRoles.cellId,
+      workerId: accountWorkers.workerId,
     })
     .from(officeSessions)
     .innerJoin(accounts, eq(accounts.id, officeSessions.accountId))
+    .leftJoin(accountRoles, eq(accountRoles.accountId, accounts.id))
+    .leftJoin(
+      accountWorkers,
+      and(
+        eq(accountWorkers.accountId, accounts.id),
+        eq(accountWorkers.siteId, accountRoles.siteId),
+      ),
+    )
     .where(
       and(
         eq(officeSessions.id, sessionId),
@@ -40,28 +56,37 @@ export async function findOfficeSession(db: Db, sessionId: string, now: Date) {
         isNull(accounts.disabledAt),
       ),
     )
-    .limit(1);
-  return session ?? null;
+    .orderBy(accountRoles.createdAt, accountRoles.id);
 }
 
-/** Lists the roles of an account by site, a lead with one row per cell. May be empty. */
-export async function listRoles(db: Db, accountId: string) {
-  const rows = await db
-    .select({ siteId: accountRoles.siteId, role: accountRoles.role, cellId: accountRoles.cellId })
-    .from(accountRoles)
-    .where(eq(accountRoles.accountId, accountId))
-    .orderBy(accountRoles.createdAt);
-  return rows.map((row) => ({ ...row, role: role.parse(row.role) }));
+/** Finds the account of an e-mail, in small letters, with what proves it; disabled ones too. */
+export async function findSignIn(db: Db, email: string) {
+  const [account] = await db
+    .select({
+      accountId: accounts.id,
+      passwordHash: accounts.passwordHash,
+      disabledAt: accounts.disabledAt,
+    })
+    .from(accounts)
+    .where(eq(accounts.email, email))
+    .limit(1);
+  return account ?? null;
 }
 
-/** Finds the worker that an account is at a site; null if it is none. */
-export async function findOwnWorker({ db, siteId }: Scope, accountId: string) {
-  const [own] = await db
-    .select({ workerId: accountWorkers.workerId })
-    .from(accountWorkers)
-    .where(and(eq(accountWorkers.siteId, siteId), eq(accountWorkers.accountId, accountId)))
+/** Finds a live link that makes the first admin, by its token's SHA-256; null once used or over. */
+export async function findSetupLink(db: Db, tokenHash: string, now: Date) {
+  const [link] = await db
+    .select({ id: setupLinks.id, expiresAt: setupLinks.expiresAt })
+    .from(setupLinks)
+    .where(
+      and(
+        eq(setupLinks.tokenHash, tokenHash),
+        isNull(setupLinks.usedAt),
+        gt(setupLinks.expiresAt, now),
+      ),
+    )
     .limit(1);
-  return own?.workerId ?? null;
+  return link ?? null;
 }
 
 /** Lists what the account behind a worker may do at a kiosk; empty for most workers. */
