@@ -1,0 +1,70 @@
+import { and, eq, inArray, isNull, sql } from "drizzle-orm";
+import { officeSessions, throttles } from "@/db/access/tables";
+import type { Db } from "@/db/client";
+
+/** Opens an office session for an account, until `expiresAt`. */
+export async function openSession(
+  db: Db,
+  session: { id: string; accountId: string; expiresAt: Date },
+): Promise<void> {
+  await db.insert(officeSessions).values(session);
+}
+
+/** Ends one office session, at once and for good. */
+export async function revokeSession(db: Db, sessionId: string, now: Date): Promise<void> {
+  await db
+    .update(officeSessions)
+    .set({ revokedAt: now })
+    .where(and(eq(officeSessions.id, sessionId), isNull(officeSessions.revokedAt)));
+}
+
+/** Ends all office sessions of an account: a new password or a closed account means everywhere. */
+export async function revokeSessionsOf(db: Db, accountId: string, now: Date): Promise<void> {
+  await db
+    .update(officeSessions)
+    .set({ revokedAt: now })
+    .where(and(eq(officeSessions.accountId, accountId), isNull(officeSessions.revokedAt)));
+}
+
+/**
+ * Takes a place for one try at a secret before it is checked, so that tries at the same time cannot
+ * slip past the count. Counts as wrong until `clearTries`.
+ *
+ * @param key what is slowed down, such as `email:<hash>`
+ * @param waitsSeconds the wait after the n-th wrong try in a row, at index n − 1 (`lib/access`)
+ * @returns how many seconds are still to wait; 0 means that this try may be made
+ */
+export async function reserveTry(
+  db: Db,
+  { key, waitsSeconds, now }: { key: string; waitsSeconds: readonly number[]; now: Date },
+): Promise<number> {
+  const waits = sql`${sql.param(waitsSeconds)}::int[]`;
+  const until = (nth: unknown) =>
+    sql`${now.toISOString()}::timestamptz
+      + (${waits})[least(${nth}, array_length(${waits}, 1))] * interval '1 second'`;
+  const reserved = await db
+    .insert(throttles)
+    .values({ key, failures: 1, lastFailedAt: now, blockedUntil: until(1) })
+    .onConflictDoUpdate({
+      target: throttles.key,
+      set: {
+        failures: sql`${throttles.failures} + 1`,
+        lastFailedAt: now,
+        blockedUntil: until(sql`${throttles.failures} + 1`),
+      },
+      setWhere: sql`${throttles.blockedUntil} is null
+        or ${throttles.blockedUntil} <= ${now.toISOString()}::timestamptz`,
+    })
+    .returning({ key: throttles.key });
+  if (reserved.length > 0) return 0;
+  const [blocked] = await db
+    .select({ until: throttles.blockedUntil })
+    .from(throttles)
+    .where(eq(throttles.key, key));
+  return Math.max(1, Math.ceil(((blocked?.until ?? now).getTime() - now.getTime()) / 1000));
+}
+
+/** Forgets wrong tries: after a right one, or because a new secret was given. */
+export async function clearTries(db: Db, keys: readonly string[]): Promise<void> {
+  await db.delete(throttles).where(inArray(throttles.key, [...keys]));
+}
