@@ -1,0 +1,83 @@
+import { type DBSchema, type IDBPDatabase, openDB } from "idb";
+import type { Bench, Enrolled, KioskCell } from "@/lib/kiosks/schema";
+import type { ClockEvent } from "@/lib/ledger/schema";
+
+/** A record that waits to be handed in. `order` is the order of the acts on this kiosk. */
+export interface Waiting {
+  order?: number;
+  event: ClockEvent;
+  /** Set when the server could not take it even alone: kept, and tried again at the next start. */
+  asideMs?: number;
+}
+
+/** One PIN entry on this kiosk (LEDGER.md 9), kept until its worker's shift ends. */
+export interface KeptSession {
+  session: string;
+  worker: string;
+  name: string;
+  language: string;
+  role: string;
+  openedMs: number;
+  endedMs: number | null;
+  /** The server's token; null where the PIN was keyed while the server was away. */
+  token: string | null;
+  /** The sealed credential that proves the session later; null where there is a token. */
+  sealed: string | null;
+}
+
+/** The last bench that the server sent for a worker. */
+export interface KeptBench {
+  worker: string;
+  bench: Bench;
+  receivedMs: number;
+}
+
+/** What this browser is at the site, since it was enrolled. */
+export interface Device extends Omit<Enrolled, "serverTime"> {
+  muted: boolean;
+}
+
+/** The cell as the server last told it, with its `ETag`. */
+export interface KeptCell {
+  etag: string | null;
+  cell: KioskCell;
+  receivedMs: number;
+}
+
+export interface KioskSchema extends DBSchema {
+  outbox: { key: number; value: Waiting; indexes: { id: string } };
+  sessions: { key: string; value: KeptSession };
+  benches: { key: string; value: KeptBench };
+  device: { key: "device"; value: Device };
+  cell: { key: "cell"; value: KeptCell };
+  counters: { key: "seq"; value: number };
+}
+
+export type Store = IDBPDatabase<KioskSchema>;
+
+const STORE_NAME = "bookmatch-kiosk";
+const STORE_VERSION = 1;
+
+/**
+ * Opens what the kiosk keeps in this browser. A newer page in another tab may upgrade it: this one
+ * then closes its hold and says so, and the page must be loaded again.
+ */
+export function openStore(onLost: () => void, name = STORE_NAME): Promise<Store> {
+  return openDB<KioskSchema>(name, STORE_VERSION, {
+    upgrade(db) {
+      const outbox = db.createObjectStore("outbox", { keyPath: "order", autoIncrement: true });
+      outbox.createIndex("id", "event.id", { unique: true });
+      db.createObjectStore("sessions", { keyPath: "session" });
+      db.createObjectStore("benches", { keyPath: "worker" });
+      db.createObjectStore("device");
+      db.createObjectStore("cell");
+      db.createObjectStore("counters");
+    },
+    blocking(_current, _blocked, event) {
+      // safe because the event's target is the connection that stands in the way
+      (event.target as IDBDatabase).close();
+      onLost();
+    },
+    terminated: onLost,
+  });
+}
