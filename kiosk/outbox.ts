@@ -49,15 +49,22 @@ export function openOutbox(store: Store): Outbox {
 async function addRecords(store: Store, drafts: readonly Draft[]): Promise<ClockEvent[]> {
   const tx = store.transaction(["outbox", "counters"], "readwrite", { durability: "strict" });
   const events: ClockEvent[] = [];
-  let seq = (await tx.objectStore("counters").get("seq")) ?? 0;
-  for (const draft of drafts) {
-    const kept = await tx.objectStore("outbox").index("id").get(draft.id);
-    seq += 1;
-    const event = { ...draft, clock: { ...draft.clock, seq } } as ClockEvent; // safe: seq was missing
-    events.push(kept?.event ?? event);
-    if (!kept) await tx.objectStore("outbox").add({ event });
+  try {
+    let seq = (await tx.objectStore("counters").get("seq")) ?? 0;
+    for (const draft of drafts) {
+      const kept = await tx.objectStore("outbox").index("id").get(draft.id);
+      seq += 1;
+      const event = { ...draft, clock: { ...draft.clock, seq } } as ClockEvent; // safe: it lacked seq
+      events.push(kept?.event ?? event);
+      if (!kept) await tx.objectStore("outbox").add({ event });
+    }
+    await tx.objectStore("counters").put(seq, "seq");
+  } catch (error) {
+    // A transaction left alone commits what it has: one act is all there or not at all.
+    tx.done.catch(() => undefined);
+    tx.abort();
+    throw error;
   }
-  await tx.objectStore("counters").put(seq, "seq");
   await tx.done;
   return events;
 }

@@ -37,6 +37,9 @@ const LONGEST_DELAY_MS = 15_000;
 /** A tablet that the server does not know asks rarely: a person must enrol it first. */
 const UNKNOWN_DELAY_MS = 60_000;
 
+/** The batch itself is at fault: not JSON, too large, or not in the form (API.md). */
+const UNREADABLE = new Set([400, 413, 422]);
+
 type Outcome = "idle" | "more" | Exclude<Link, "connected">;
 
 /**
@@ -50,7 +53,8 @@ export function startSender(parts: SenderParts): Sender {
   void (async () => {
     while (!state.stopped) {
       state.early = new AbortController();
-      const outcome = await handIn(parts, state);
+      // A store that breaks in the middle loses nothing: the records are still there next time.
+      const outcome = await handIn(parts, state).catch((): Outcome => "away");
       state.failures = outcome === "away" ? state.failures + 1 : 0;
       if (outcome === "more" || state.stopped) continue;
       await parts.wait(delayMs(outcome, state.failures, parts.random()), state.early.signal);
@@ -91,7 +95,7 @@ async function handIn(parts: SenderParts, state: { limit: number }): Promise<Out
     parts.onLink("unknown-device");
     return "unknown-device";
   }
-  if (answer.came === "problem" && answer.status !== 429) {
+  if (answer.came === "problem" && UNREADABLE.has(answer.status)) {
     parts.onLink("connected");
     return divide(parts, state, batch);
   }
