@@ -27,10 +27,11 @@ export const permissions = {
     payroll: "self",
     worker: "self",
   },
-  "segments.read": { planner: "site", lead: "site" },
+  "tickets.read": { planner: "site", lead: "site" },
+  "segments.read": { planner: "site" },
   "segments.name-people": { payroll: "site" },
   "standards.read": { planner: "site", lead: "site" },
-  calculate: { planner: "site", lead: "site", payroll: "site", admin: "site" },
+  calculate: { planner: "site" },
 } as const satisfies Record<string, Partial<Record<Role, Reach>>>;
 
 export type Action = keyof typeof permissions;
