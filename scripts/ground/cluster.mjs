@@ -52,6 +52,11 @@ export function clusterIn(folder, { durable }) {
     },
     /** Gives the port of the running cluster, null when it is down. */
     port: () => runningPort(home),
+    /** Tells cheaply whether the server's process runs; it may still be starting. */
+    looksAlive: () => {
+      const pid = pidOf(home);
+      return pid !== null && existsSync(`/proc/${pid}`) && !isStranger(home);
+    },
     /** Stops it cleanly: open work is rolled back, the data is written out. Down already: nothing. */
     stop: async () => {
       if (!existsSync(path.join(home, "PG_VERSION"))) return;
@@ -163,14 +168,18 @@ function forgetStranger(home) {
   if (isStranger(home)) rmSync(path.join(home, "postmaster.pid"), { force: true });
 }
 
-function isStranger(home) {
+function pidOf(home) {
   const pidFile = path.join(home, "postmaster.pid");
-  if (!existsSync(pidFile)) return false;
-  const pid = Number.parseInt(readFileSync(pidFile, "utf8"), 10);
+  return existsSync(pidFile) ? Number.parseInt(readFileSync(pidFile, "utf8"), 10) : null;
+}
+
+function isStranger(home) {
+  const pid = pidOf(home);
+  if (pid === null || !existsSync(`/proc/${pid}`)) return false;
   try {
     return readlinkSync(`/proc/${pid}/cwd`) !== realpathSync(home);
   } catch (error) {
-    // gone, or another user's whom we may not look at: then pg_ctl decides
+    // another user's process, which we may not look at, is a stranger; one just gone is none
     return error.code === "EACCES" && statSync(`/proc/${pid}`).uid !== statSync(home).uid;
   }
 }

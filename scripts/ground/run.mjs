@@ -1,21 +1,26 @@
 import { spawn } from "node:child_process";
 
+const running = new Set();
+
 /**
  * Runs a program to its end and gives back what it printed; a failure carries its output, so that
  * whoever sees it need not run it again.
  *
  * @param {string} program
  * @param {readonly string[]} args
- * @param {{cwd?: string, env?: NodeJS.ProcessEnv, input?: string, show?: boolean, mayFail?: boolean}} [how]
- *   `show` prints as it goes instead of collecting; `mayFail` gives the exit code back
+ * @param {{cwd?: string, env?: NodeJS.ProcessEnv, input?: string, show?: boolean, talk?: boolean, mayFail?: boolean}} [how]
+ *   `show` prints as it goes, on standard error, instead of collecting; `talk` prints what
+ *   it says on standard error only; `mayFail` gives the exit code back
  * @returns {Promise<{code: number, text: string}>}
  */
 export function run(program, args, how = {}) {
-  const { cwd, env = process.env, input, show = false, mayFail = false } = how;
-  const stdout = show ? "inherit" : "pipe";
+  const { cwd, env = process.env, input, show = false, talk = false, mayFail = false } = how;
+  const output = show ? process.stderr : "pipe";
+  const errors = show || talk ? process.stderr : "pipe";
   return new Promise((resolve, reject) => {
-    const stdio = [input === undefined ? "ignore" : "pipe", stdout, stdout];
+    const stdio = [input === undefined ? "ignore" : "pipe", output, errors];
     const child = spawn(program, args, { cwd, env, stdio });
+    running.add(child);
     let text = "";
     const collect = (chunk) => {
       text += chunk;
@@ -24,6 +29,7 @@ export function run(program, args, how = {}) {
     child.stderr?.on("data", collect);
     child.on("error", reject);
     child.on("close", (code, signal) => {
+      running.delete(child);
       const ended = code ?? 128;
       if (ended === 0 || mayFail) return resolve({ code: ended, text });
       const end = signal ? `was stopped by ${signal}` : `ended with ${ended}`;
@@ -31,6 +37,11 @@ export function run(program, args, how = {}) {
     });
     child.stdin?.end(input);
   });
+}
+
+/** Stops whatever `run` is waiting for: the person wants to leave. */
+export function stopRunning() {
+  for (const child of running) child.kill("SIGTERM");
 }
 
 /** Waits; for programs that say no word when they are ready. */

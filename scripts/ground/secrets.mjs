@@ -1,0 +1,36 @@
+import { randomBytes } from "node:crypto";
+import { existsSync, readFileSync, renameSync, writeFileSync } from "node:fs";
+import path from "node:path";
+import { makeFolder } from "./place.mjs";
+
+const make = {
+  /** Seals the office's cookies. */
+  session: () => randomBytes(32).toString("base64url"),
+  /** Of the login that owns the database, and of the one that the app uses. */
+  owner: () => randomBytes(24).toString("base64url"),
+  app: () => randomBytes(24).toString("base64url"),
+  /** Ends the name of the app's login, so that two installations on one server have their own. */
+  suffix: () => randomBytes(4).toString("hex"),
+  /** Next seals what a form's action closes over with it; fixed, so that open pages outlive a build. */
+  action: () => randomBytes(32).toString("base64"),
+};
+
+/**
+ * The secrets of an installation, made once and kept in its data folder, readable by their owner
+ * alone. A missing one is added, so that a later version can ask for more.
+ *
+ * @param {string} folder
+ * @returns {Record<keyof typeof make, string>}
+ */
+export function secretsIn(folder) {
+  makeFolder(folder);
+  const file = path.join(folder, "secrets.json");
+  const kept = existsSync(file) ? JSON.parse(readFileSync(file, "utf8")) : {};
+  const missing = Object.keys(make).filter((name) => !kept[name]);
+  if (missing.length === 0) return kept;
+  for (const name of missing) kept[name] = make[name]();
+  // written beside and renamed: a machine that stops here leaves the old file or the new one
+  writeFileSync(`${file}.new`, `${JSON.stringify(kept, null, 2)}\n`, { mode: 0o600 });
+  renameSync(`${file}.new`, file);
+  return kept;
+}

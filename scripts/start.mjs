@@ -1,0 +1,92 @@
+import { build } from "./ground/build.mjs";
+import { findPrograms } from "./ground/cluster.mjs";
+import { endLeftovers } from "./ground/leftovers.mjs";
+import {
+  openInstallation,
+  runningRecord,
+  stopCluster,
+  usesGivenServer,
+} from "./ground/installation.mjs";
+import { installModules } from "./ground/modules.mjs";
+import { installPackages } from "./ground/packages.mjs";
+import { dataFolder, makeFolder } from "./ground/place.mjs";
+import { checkNode, chooseAddress, sayPlan } from "./ground/plan.mjs";
+import { identityOf, isAlive } from "./ground/process-record.mjs";
+import { runScript } from "./ground/programs.mjs";
+import { stopRunning } from "./ground/run.mjs";
+import { main, Stop, say } from "./ground/say.mjs";
+import { secretsIn } from "./ground/secrets.mjs";
+import { serve } from "./ground/supervise.mjs";
+
+/** `npm start`: from a fresh clone to a served Bookmatch, and from there to the next Ctrl-C. */
+await main(async () => {
+  checkNode();
+  makeFolder(dataFolder());
+  const record = runningRecord();
+  const before = record.read();
+  if (isAlive(before?.supervisor)) return sayRunning(before);
+  const leaving = personLeaves();
+  await endLeftovers(before);
+  const { host, port } = await chooseAddress();
+  const { action } = secretsIn(dataFolder());
+  sayPlan({ host, port, actionKey: action });
+  record.write({ supervisor: identityOf(process.pid), server: null, address: null });
+  try {
+    await startAndStay({ host, port, action, record, leaving });
+  } catch (error) {
+    if (!leaving.isOver) throw error; // what was interrupted on purpose needs no reason
+  } finally {
+    await stopCluster();
+    record.remove();
+  }
+  say("Bookmatch is stopped.");
+});
+
+async function startAndStay({ host, port, action, record, leaving }) {
+  if (!usesGivenServer && !findPrograms())
+    await installPackages(
+      ["postgresql"],
+      "give the address of a PostgreSQL server in DATABASE_URL.",
+    );
+  await installModules();
+  await build(action);
+  if (leaving.isOver) return;
+  const installation = await openInstallation();
+  const greeting = await prepare(installation.env, `http://${host}:${port}`);
+  if (leaving.isOver) return;
+  const server = await serve({ installation, host, port, record, leaving: leaving.promise });
+  record.write({ address: server.address, greeting });
+  if (!leaving.isOver) say(`\nBookmatch is running: ${server.address}\n${greeting}`);
+  if (!leaving.isOver) say("Stop it with Ctrl-C or npm stop.");
+  await server.watch().finally(() => server.stop());
+}
+
+/** Migrates, loads the demo the first time, and gives what a person needs to sign in. */
+async function prepare(env, address) {
+  const { code, text } = await runScript("prepare.ts", [address], env, {
+    mayFail: true,
+    talk: true,
+  });
+  if (code !== 0) throw new Stop("The database could not be made ready; the reason stands above.");
+  return text.trim();
+}
+
+function sayRunning({ supervisor, address, greeting }) {
+  if (address) say(`Bookmatch is already running: ${address}\n${greeting}\nStop it with npm stop.`);
+  else say(`Bookmatch is already being started, by process ${supervisor.pid}.`);
+}
+
+/** Resolves at the first Ctrl-C, stop request or closed terminal; whatever runs then is ended. */
+function personLeaves() {
+  const leaving = { isOver: false, promise: Promise.resolve() };
+  leaving.promise = new Promise((resolve) => {
+    const leave = () => {
+      if (!leaving.isOver) say("\nStopping …");
+      leaving.isOver = true;
+      stopRunning();
+      resolve();
+    };
+    for (const signal of ["SIGINT", "SIGTERM", "SIGHUP"]) process.on(signal, leave);
+  });
+  return leaving;
+}
