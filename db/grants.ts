@@ -34,27 +34,3 @@ function rightsOn(name: string): string {
   const isAppendOnly = appendOnly.includes(name.replace("public.", ""));
   return isAppendOnly ? "select, insert" : "select, insert, update, delete";
 }
-
-/**
- * Makes or renews the login with which the app works: a member of the group, owner of nothing.
- *
- * @param login a plain lower-case name; it goes into SQL as an identifier
- */
-export async function giveAppLogin(
-  client: pg.ClientBase,
-  { login, password }: { login: string; password: string },
-): Promise<void> {
-  const name = client.escapeIdentifier(login);
-  const secret = client.escapeLiteral(password);
-  await client.query(`do $$ begin
-    create role ${name} login nosuperuser nocreatedb nocreaterole;
-  exception when duplicate_object or unique_violation then null;
-  end $$`);
-  await client.query(`alter role ${name} password ${secret}`);
-  await client.query(`grant ${APP_GROUP} to ${name}`);
-  const { rows } = await client.query<{ name: string }>(
-    "select quote_ident(current_database()) as name",
-  );
-  await client.query(`revoke all on database ${rows[0]?.name} from public`);
-  await client.query(`grant connect on database ${rows[0]?.name} to ${name}`);
-}

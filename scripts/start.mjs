@@ -1,12 +1,12 @@
 import { build } from "./ground/build.mjs";
 import { findPrograms } from "./ground/cluster.mjs";
-import { endLeftovers } from "./ground/leftovers.mjs";
 import {
   openInstallation,
   runningRecord,
   stopCluster,
   usesGivenServer,
 } from "./ground/installation.mjs";
+import { endLeftovers } from "./ground/leftovers.mjs";
 import { installModules } from "./ground/modules.mjs";
 import { installPackages } from "./ground/packages.mjs";
 import { dataFolder, makeFolder } from "./ground/place.mjs";

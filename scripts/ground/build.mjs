@@ -8,7 +8,8 @@ import { Stop, say } from "./say.mjs";
 
 const stamp = path.join(root, ".next/bookmatch-build");
 const folders = ["app", "components", "db", "kiosk", "lib", "public"];
-const files = /^(package-lock\.json|tsconfig\.json|(next|postcss|tailwind)\.config\.\w+|proxy\.ts|instrumentation\.ts)$/;
+const files =
+  /^(package-lock\.json|tsconfig\.json|(next|postcss|tailwind)\.config\.\w+|proxy\.ts|instrumentation\.ts)$/;
 
 /** What a build depends on: every source file, the lock, this Node, the key of the actions. */
 function sourceDigest(actionKey) {

@@ -27,7 +27,8 @@ export const runningRecord = () => recordIn(path.join(dataFolder(), "running.jso
 export async function openInstallation() {
   const folder = dataFolder();
   const secrets = secretsIn(folder);
-  if (usesGivenServer) return { env: givenEnvironment(secrets), cluster: null, close: async () => {} };
+  if (usesGivenServer)
+    return { env: givenEnvironment(secrets), cluster: null, close: async () => undefined };
   const cluster = clusterIn(await clusterFolder(folder, ELSEWHERE), { durable: true });
   const { port, password, wasUp } = await cluster.start();
   await makeDatabase({ port, password, ownerPassword: secrets.owner });

@@ -52,5 +52,10 @@ export function sayPlan({ host, port, actionKey }) {
       : `${isFirst ? "make" : "start"} a database server of its own in ${place}, for this machine only`,
     `serve on http://${host}:${port}`,
   ];
-  say(`Bookmatch is going to:\n${steps.filter(Boolean).map((step) => `  · ${step}`).join("\n")}`);
+  say(
+    `Bookmatch is going to:\n${steps
+      .filter(Boolean)
+      .map((step) => `  · ${step}`)
+      .join("\n")}`,
+  );
 }

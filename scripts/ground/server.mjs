@@ -1,6 +1,5 @@
 import { spawn } from "node:child_process";
 import { existsSync, openSync, readFileSync, renameSync, statSync } from "node:fs";
-import path from "node:path";
 import { root } from "./place.mjs";
 import { next } from "./programs.mjs";
 import { pause } from "./run.mjs";

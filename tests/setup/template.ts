@@ -2,7 +2,7 @@ import { createHash } from "node:crypto";
 import { readdirSync, readFileSync } from "node:fs";
 import path from "node:path";
 import pg from "pg";
-import { giveAppLogin } from "@/db/grants";
+import { giveAppLogin } from "@/db/logins";
 import { migrate } from "@/db/migrate";
 
 /** Owns the databases of the tests, as the installation's owner owns its one. */

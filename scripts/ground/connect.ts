@@ -1,0 +1,37 @@
+import { env } from "@/app/_server/env";
+import { type Db, openPool, type Scope, wrap } from "@/db/client";
+import { findFirstSite } from "@/db/sites/found";
+
+/** What a person is told instead of a stack. */
+export class Refusal extends Error {}
+
+/** Speaks to the person on standard error; standard output is for the answer. */
+export function say(text: string): void {
+  process.stderr.write(`${text}\n`);
+}
+
+/** Runs a command; a refusal is printed plainly, anything else with its stack. */
+export async function command(work: () => Promise<void>): Promise<void> {
+  try {
+    await work();
+  } catch (error) {
+    if (!(error instanceof Refusal)) throw error;
+    say(error.message);
+    process.exitCode = 1;
+  }
+}
+
+/** Works with the app's login and closes the connections after it. */
+export async function withDatabase<T>(work: (db: Db) => Promise<T>): Promise<T> {
+  const pool = openPool(env().DATABASE_URL, (error) => say(error.message), 4);
+  return work(wrap(pool)).finally(() => pool.end());
+}
+
+/** The same, within the installation's site. */
+export async function withSite<T>(work: (scope: Scope) => Promise<T>): Promise<T> {
+  return withDatabase(async (db) => {
+    const site = await findFirstSite(db);
+    if (!site) throw new Refusal("There is no site here yet. Start Bookmatch once: npm start");
+    return work({ db, siteId: site.id });
+  });
+}
