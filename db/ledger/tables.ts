@@ -1,3 +1,4 @@
+import { sql } from "drizzle-orm";
 import {
   bigint,
   index,
@@ -31,6 +32,10 @@ export const clockEvents = pgTable(
     rawAt: instantAt(),
     /** The instant it counts at (LEDGER.md 2); never recomputed. */
     at: instantAt(),
+    /** The event that a correction is about: undo, void, move, reassign, and a settled subject. */
+    targetId: uuid(),
+    /** Where a correction makes something count: a move's `to`, the instant of an inserted event. */
+    countsAt: instantAt(),
     uncertaintyMs: integer(),
     seq: bigint({ mode: "number" }),
     /** The cell that the act belongs to, resolved at `at`. */
@@ -48,6 +53,10 @@ export const clockEvents = pgTable(
     primaryKey({ columns: [t.siteId, t.receivedAt, t.id] }),
     index("clock_events_worker").on(t.siteId, t.workerId, t.at),
     index("clock_events_id").on(t.siteId, t.id),
+    // corrections are few and reach across days: a window asks for all of its worker's
+    index("clock_events_corrections")
+      .on(t.siteId, t.workerId)
+      .where(sql`kind in ('void', 'move', 'insert', 'reassign', 'settle')`),
   ],
 );
 

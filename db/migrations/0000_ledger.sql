@@ -172,6 +172,8 @@ CREATE TABLE "clock_events" (
 	"by" text,
 	"raw_at" timestamp (3) with time zone,
 	"at" timestamp (3) with time zone,
+	"target_id" uuid,
+	"counts_at" timestamp (3) with time zone,
 	"uncertainty_ms" integer,
 	"seq" bigint,
 	"cell_id" uuid,
@@ -181,7 +183,7 @@ CREATE TABLE "clock_events" (
 	"body" jsonb NOT NULL,
 	"body_hash" text NOT NULL,
 	CONSTRAINT "clock_events_site_id_received_at_id_pk" PRIMARY KEY("site_id","received_at","id")
-);
+) PARTITION BY RANGE ("received_at");
 --> statement-breakpoint
 CREATE TABLE "event_ids" (
 	"site_id" uuid NOT NULL,
@@ -425,7 +427,7 @@ CREATE TABLE "segments" (
 	"event_id" uuid NOT NULL,
 	CONSTRAINT "segments_site_id_start_at_worker_id_item_pk" PRIMARY KEY("site_id","start_at","worker_id","item"),
 	CONSTRAINT "segments_order" CHECK ("segments"."end_at" > "segments"."start_at")
-);
+) PARTITION BY RANGE ("start_at");
 --> statement-breakpoint
 CREATE TABLE "shifts" (
 	"site_id" uuid NOT NULL,
@@ -503,6 +505,7 @@ CREATE INDEX "kiosk_sessions_site_id_kiosk_id_index" ON "kiosk_sessions" USING b
 CREATE INDEX "kiosk_sessions_site_id_worker_id_index" ON "kiosk_sessions" USING btree ("site_id","worker_id");--> statement-breakpoint
 CREATE INDEX "clock_events_worker" ON "clock_events" USING btree ("site_id","worker_id","at");--> statement-breakpoint
 CREATE INDEX "clock_events_id" ON "clock_events" USING btree ("site_id","id");--> statement-breakpoint
+CREATE INDEX "clock_events_corrections" ON "clock_events" USING btree ("site_id","worker_id") WHERE kind in ('void', 'move', 'insert', 'reassign', 'settle');--> statement-breakpoint
 CREATE INDEX "planned_shifts_site_id_worker_id_start_at_index" ON "planned_shifts" USING btree ("site_id","worker_id","start_at");--> statement-breakpoint
 CREATE INDEX "workers_site_id_home_cell_id_index" ON "workers" USING btree ("site_id","home_cell_id");--> statement-breakpoint
 CREATE INDEX "operations_site_id_cell_id_index" ON "operations" USING btree ("site_id","cell_id");--> statement-breakpoint

@@ -1,0 +1,284 @@
+-- Oldest code served: 0000_ledger
+-- One statement to read what a booking needs, one to write what it found. Neither holds a rule: the
+-- rules are in lib/. They are functions so that the server keeps their plans.
+
+create function epoch_ms(instant timestamptz) returns bigint
+language sql stable strict parallel safe
+return (extract(epoch from instant) * 1000)::bigint;
+--> statement-breakpoint
+
+-- What the ledger and its derivation hold of some workers around the touched instants: from the last
+-- gap without any event longer than p_gap to the next one (LEDGER.md 4), extended to what a
+-- correction takes from elsewhere and to a shift that is still open. The worker's corrections come
+-- along, with what they are about, also from outside. `truncated`: no gap within p_reach, ask again.
+create function timeline_windows(
+  p_site uuid,
+  p_workers uuid[],
+  p_touched timestamptz[],
+  p_ids uuid[],
+  p_targets uuid[],
+  p_gap interval,
+  p_reach interval
+) returns jsonb
+language plpgsql stable
+set search_path = public, pg_temp
+as $$
+begin
+  return (
+    with recursive chain as (
+      select e.worker_id, e.at, e.counts_at, e.target_id
+      from clock_events e
+      where e.site_id = p_site and e.id = any (p_targets) and e.worker_id = any (p_workers)
+      union
+      select e.worker_id, e.at, e.counts_at, e.target_id
+      from chain c
+      join clock_events e on e.site_id = p_site and e.id = c.target_id and e.worker_id = c.worker_id
+    ),
+    touched as (
+      select t.worker_id, t.at
+      from unnest(p_workers, p_touched) as t (worker_id, at)
+      union all
+      select c.worker_id, unnest(array[c.at, c.counts_at])
+      from chain c
+      union all
+      -- a correction that came before what it corrects
+      select e.worker_id, e.counts_at
+      from clock_events e
+      where e.site_id = p_site and e.worker_id = any (p_workers)
+        and e.kind in ('void', 'move', 'insert', 'reassign', 'settle')
+        and e.target_id = any (p_ids)
+      union all
+      select s.worker_id, s.start_at
+      from shifts s
+      where s.site_id = p_site and s.worker_id = any (p_workers) and s.end_at is null
+    ),
+    hull as materialized (
+      select t.worker_id, min(t.at) as low, max(t.at) as high
+      from touched t
+      where t.at is not null
+      group by t.worker_id
+    ),
+    -- nothing is received much before it happens: older partitions need no look
+    corrections as materialized (
+      select e.*
+      from hull h
+      join clock_events e on e.site_id = p_site and e.worker_id = h.worker_id
+        and e.received_at >= h.low - p_reach - interval '2 hours'
+        and e.kind in ('void', 'move', 'insert', 'reassign', 'settle')
+      where e.kept_for is null
+    ),
+    points as (
+      select h.worker_id, h.low, h.high, p.at
+      from hull h
+      cross join lateral (
+        select e.at
+        from clock_events e
+        where e.site_id = p_site and e.worker_id = h.worker_id
+          and e.received_at >= h.low - p_reach - interval '2 hours'
+          and e.at >= h.low - p_reach and e.at <= h.high + p_reach
+          and e.kept_for is null
+        union all
+        select c.counts_at
+        from corrections c
+        where c.worker_id = h.worker_id
+          and c.counts_at >= h.low - p_reach and c.counts_at <= h.high + p_reach
+        union all
+        values (h.low), (h.high)
+      ) p
+    ),
+    gaps as (
+      select p.*, p.at - lag(p.at) over w as before, lead(p.at) over w - p.at as after
+      from points p
+      window w as (partition by p.worker_id order by p.at)
+    ),
+    bounds as materialized (
+      select g.worker_id, g.low, g.high,
+        max(g.at) filter (where g.at <= g.low and (g.before is null or g.before > p_gap)) as first,
+        min(g.at) filter (where g.at >= g.high and (g.after is null or g.after > p_gap)) as last
+      from gaps g
+      group by g.worker_id, g.low, g.high
+    ),
+    events as (
+      select e.*
+      from bounds b
+      join clock_events e on e.site_id = p_site and e.worker_id = b.worker_id
+        and e.received_at >= b.first - interval '2 hours'
+        and e.at >= b.first and e.at <= b.last
+      where e.kept_for is null
+      union all
+      select c.*
+      from corrections c
+      join bounds b on b.worker_id = c.worker_id
+      where c.at < b.first or c.at > b.last
+      union all
+      select e.*
+      from corrections c
+      join bounds b on b.worker_id = c.worker_id
+      join clock_events e on e.site_id = p_site and e.id = c.target_id
+        and e.worker_id = c.worker_id
+      where e.kept_for is null and (e.at < b.first or e.at > b.last)
+    )
+    select jsonb_agg(jsonb_build_object(
+      'workerId', b.worker_id,
+      'firstMs', epoch_ms(b.first),
+      'lastMs', epoch_ms(b.last),
+      'truncated', b.first - p_gap < b.low - p_reach or b.last + p_gap > b.high + p_reach,
+      'version', coalesce(h.version, 0),
+      'asOfMs', epoch_ms(h.as_of),
+      'homeCellId', w.home_cell_id,
+      'events', (
+        select jsonb_agg(jsonb_build_object(
+          'id', e.id, 'atMs', epoch_ms(e.at), 'seq', coalesce(e.seq, 0), 'kiosk', e.kiosk_id,
+          'session', e.session_id, 'cell', e.cell_id, 'by', e.by,
+          'receivedMs', epoch_ms(e.received_at), 'weights', coalesce(e.weights, '{}'),
+          'questions', coalesce(e.questions, '{}'), 'body', e.body - 'v' - 'clock'))
+        from events e
+        where e.worker_id = b.worker_id),
+      'planned', (
+        select jsonb_agg(jsonb_build_object(
+          'startMs', epoch_ms(p.start_at), 'endMs', epoch_ms(p.end_at)) order by p.start_at)
+        from (
+          select distinct on (s.work_on) s.start_at, s.end_at
+          from planned_shifts s
+          where s.site_id = p_site and s.worker_id = b.worker_id
+            and s.start_at >= b.first - interval '3 days'
+            and s.start_at <= b.last + interval '3 days'
+          order by s.work_on, s.seq desc) p),
+      'segments', (
+        select jsonb_agg(jsonb_build_object(
+          'startMs', epoch_ms(s.start_at), 'item', s.item, 'endMs', epoch_ms(s.end_at),
+          'activity', s.activity, 'ticket', s.ticket, 'operation', s.operation, 'code', s.code,
+          'weight', s.weight, 'seconds', s.seconds, 'cellId', s.cell_id, 'said', s.said,
+          'eventId', s.event_id))
+        from segments s
+        where s.site_id = p_site and s.worker_id = b.worker_id
+          and s.start_at >= date_trunc('second', b.first) and s.start_at <= b.last),
+      'shifts', (
+        select jsonb_agg(jsonb_build_object(
+          'startMs', epoch_ms(s.start_at), 'endMs', epoch_ms(s.end_at),
+          'startEventId', s.start_event_id, 'endEventId', s.end_event_id,
+          'provisional', s.provisional, 'cellId', s.cell_id))
+        from shifts s
+        where s.site_id = p_site and s.worker_id = b.worker_id
+          and s.start_at >= date_trunc('second', b.first) and s.start_at <= b.last),
+      'reports', (
+        select jsonb_agg(jsonb_build_object(
+          'id', r.id, 'kind', r.kind, 'atMs', epoch_ms(r.at), 'ticket', r.ticket,
+          'operation', r.operation, 'good', r.good, 'rework', r.rework, 'scrap', r.scrap,
+          'stop', r.stop, 'causedBy', r.caused_by, 'defects', r.defects, 'cellId', r.cell_id))
+        from reports r
+        where r.site_id = p_site and r.worker_id = b.worker_id
+          and r.at >= date_trunc('second', b.first) and r.at <= b.last),
+      'looseEnds', (
+        select jsonb_agg(jsonb_build_object(
+          'code', l.code, 'subject', l.subject, 'atMs', epoch_ms(l.at), 'settled', l.settled))
+        from loose_ends l
+        where l.site_id = p_site and l.worker_id = b.worker_id and l.source = 'fold'
+          and l.at >= date_trunc('second', b.first) and l.at <= b.last)))
+    from bounds b
+    join workers w on w.site_id = p_site and w.id = b.worker_id
+    left join timeline_heads h on h.site_id = p_site and h.worker_id = b.worker_id
+  );
+end $$;
+--> statement-breakpoint
+
+-- Books what the rules in lib/ decided, all of it or nothing: locks the heads in the order of the
+-- workers, checks that nobody else derived them meanwhile (BM001: read again), adds to the ledger,
+-- and puts the derived rows of the windows right.
+create function book(p_site uuid, p_received timestamptz, p jsonb) returns void
+language plpgsql
+set search_path = public, pg_temp
+as $$
+declare
+  locked integer;
+  added integer;
+begin
+  perform make_partition('clock_events', p_received);
+  perform make_partition('segments', m.month)
+  from (
+    select distinct date_trunc('month', s.start_at, 'UTC') as month
+    from jsonb_to_recordset(p -> 'segments') as s (start_at timestamptz)
+  ) m;
+
+  insert into timeline_heads as h (site_id, worker_id, version, as_of)
+  select p_site, n.worker_id, n.version + 1, n.as_of
+  from jsonb_to_recordset(p -> 'heads') as n (worker_id uuid, version integer, as_of timestamptz)
+  order by n.worker_id
+  on conflict (site_id, worker_id) do update
+    set version = excluded.version, as_of = greatest(h.as_of, excluded.as_of)
+    where h.version = excluded.version - 1;
+  get diagnostics locked = row_count;
+  if locked < jsonb_array_length(p -> 'heads') then
+    raise exception 'a timeline was derived again meanwhile' using errcode = 'BM001';
+  end if;
+
+  insert into event_ids (site_id, id, received_at, body_hash)
+  select p_site, e.id, p_received, e.body_hash
+  from jsonb_to_recordset(p -> 'events') as e (id uuid, body_hash text)
+  order by e.id
+  on conflict do nothing;
+  get diagnostics added = row_count;
+  if added < jsonb_array_length(p -> 'events') then
+    raise exception 'an event was booked meanwhile' using errcode = 'BM001';
+  end if;
+
+  insert into clock_events
+  select * from jsonb_populate_recordset(null::clock_events, p -> 'events');
+  insert into notes (site_id, event_id, text)
+  select p_site, n.event_id, n.text
+  from jsonb_to_recordset(p -> 'notes') as n (event_id uuid, text text);
+  insert into kiosk_sessions (site_id, id, kiosk_id, worker_id, sealed_hash, opened_at)
+  select p_site, s.id, s.kiosk_id, s.worker_id, s.sealed_hash, s.opened_at
+  from jsonb_to_recordset(p -> 'sessions') as s
+    (id uuid, kiosk_id uuid, worker_id uuid, sealed_hash text, opened_at timestamptz)
+  on conflict do nothing;
+
+  delete from segments s
+  using jsonb_to_recordset(p -> 'gone' -> 'segments') as g
+    (worker_id uuid, start_at timestamptz, item smallint)
+  where s.site_id = p_site and s.start_at = g.start_at and s.worker_id = g.worker_id
+    and s.item = g.item;
+  delete from shifts s
+  using jsonb_to_recordset(p -> 'gone' -> 'shifts') as g (worker_id uuid, start_at timestamptz)
+  where s.site_id = p_site and s.worker_id = g.worker_id and s.start_at = g.start_at;
+  delete from reports r
+  using jsonb_to_recordset(p -> 'gone' -> 'reports') as g (id uuid)
+  where r.site_id = p_site and r.id = g.id;
+  delete from loose_ends l
+  using jsonb_to_recordset(p -> 'gone' -> 'loose_ends') as g (code text, subject text)
+  where l.site_id = p_site and l.code = g.code and l.subject = g.subject;
+
+  insert into segments
+  select * from jsonb_populate_recordset(null::segments, p -> 'segments')
+  on conflict (site_id, start_at, worker_id, item) do update
+    set end_at = excluded.end_at, activity = excluded.activity, ticket = excluded.ticket,
+      operation = excluded.operation, code = excluded.code, weight = excluded.weight,
+      seconds = excluded.seconds, cell_id = excluded.cell_id, said = excluded.said,
+      event_id = excluded.event_id;
+  insert into shifts
+  select * from jsonb_populate_recordset(null::shifts, p -> 'shifts')
+  on conflict (site_id, worker_id, start_at) do update
+    set end_at = excluded.end_at, start_event_id = excluded.start_event_id,
+      end_event_id = excluded.end_event_id, provisional = excluded.provisional,
+      cell_id = excluded.cell_id;
+  insert into reports
+  select * from jsonb_populate_recordset(null::reports, p -> 'reports')
+  on conflict (site_id, id) do update
+    set kind = excluded.kind, worker_id = excluded.worker_id, at = excluded.at,
+      ticket = excluded.ticket, operation = excluded.operation, good = excluded.good,
+      rework = excluded.rework, scrap = excluded.scrap, stop = excluded.stop,
+      caused_by = excluded.caused_by, defects = excluded.defects, cell_id = excluded.cell_id;
+  insert into loose_ends
+  select * from jsonb_populate_recordset(null::loose_ends, p -> 'loose_ends')
+  on conflict (site_id, code, subject) do update
+    set worker_id = excluded.worker_id, ticket = excluded.ticket, at = excluded.at,
+      settled = excluded.settled;
+
+  insert into dirty_marks (site_id, kind, key)
+  select p_site, m.kind, m.key
+  from jsonb_to_recordset(p -> 'marks') as m (kind text, key text);
+  insert into audit_log (site_id, actor, action, subject, detail)
+  select p_site, a.actor, a.action, a.subject, a.detail
+  from jsonb_to_recordset(p -> 'audit') as a
+    (actor text, action text, subject text, detail jsonb);
+end $$;
