@@ -66,7 +66,10 @@ begin
     return false;
   end if;
   perform pg_advisory_xact_lock(hashtextextended(parent, 0));
-  if to_regclass(part) is not null then
+  -- by a query: to_regclass may still remember that there was none
+  if exists (
+    select from pg_class c where c.relname = part and c.relnamespace = 'public'::regnamespace
+  ) then
     return false;
   end if;
   execute format('create table %I (like %I including defaults including constraints)', part, parent);
