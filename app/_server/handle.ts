@@ -28,7 +28,8 @@ export interface Call<K extends ActorKind, B, Q> {
 }
 
 interface Context {
-  params: Promise<Record<string, string | string[] | undefined>>;
+  /** Next gives nothing where the path has no parameters. */
+  params: Promise<Record<string, string | string[] | undefined> | undefined>;
 }
 
 /** What a handler answers: a value for JSON, a `Response` of its own, or a problem. */
@@ -73,7 +74,10 @@ async function answerCall<K extends ActorKind, B, Q>(
   const body = entrance.body ? await readJson(request, entrance.body) : ok(undefined as B);
   if (!body.ok) return body;
   const params = Object.fromEntries(
-    Object.entries(await context.params).map(([name, value]) => [name, String(value ?? "")]),
+    Object.entries((await context.params) ?? {}).map(([name, value]) => [
+      name,
+      String(value ?? ""),
+    ]),
   );
   return run({ actor, reach, body: body.value, query: query.value, params, request, receivedAt });
 }
