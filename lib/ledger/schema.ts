@@ -94,8 +94,9 @@ export const eventBodies = {
 } as const;
 
 export type EventKind = keyof typeof eventBodies;
+type Shape<K extends EventKind> = (typeof eventBodies)[K] extends z.ZodObject<infer S> ? S : never;
 export type EventBody = {
-  [K in EventKind]: { kind: K } & z.infer<(typeof eventBodies)[K]>;
+  [K in EventKind]: z.infer<z.ZodObject<{ kind: z.ZodLiteral<K> } & Shape<K>>>;
 }[EventKind];
 
 /** What the tablet knows of its own clock at the act: `offsetMs` is server − tablet (LEDGER.md 2). */
