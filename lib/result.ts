@@ -40,3 +40,8 @@ export function no(
 ): { ok: false; problem: Problem } {
   return { ok: false, problem: { code, detail, ...more } };
 }
+
+/** A no that hangs on one field of a form: something else has its value, or it is gone. */
+export function noField(path: string, message: string): { ok: false; problem: Problem } {
+  return no("conflict", message, { errors: [{ path, message }] });
+}

@@ -1,6 +1,10 @@
-import { and, eq, inArray, isNull, sql } from "drizzle-orm";
-import { officeSessions, throttles } from "@/db/access/tables";
+import { and, eq, gt, inArray, isNull, sql } from "drizzle-orm";
+import { v7 as uuidv7 } from "uuid";
+import { accountRoles, accounts, officeSessions, setupLinks, throttles } from "@/db/access/tables";
+import { recordAct } from "@/db/audit/commands";
 import type { Db } from "@/db/client";
+import { sites } from "@/db/sites/tables";
+import { no, ok, type Result } from "@/lib/result";
 
 /** Opens an office session for an account, until `expiresAt`. */
 export async function openSession(
@@ -68,3 +72,47 @@ export async function reserveTry(
 export async function clearTries(db: Db, keys: readonly string[]): Promise<void> {
   await db.delete(throttles).where(inArray(throttles.key, [...keys]));
 }
+
+/**
+ * Makes the first admin of an installation from its one-time link, once: the link is used up in the
+ * same transaction. The link must be live and the installation have a site. For an e-mail that signs
+ * in already it gives a new password and the admin's role: the way back in for a lost last admin.
+ */
+export async function makeFirstAdmin(
+  db: Db,
+  admin: { tokenHash: string; name: string; email: string; passwordHash: string; now: Date },
+): Promise<Result<{ accountId: string }>> {
+  return db.transaction(async (tx) => {
+    const used = await tx
+      .update(setupLinks)
+      .set({ usedAt: admin.now })
+      .where(
+        and(
+          eq(setupLinks.tokenHash, admin.tokenHash),
+          isNull(setupLinks.usedAt),
+          gt(setupLinks.expiresAt, admin.now),
+        ),
+      )
+      .returning({ id: setupLinks.id });
+    const [site] = await tx.select({ id: sites.id }).from(sites).orderBy(sites.createdAt).limit(1);
+    if (used.length === 0 || !site) return no("gone", LINK_USED);
+    const { name, email, passwordHash } = admin;
+    const [account] = await tx
+      .insert(accounts)
+      .values({ id: uuidv7(), name, email, passwordHash })
+      .onConflictDoUpdate({ target: accounts.email, set: { name, passwordHash, disabledAt: null } })
+      .returning({ id: accounts.id });
+    const accountId = account!.id;
+    await revokeSessionsOf(tx, accountId, admin.now);
+    await tx
+      .insert(accountRoles)
+      .values({ siteId: site.id, id: uuidv7(), accountId, role: "admin" })
+      .onConflictDoNothing();
+    const scope = { db: tx, siteId: site.id };
+    const subject = `account:${accountId}`;
+    await recordAct(scope, { by: "command:first-admin", action: "accounts.first", subject });
+    return ok({ accountId });
+  });
+}
+
+const LINK_USED = "This link was used or is over. Ask for a new one where Bookmatch was started.";

@@ -1,4 +1,4 @@
-import { and, eq, gt, isNull } from "drizzle-orm";
+import { and, asc, eq, exists, gt, isNull, sql } from "drizzle-orm";
 import {
   accountRoles,
   accounts,
@@ -8,6 +8,7 @@ import {
   setupLinks,
 } from "@/db/access/tables";
 import type { Db, Scope } from "@/db/client";
+import { workers } from "@/db/people/tables";
 import type { Held } from "@/lib/access/may";
 import { role } from "@/lib/access/roles";
 
@@ -87,6 +88,55 @@ export async function findSetupLink(db: Db, tokenHash: string, now: Date) {
     )
     .limit(1);
   return link ?? null;
+}
+
+/** An account of the office as the admin sees it, with what it may do at the site. */
+export interface Account {
+  id: string;
+  name: string;
+  email: string;
+  isClosed: boolean;
+  held: Held[];
+  /** The number of the worker that the person is, if any. */
+  worker: string | null;
+}
+
+/** Lists the accounts that hold a role at the site, by name; at most `limit`. */
+export async function listAccounts({ db, siteId }: Scope, limit: number): Promise<Account[]> {
+  const roles = sql<{ role: string; cellId: string | null }[]>`(
+    select json_agg(json_build_object('role', r.role, 'cellId', r.cell_id) order by r.created_at)
+    from ${accountRoles} r
+    where r.site_id = ${siteId} and r.account_id = ${accounts.id})`;
+  const rows = await db
+    .select({
+      id: accounts.id,
+      name: accounts.name,
+      email: accounts.email,
+      disabledAt: accounts.disabledAt,
+      roles,
+      worker: workers.number,
+    })
+    .from(accounts)
+    .leftJoin(
+      accountWorkers,
+      and(eq(accountWorkers.siteId, siteId), eq(accountWorkers.accountId, accounts.id)),
+    )
+    .leftJoin(workers, and(eq(workers.siteId, siteId), eq(workers.id, accountWorkers.workerId)))
+    .where(
+      exists(
+        db
+          .select({ one: sql`1` })
+          .from(accountRoles)
+          .where(and(eq(accountRoles.siteId, siteId), eq(accountRoles.accountId, accounts.id))),
+      ),
+    )
+    .orderBy(asc(accounts.name), asc(accounts.id))
+    .limit(limit);
+  return rows.map(({ disabledAt, roles, ...account }) => ({
+    ...account,
+    isClosed: disabledAt !== null,
+    held: heldOf(roles),
+  }));
 }
 
 /** Lists what the account behind a worker may do at a kiosk; empty for most workers. */

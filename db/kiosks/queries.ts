@@ -1,4 +1,4 @@
-import { and, eq } from "drizzle-orm";
+import { and, asc, eq, sql } from "drizzle-orm";
 import type { Db, Scope } from "@/db/client";
 import { kioskSessions, kiosks } from "@/db/kiosks/tables";
 import { workers } from "@/db/people/tables";
@@ -37,4 +37,35 @@ export async function findKioskSession({ db, siteId }: Scope, kioskId: string, t
     )
     .limit(1);
   return session ?? null;
+}
+
+/** Lists a site's kiosks with the cells they serve at `now`, by name; revoked ones last. */
+export async function listKiosks({ db, siteId }: Scope, now: Date) {
+  const cells = sql<{ id: string; name: string }[]>`coalesce((
+    select json_agg(json_build_object('id', c.id, 'name', c.name) order by kc.position)
+    from kiosk_cells kc
+    join cells c on c.site_id = kc.site_id and c.id = kc.cell_id
+    where kc.site_id = ${siteId}
+      and kc.kiosk_id = ${kiosks.id}
+      and kc.effective_from = (
+        select max(latest.effective_from)
+        from kiosk_cells latest
+        where latest.site_id = ${siteId}
+          and latest.kiosk_id = ${kiosks.id}
+          and latest.effective_from <= ${now.toISOString()}::timestamptz)), '[]')`;
+  return db
+    .select({
+      id: kiosks.id,
+      name: kiosks.name,
+      cells,
+      enrolledAt: kiosks.enrolledAt,
+      lastSeenAt: kiosks.lastSeenAt,
+      revokedAt: kiosks.revokedAt,
+      build: kiosks.build,
+      queued: kiosks.queued,
+      batteryPercent: kiosks.batteryPercent,
+    })
+    .from(kiosks)
+    .where(eq(kiosks.siteId, siteId))
+    .orderBy(sql`${kiosks.revokedAt} is not null`, asc(kiosks.name), asc(kiosks.id));
 }
