@@ -1,8 +1,9 @@
 import { randomInt } from "node:crypto";
 import { parseArgs } from "node:util";
 import { hashSecret } from "@/app/_server/secret";
+import { listCells } from "@/db/cells/queries";
 import type { Scope } from "@/db/client";
-import { addEnrolmentCode, findCellNamed, listCells } from "@/db/kiosks/enrolment";
+import { addEnrolmentCode, findCellNamed } from "@/db/kiosks/enrolment";
 import { drawEnrolmentCode, shownEnrolmentCode } from "@/lib/access/issue";
 import { command, Refusal, say, withSite } from "./ground/connect";
 

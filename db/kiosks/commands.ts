@@ -2,32 +2,8 @@ import { and, eq, isNull } from "drizzle-orm";
 import { v7 as uuidv7 } from "uuid";
 import { recordAct } from "@/db/audit/commands";
 import type { Scope } from "@/db/client";
-import { enrolmentCodes, kioskCells, kiosks } from "@/db/kiosks/tables";
+import { kioskCells, kiosks } from "@/db/kiosks/tables";
 import { no, ok, type Result } from "@/lib/result";
-
-/**
- * Offers a one-time code with which a browser becomes a kiosk of a cell. Offered twice under one id,
- * the code shown last is the one that holds; once used it stays used.
- */
-export async function offerEnrolment(
-  scope: Scope,
-  offer: { id: string; codeHash: string; name: string; cellId: string; expiresAt: Date },
-  by: string,
-): Promise<void> {
-  await scope.db.transaction(async (db) => {
-    const { codeHash, expiresAt } = offer;
-    await db
-      .insert(enrolmentCodes)
-      .values({ siteId: scope.siteId, ...offer })
-      .onConflictDoUpdate({
-        target: [enrolmentCodes.siteId, enrolmentCodes.id],
-        set: { codeHash, expiresAt },
-        setWhere: isNull(enrolmentCodes.usedAt),
-      });
-    const subject = `enrolment:${offer.id}`;
-    await recordAct({ ...scope, db }, { by, action: "kiosks.offer", subject });
-  });
-}
 
 /**
  * Gives a kiosk a new name and, from `now` on, a cell; a null `cellId` leaves the cells as they are.

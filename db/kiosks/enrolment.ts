@@ -1,4 +1,4 @@
-import { and, asc, eq } from "drizzle-orm";
+import { and, eq, isNull } from "drizzle-orm";
 import { v7 as uuidv7 } from "uuid";
 import { recordAct } from "@/db/audit/commands";
 import { cells } from "@/db/cells/tables";
@@ -7,15 +7,6 @@ import { enrolmentCodes } from "@/db/kiosks/tables";
 
 /** How long an enrolment code can be used (API.md). */
 const CODE_MS = 10 * 60_000;
-
-/** Lists the cells of the site by their place in the house; empty before any is made. */
-export async function listCells({ db, siteId }: Scope) {
-  return db
-    .select({ id: cells.id, name: cells.name })
-    .from(cells)
-    .where(eq(cells.siteId, siteId))
-    .orderBy(asc(cells.position), asc(cells.name));
-}
 
 /** Finds a cell of the site by its name as it is written; null if there is none. */
 export async function findCellNamed({ db, siteId }: Scope, name: string) {
@@ -28,20 +19,34 @@ export async function findCellNamed({ db, siteId }: Scope, name: string) {
 }
 
 /**
- * Keeps a new one-time code with which a browser becomes a kiosk of a cell.
+ * Keeps a new one-time code with which a browser becomes a kiosk of a cell. Kept twice under one id
+ * (a form sent again), the code shown last is the one that holds; once used it stays used.
  *
  * @param wanted `codeHash`: SHA-256 of the code in capitals without hyphen; `by`: for the audit log
  * @returns the instant from which the code is of no use
  */
 export async function addEnrolmentCode(
   { db, siteId }: Scope,
-  wanted: { codeHash: string; name: string; cellId: string; by: string; now: Date },
+  wanted: {
+    id?: string;
+    codeHash: string;
+    name: string;
+    cellId: string;
+    by: string;
+    now: Date;
+  },
 ): Promise<Date> {
-  const { codeHash, name, cellId, by, now } = wanted;
+  const { id = uuidv7(), codeHash, name, cellId, by, now } = wanted;
   const expiresAt = new Date(now.getTime() + CODE_MS);
-  const id = uuidv7();
   await db.transaction(async (tx) => {
-    await tx.insert(enrolmentCodes).values({ siteId, id, codeHash, name, cellId, expiresAt });
+    await tx
+      .insert(enrolmentCodes)
+      .values({ siteId, id, codeHash, name, cellId, expiresAt })
+      .onConflictDoUpdate({
+        target: [enrolmentCodes.siteId, enrolmentCodes.id],
+        set: { codeHash, expiresAt },
+        setWhere: isNull(enrolmentCodes.usedAt),
+      });
     const entry = {
       by,
       action: "kiosks.enrol",
