@@ -46,12 +46,12 @@ export async function listKiosks({ db, siteId }: Scope, now: Date) {
     from kiosk_cells kc
     join cells c on c.site_id = kc.site_id and c.id = kc.cell_id
     where kc.site_id = ${siteId}
-      and kc.kiosk_id = ${kiosks.id}
+      and kc.kiosk_id = kiosks.id
       and kc.effective_from = (
         select max(latest.effective_from)
         from kiosk_cells latest
         where latest.site_id = ${siteId}
-          and latest.kiosk_id = ${kiosks.id}
+          and latest.kiosk_id = kiosks.id
           and latest.effective_from <= ${now.toISOString()}::timestamptz)), '[]')`;
   return db
     .select({
