@@ -1,0 +1,76 @@
+import { Temporal } from "temporal-polyfill";
+import { assert } from "@/lib/assert";
+import { sum } from "@/lib/sum";
+import { wallClock } from "@/lib/time/zone";
+
+/** A hundredth of an hour. */
+const HUNDREDTH_SECONDS = 36;
+
+/** Hours as decimal texts with two places; the parts add up to the total. */
+export interface DecimalHours {
+  total: string;
+  parts: string[];
+}
+
+/**
+ * Writes lengths as decimal hours so that the column adds up (CALCULATIONS.md 4): the total is
+ * rounded once, half up on exact seconds; then each part gets its floor, and the hundredths left
+ * over go to the largest fractions, ties to the earlier part. A part of 0 seconds stays 0.00.
+ *
+ * @param parts integer seconds, 0 or more; may be empty
+ */
+export function decimalHours(parts: readonly number[]): DecimalHours {
+  assert(
+    parts.every((part) => Number.isInteger(part) && part >= 0),
+    "decimalHours: whole seconds, 0 or more",
+  );
+  const total = hundredths(sum(parts));
+  const shares = parts.map((part) => Math.floor(part / HUNDREDTH_SECONDS));
+  const byFraction = parts.map((part, index) => ({ index, left: part % HUNDREDTH_SECONDS }));
+  byFraction.sort((a, b) => b.left - a.left); // stable: ties keep the order of the parts
+  for (const { index } of byFraction.slice(0, total - sum(shares))) shares[index]! += 1;
+  return { total: hoursText(total), parts: shares.map(hoursText) };
+}
+
+/** One length as decimal hours with two places, half up on exact seconds: 6300 is "1.75". */
+export function decimalHour(seconds: number): string {
+  return decimalHours([seconds]).total;
+}
+
+/**
+ * A length as people say it, in whole minutes that have passed: "7 h 05 min", "45 min", "0 min".
+ * The unit symbols are the same in every language that we speak.
+ *
+ * @param seconds 0 or more
+ */
+export function hoursAndMinutes(seconds: number): string {
+  const minutes = Math.floor(seconds / 60);
+  const [hours, rest] = [Math.floor(minutes / 60), minutes % 60];
+  return hours > 0 ? `${hours} h ${String(rest).padStart(2, "0")} min` : `${rest} min`;
+}
+
+/** Local time on a 24-hour clock, "09:05"; seconds are cut off, not rounded. */
+export function clockText(atMs: number, zone: string): string {
+  return wallClock(atMs, zone).toPlainTime().toString({ smallestUnit: "minute" });
+}
+
+/** A date as the desk writes it, "Thu 14 May", with the language's own words in that order. */
+export function dayText(date: string, language: string): string {
+  const atMs = Temporal.PlainDate.from(date).toZonedDateTime("UTC").epochMilliseconds;
+  const parts: Intl.DateTimeFormatOptions[] = [
+    { weekday: "short" },
+    { day: "numeric" },
+    { month: "short" },
+  ];
+  return parts
+    .map((part) => new Intl.DateTimeFormat(language, { ...part, timeZone: "UTC" }).format(atMs))
+    .join(" ");
+}
+
+function hundredths(seconds: number): number {
+  return Math.floor((seconds + HUNDREDTH_SECONDS / 2) / HUNDREDTH_SECONDS);
+}
+
+function hoursText(hundredths: number): string {
+  return `${Math.floor(hundredths / 100)}.${String(hundredths % 100).padStart(2, "0")}`;
+}

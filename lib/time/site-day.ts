@@ -1,0 +1,95 @@
+import { Temporal } from "temporal-polyfill";
+import { assert } from "@/lib/assert";
+import { boundaryMs } from "@/lib/time/wall-time";
+import { wallClock } from "@/lib/time/zone";
+
+/** Where a site's days begin, from an instant on (LEDGER.md 2: the zone is effective-dated too). */
+export interface DayRule {
+  fromMs: number;
+  timeZone: string;
+  /** Minutes after local midnight at which a production day begins: 0 to 1439. */
+  productionDayStartsAtMinutes: number;
+}
+
+/** A half-open stretch of time, `[start, end)` in epoch seconds. */
+export interface Stretch {
+  start: number;
+  end: number;
+}
+
+/** The date that a calendar on the wall shows in the zone at an instant (epoch milliseconds). */
+export function localDate(atMs: number, zone: string): string {
+  return wallClock(atMs, zone).toPlainDate().toString();
+}
+
+/** The date `days` later, or earlier when negative. */
+export function addDays(date: string, days: number): string {
+  return Temporal.PlainDate.from(date).add({ days }).toString();
+}
+
+/** The dates from `from` up to, not including, `to`; empty when there is none between. */
+export function listDays(from: string, to: string): string[] {
+  const count = Temporal.PlainDate.from(from).until(to, { largestUnit: "days" }).days;
+  return Array.from({ length: Math.max(0, count) }, (_, index) => addDays(from, index));
+}
+
+/**
+ * The row in force at an instant: the latest that began by then. What comes before the first row
+ * goes by the first.
+ *
+ * @param rules sorted by `fromMs`; at least one
+ */
+export function ruleAt<R extends { fromMs: number }>(rules: readonly R[], atMs: number): R {
+  assert(rules.length > 0, "ruleAt: a site has at least one row of rules");
+  return rules.findLast(({ fromMs }) => fromMs <= atMs) ?? rules[0]!;
+}
+
+/**
+ * The bounds of a production day. Days follow each other without gap or overlap, also on the days
+ * on which clocks or rules change: a new row of rules begins with the first day that starts under
+ * it, and the day before lasts until then.
+ *
+ * @param date the date on which the day begins
+ * @param rules sorted by `fromMs`; at least one
+ */
+export function dayBounds(date: string, rules: readonly DayRule[]): Stretch {
+  return { start: dayStart(date, rules), end: dayStart(addDays(date, 1), rules) };
+}
+
+/** The bounds of the production days from `from` up to, not including, `to`. */
+export function rangeBounds(from: string, to: string, rules: readonly DayRule[]): Stretch {
+  return { start: dayStart(from, rules), end: dayStart(to, rules) };
+}
+
+/** The production day that an instant belongs to, named by the date on which it begins. */
+export function productionDay(atMs: number, rules: readonly DayRule[]): string {
+  const atSecond = Math.floor(atMs / 1000);
+  let date = addDays(localDate(atMs, ruleAt(rules, atMs).timeZone), 1);
+  while (dayStart(date, rules) > atSecond) date = addDays(date, -1);
+  return date;
+}
+
+/** The production days that a stretch of epoch seconds touches, each with its bounds; in order. */
+export function daysTouched(
+  { start, end }: Stretch,
+  rules: readonly DayRule[],
+): (Stretch & { date: string })[] {
+  if (end <= start) return [];
+  const first = productionDay(start * 1000, rules);
+  const last = productionDay((end - 1) * 1000, rules);
+  return listDays(first, addDays(last, 1)).map((date) => ({ date, ...dayBounds(date, rules) }));
+}
+
+/** The latest row of rules under which the day begins no earlier than the row itself. */
+function dayStart(date: string, rules: readonly DayRule[]): number {
+  assert(rules.length > 0, "dayStart: a site has at least one row of rules");
+  const starts = rules.map((rule) => ({ rule, startMs: startUnder(date, rule) }));
+  const governed = starts.findLast(({ rule, startMs }) => rule.fromMs <= startMs) ?? starts[0]!;
+  return Math.floor(governed.startMs / 1000);
+}
+
+function startUnder(date: string, rule: DayRule): number {
+  const minutes = rule.productionDayStartsAtMinutes;
+  const time = Temporal.PlainTime.from({ hour: Math.floor(minutes / 60), minute: minutes % 60 });
+  return boundaryMs(`${date}T${time.toString()}`, rule.timeZone);
+}
