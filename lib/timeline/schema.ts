@@ -117,10 +117,25 @@ export interface FoldFacts {
   homeCell: string | null;
 }
 
+/** Where a worker stands after the last event: what runs, and the break that interrupts it. */
+export interface Standing {
+  shift: Shift;
+  /** What is being done or, in a break, what the break interrupted; never a meal or a rest. */
+  doing: Exclude<Doing, { kind: "meal" | "rest" }>;
+  /** Where its present stretch began, epoch seconds; in a break, where its last one did. */
+  since: number;
+  said: boolean;
+  /** The event from which it is done: what `reassign` names. */
+  event: string;
+  break: { kind: "meal" | "rest"; since: number; event: string } | null;
+}
+
 /** All that follows from one worker's events in a window. */
 export interface Folded {
   segments: readonly Segment[];
   shifts: readonly Shift[];
   looseEnds: readonly LooseEnd[];
   reports: readonly CountedReport[];
+  /** Null where no shift is open. */
+  standing: Standing | null;
 }
