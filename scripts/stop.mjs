@@ -11,9 +11,10 @@ await main(async () => {
   const record = runningRecord();
   const running = record.read();
   const wasRunning = isAlive(running?.supervisor);
+  const hadLeftovers = !wasRunning && isAlive(running?.server);
   await endProcess(running?.supervisor, SUPERVISOR_MS);
   await endLeftovers(running);
   await stopCluster();
   record.remove();
-  say(wasRunning ? "Bookmatch is stopped." : "Bookmatch was not running.");
+  say(wasRunning || hadLeftovers ? "Bookmatch is stopped." : "Bookmatch was not running.");
 });

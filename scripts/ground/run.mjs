@@ -48,3 +48,12 @@ export function stopRunning() {
 export function pause(ms) {
   return new Promise((resolve) => setTimeout(resolve, ms));
 }
+
+/** Waits for something, but no longer than `ms`: null when that is over first. */
+export async function atMost(ms, promise) {
+  let timer;
+  const late = new Promise((resolve) => {
+    timer = setTimeout(resolve, ms, null);
+  });
+  return Promise.race([promise, late]).finally(() => clearTimeout(timer));
+}

@@ -2,7 +2,7 @@ import { spawn } from "node:child_process";
 import { existsSync, openSync, readFileSync, renameSync, statSync } from "node:fs";
 import { root } from "./place.mjs";
 import { next } from "./programs.mjs";
-import { pause } from "./run.mjs";
+import { atMost, pause } from "./run.mjs";
 
 /** A log over this size is set aside when the server starts; one older log is kept. */
 const LOG_MAX_BYTES = 20_000_000;
@@ -40,8 +40,7 @@ export function tailOf(logFile) {
 
 async function stopServer(child, ended) {
   child.kill("SIGTERM");
-  const inTime = await Promise.race([ended, pause(STOP_MS).then(() => null)]);
-  if (inTime === null) child.kill("SIGKILL");
+  if ((await atMost(STOP_MS, ended)) === null) child.kill("SIGKILL");
   await ended;
 }
 

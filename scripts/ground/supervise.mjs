@@ -1,7 +1,7 @@
 import path from "node:path";
 import { dataFolder } from "./place.mjs";
 import { identityOf } from "./process-record.mjs";
-import { pause } from "./run.mjs";
+import { atMost } from "./run.mjs";
 import { Stop, say } from "./say.mjs";
 import { localAddress, startServer, tailOf, waitForHealth } from "./server.mjs";
 
@@ -40,11 +40,10 @@ export async function serve({ installation, host, port, record, leaving }) {
       isLeaving = true;
     });
     while (!isLeaving) {
-      const looked = Promise.race([pause(LOOK_MS), leaving]).then(() => null);
-      const end = await Promise.race([server.ended, looked]);
+      const end = await atMost(LOOK_MS, Promise.race([server.ended, leaving]));
       if (isLeaving) return;
       await reviveCluster();
-      if (end === null) continue;
+      if (!end) continue;
       ends.push(Date.now());
       if (ends.filter((at) => at > Date.now() - 60_000).length > RESTARTS_A_MINUTE)
         throw new Stop(`The server keeps ending (${end}). The end of its log:\n${tailOf(logFile)}`);
