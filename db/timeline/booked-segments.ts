@@ -61,9 +61,6 @@ function segmentsOf({ db }: Scope) {
   return db
     .select(shown)
     .from(segments)
-    .innerJoin(
-      workers,
-      and(eq(workers.siteId, segments.siteId), eq(workers.id, segments.workerId)),
-    )
+    .innerJoin(workers, and(eq(workers.siteId, segments.siteId), eq(workers.id, segments.workerId)))
     .leftJoin(cells, and(eq(cells.siteId, segments.siteId), eq(cells.id, segments.cellId)));
 }

@@ -1,9 +1,7 @@
 import type { BookedSegment } from "@/lib/api/segments";
 
 /** A segment as the database lists it. */
-export interface SegmentRow
-  extends Omit<BookedSegment, "start" | "end" | "worker">,
-    NamedWorker {
+export interface SegmentRow extends Omit<BookedSegment, "start" | "end" | "worker">, NamedWorker {
   startAt: Date;
   endAt: Date | null;
 }

@@ -1,6 +1,7 @@
 import { beforeAll, describe, expect, test } from "vitest";
 import { hashSecret } from "@/app/_server/secret";
 import { POST as checkCode } from "@/app/api/v1/calculate/check-code/route";
+import { POST as split } from "@/app/api/v1/calculate/split/route";
 import { call, type Handler } from "@/tests/make/call";
 import { makeFactory, makeKey } from "@/tests/make/factory";
 import { ownDatabase } from "@/tests/setup/db";
@@ -52,6 +53,31 @@ describe("POST /api/v1/calculate/check-code", () => {
     [[], ""],
   ])("422: %j, naming %j", async (body, where) => {
     const answer = await ask(checkCode, body);
+    expect(answer.status).toBe(422);
+    expect(answer.json.errors).toMatchObject([{ path: where }]);
+  });
+});
+
+describe("POST /api/v1/calculate/split", () => {
+  test.each([
+    [{ seconds: 10, weights: [1, 1, 1] }, [4, 3, 3]],
+    [{ seconds: 10, weights: [0, 0] }, [5, 5]],
+    [{ seconds: 0, weights: [3] }, [0]],
+  ])("200: %j", async (body, parts) => {
+    expect(await ask(split, body)).toMatchObject({ status: 200, json: { parts } });
+  });
+  test("403: to another role", async () => {
+    expect((await ask(split, { seconds: 1, weights: [1] }, lead)).status).toBe(403);
+  });
+  test.each([
+    [{ seconds: 10, weights: [1, -1] }, "weights.1"],
+    [{ seconds: 10, weights: [] }, "weights"],
+    [{ seconds: 2 ** 52, weights: [0, 0] }, "weights"],
+    [{ seconds: 1.5, weights: [1] }, "seconds"],
+    [{ weights: [1] }, "seconds"],
+    [{ seconds: 10, weights: [1], by: "standard" }, "by"],
+  ])("422: %j, naming %s", async (body, where) => {
+    const answer = await ask(split, body);
     expect(answer.status).toBe(422);
     expect(answer.json.errors).toMatchObject([{ path: where }]);
   });

@@ -1,3 +1,4 @@
+import { sql } from "drizzle-orm";
 import { v7 as uuid } from "uuid";
 import { apiKeys } from "@/db/access/tables";
 import { cells } from "@/db/cells/tables";
@@ -7,6 +8,7 @@ import { workers } from "@/db/people/tables";
 import { siteRules, sites } from "@/db/sites/tables";
 import { models, operations, options, standards } from "@/db/standards/tables";
 import { ticketOperations, ticketOptions, tickets } from "@/db/tickets/tables";
+import { segments } from "@/db/timeline/tables";
 import type { Role } from "@/lib/access/roles";
 
 /** A small factory in the database: one site, three cells, a model with three operations. */
@@ -98,6 +100,42 @@ export async function makeTicket(
       openQuantity: position < finished ? 0 : quantity,
     })),
   );
+  return id;
+}
+
+/** Puts a segment of the factory's worker into the timeline, as the fold would have. */
+export async function makeSegment(
+  { db, siteId, cellIds, workerId }: Factory,
+  segment: Pick<typeof segments.$inferInsert, "ticket" | "operation" | "code" | "item"> & {
+    start: string;
+    /** Left out while it runs. */
+    seconds?: number;
+    activity: (typeof segments.$inferInsert)["activity"];
+    worker?: string;
+    cell?: keyof Factory["cellIds"];
+  },
+): Promise<void> {
+  const { start, seconds, worker = workerId, cell = "Mill", ...rest } = segment;
+  const startAt = new Date(start);
+  const endAt = seconds === undefined ? null : new Date(startAt.getTime() + seconds * 1000);
+  await db.execute(sql`select make_partition('segments', ${startAt.toISOString()}::timestamptz)`);
+  await db.insert(segments).values({
+    ...rest,
+    siteId,
+    startAt,
+    endAt,
+    seconds: seconds ?? null,
+    workerId: worker,
+    cellId: cellIds[cell],
+    eventId: uuid(),
+  });
+}
+
+/** Makes another worker of the factory and answers the id. */
+export async function makeWorker({ db, siteId, cellIds }: Factory, number: string) {
+  const id = uuid();
+  const worker = { siteId, id, number, name: `Worker ${number}`, homeCellId: cellIds.Neck };
+  await db.insert(workers).values(worker);
   return id;
 }
 
