@@ -14,7 +14,7 @@ const keys = { planner: "", lead: "", payroll: "", elsewhere: "" };
 beforeAll(async () => {
   const factory = await makeFactory(own.db);
   const other = await makeWorker(factory, "1043");
-  const run = { activity: "run", ticket: "26000013", operation: "010" } as const;
+  const run = { activity: "run", ticket: "26000010", operation: "010" } as const;
   const at = (start: string, seconds: number) => ({ start, seconds, item: 0 });
   await makeSegment(factory, { ...run, ...at("2026-03-03T05:59:59Z", 60) });
   await makeSegment(factory, { ...run, ...at("2026-03-02T14:00:00Z", 900) });

@@ -1,10 +1,11 @@
 import { beforeAll, describe, expect, test } from "vitest";
 import { hashSecret } from "@/app/_server/secret";
+import { GET as read } from "@/app/api/v1/tickets/[code]/route";
 import { GET as list } from "@/app/api/v1/tickets/route";
 import { cursorOf } from "@/lib/api/cursor";
-import { ticketPage } from "@/lib/api/tickets";
+import { birthRecord, ticketPage } from "@/lib/api/tickets";
 import { call } from "@/tests/make/call";
-import { makeFactory, makeKey, makeTicket } from "@/tests/make/factory";
+import { makeFactory, makeKey, makeSegment, makeTicket } from "@/tests/make/factory";
 import { ownDatabase } from "@/tests/setup/db";
 
 const own = ownDatabase();
@@ -12,9 +13,11 @@ const keys = { planner: "", lead: "", payroll: "", elsewhere: "" };
 
 beforeAll(async () => {
   const factory = await makeFactory(own.db);
-  await makeTicket(factory, { number: "26000013", withOption: true });
-  await makeTicket(factory, { number: "26000021", finished: 1 });
-  await makeTicket(factory, { number: "26000039", finished: 3, status: "finished" });
+  await makeTicket(factory, { number: "26000010", withOption: true });
+  await makeTicket(factory, { number: "26000029", finished: 1 });
+  await makeTicket(factory, { number: "26000032", finished: 3, status: "finished" });
+  const run = { activity: "run", ticket: "26000010", operation: "010" } as const;
+  await makeSegment(factory, { ...run, start: "2026-03-02T14:00:00Z", seconds: 1500, item: 0 });
   for (const role of ["planner", "lead", "payroll"] as const) {
     keys[role] = await makeKey(factory, role, hashSecret);
   }
@@ -30,9 +33,9 @@ describe("GET /api/v1/tickets: 200", () => {
     expect(answer.status).toBe(200);
     const { items, nextCursor } = ticketPage.strict().parse(answer.json);
     expect(items.map(({ ticket, status, cell }) => [ticket, status, cell])).toEqual([
-      ["26000013", "open", "Mill"],
-      ["26000021", "open", "Neck"],
-      ["26000039", "finished", null],
+      ["26000010", "open", "Mill"],
+      ["26000029", "open", "Neck"],
+      ["26000032", "finished", null],
     ]);
     expect(nextCursor).toBeNull();
     expect((await ask("", keys.lead)).json).toEqual(answer.json);
@@ -40,12 +43,12 @@ describe("GET /api/v1/tickets: 200", () => {
   test("pages lead through the list without a gap or a repeat", async () => {
     const first = ticketPage.parse((await ask("?limit=2", keys.planner)).json);
     const rest = await ask(`?limit=2&cursor=${first.nextCursor}`, keys.planner);
-    expect(first.items.map(({ ticket }) => ticket)).toEqual(["26000013", "26000021"]);
-    expect(rest.json).toMatchObject({ items: [{ ticket: "26000039" }], nextCursor: null });
+    expect(first.items.map(({ ticket }) => ticket)).toEqual(["26000010", "26000029"]);
+    expect(rest.json).toMatchObject({ items: [{ ticket: "26000032" }], nextCursor: null });
   });
   test("filters narrow the list", async () => {
     const filtered = await ask("?status=open&cell=Neck&model=Heron", keys.planner);
-    expect(filtered.json).toMatchObject({ items: [{ ticket: "26000021" }] });
+    expect(filtered.json).toMatchObject({ items: [{ ticket: "26000029" }] });
   });
   test("a key of another site sees nothing of this one", async () => {
     expect((await ask("", keys.elsewhere)).json).toEqual({ items: [], nextCursor: null });
@@ -83,5 +86,49 @@ describe("GET /api/v1/tickets: 422", () => {
     const answer = await ask(query, keys.planner);
     expect(answer.status).toBe(422);
     expect(answer.json.errors).toMatchObject([{ path }]);
+  });
+});
+
+const recordOf = (code: string, bearer = keys.planner) =>
+  call(read, { path: `/api/v1/tickets/${code}`, params: { code }, bearer });
+
+describe("GET /api/v1/tickets/{code}: 200", () => {
+  test.each(["26000010", "T26000010", "26-00001-0"])("%s is one ticket", async (code) => {
+    const answer = await recordOf(code);
+    expect(answer.status).toBe(200);
+    const record = birthRecord.strict().parse(answer.json);
+    expect(record).toMatchObject({ ticket: "26000010", options: ["Sunburst"], reports: [] });
+    expect(record.operations).toMatchObject([
+      { operation: "010", standardSeconds: 2400, actualSeconds: 1500 },
+      { operation: "020", standardSeconds: null, actualSeconds: 0 },
+      { operation: "030", standardSeconds: null, actualSeconds: 0 },
+    ]);
+    expect(record.segments).toMatchObject([{ activity: "run", seconds: 1500 }]);
+  });
+});
+
+describe("GET /api/v1/tickets/{code}: 403, 404, 422", () => {
+  test("403: to a role that it is not for", async () => {
+    expect((await recordOf("26000010", keys.payroll)).status).toBe(403);
+  });
+  test.each([
+    ["26-99999-6", "planner"],
+    ["26-00001-0", "elsewhere"],
+  ] as const)("404: %s to %s", async (code, key) => {
+    expect((await recordOf(code, keys[key])).json).toMatchObject({
+      status: 404,
+      detail: `There is no ticket ${code} here.`,
+    });
+  });
+  test.each([
+    ["26-00001-4", "check digit"],
+    ["26-0001", "no ticket number"],
+    ["W5724", "badge"],
+  ])("422: %s, saying what is wrong", async (code, why) => {
+    const message = expect.stringContaining(why);
+    expect((await recordOf(code)).json).toMatchObject({
+      status: 422,
+      errors: [{ path: "code", message }],
+    });
   });
 });
