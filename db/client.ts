@@ -15,6 +15,9 @@ export type Db = Pick<
   | "$count"
 >;
 
+/** The connections of a process; only `openPool` makes one. */
+export type Pool = pg.Pool;
+
 /** Where a query or command works: which connection, which site (LEDGER.md 11). */
 export interface Scope {
   db: Db;
@@ -22,13 +25,13 @@ export interface Scope {
 }
 
 /** Opens a pool; `onError` hears of idle connections that broke, so that they do not end the process. */
-export function openPool(url: string, onError: (error: Error) => void, max = 20): pg.Pool {
+export function openPool(url: string, onError: (error: Error) => void, max = 20): Pool {
   const pool = new pg.Pool({ connectionString: url, max });
   pool.on("error", onError);
   return pool;
 }
 
 /** Wraps a pool or one connection in Drizzle, with snake_case columns. */
-export function wrap(client: pg.Pool | pg.PoolClient | pg.Client): NodePgDatabase {
+export function wrap(client: Pool | pg.PoolClient | pg.Client): NodePgDatabase {
   return drizzle({ client, casing: "snake_case" });
 }

@@ -1,14 +1,12 @@
 import "server-only";
-import type { NodePgDatabase } from "drizzle-orm/node-postgres";
-import type pg from "pg";
 import { env } from "@/app/_server/env";
 import { log } from "@/app/_server/log";
-import { openPool, wrap } from "@/db/client";
+import { type Db, openPool, type Pool, wrap } from "@/db/client";
 
-const held = globalThis as typeof globalThis & { bookmatchPool?: pg.Pool };
+const held = globalThis as typeof globalThis & { bookmatchPool?: Pool };
 
 /** The process's one pool; kept on `globalThis` so that a hot reload opens no second one. */
-export function database(): NodePgDatabase {
+export function database(): Db {
   held.bookmatchPool ??= openPool(env().DATABASE_URL, (error) =>
     log().warn({ err: error.message }, "a database connection broke"),
   );
