@@ -22,7 +22,9 @@ const addressOf = (file: string) => folderOf(file).replace(/\[(?:\.\.\.)?(\w+)\]
 
 /** The entrances of a route's file by method; each was made by `handle`. */
 async function entrancesOf(file: string): Promise<[string, Entrance][]> {
-  const handlers: Record<string, { entrance: Entrance }> = await import(`@/${file}`);
+  const handlers: Record<string, { entrance: Entrance }> = await import(
+    /* @vite-ignore */ path.resolve(file)
+  );
   return Object.entries(handlers).map(([method, handler]) => [
     method.toLowerCase(),
     handler.entrance,
