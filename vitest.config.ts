@@ -17,6 +17,9 @@ const env = {
   LOG_LEVEL: "silent",
 };
 
+/** `npm run test:deep` tries every law many more times. */
+const isDeep = Boolean(process.env.BOOKMATCH_DEEP);
+
 export default defineConfig({
   resolve: { alias },
   test: {
@@ -28,7 +31,8 @@ export default defineConfig({
           env,
           include: ["tests/**/*.test.{ts,tsx}"],
           exclude: ["tests/**/*.db.test.ts"],
-          setupFiles: ["tests/setup/console-clean.ts"],
+          testTimeout: isDeep ? 600_000 : 10_000,
+          setupFiles: ["tests/setup/console-clean.ts", "tests/setup/laws.ts"],
         },
       },
       {
@@ -38,9 +42,9 @@ export default defineConfig({
           env,
           include: ["tests/**/*.db.test.ts"],
           globalSetup: ["tests/setup/database.ts"],
-          setupFiles: ["tests/setup/console-clean.ts"],
+          setupFiles: ["tests/setup/console-clean.ts", "tests/setup/laws.ts"],
           isolate: false,
-          testTimeout: 20_000,
+          testTimeout: isDeep ? 600_000 : 20_000,
           hookTimeout: 60_000,
         },
       },

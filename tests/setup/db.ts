@@ -1,7 +1,7 @@
 import pg from "pg";
 import { afterAll, beforeAll, inject } from "vitest";
 import { type Db, wrap } from "@/db/client";
-import { APP, ask, cloneDatabase, OWNER, urlFor } from "@/tests/setup/template";
+import { APP, ask, cloneDatabase, OWNER, urlFor } from "@/tests/setup/clone";
 
 /** The worker's own clone: every test in it is rolled back, so it stays empty. */
 let shared: Promise<pg.Pool> | undefined;
