@@ -22,7 +22,7 @@ export function PageGrain() {
       aria-hidden="true"
       className="page-grain"
       viewBox="0 0 1280 800"
-      preserveAspectRatio="none"
+      preserveAspectRatio="xMidYMid slice"
     >
       <path d={lines} vectorEffect="non-scaling-stroke" />
     </svg>
