@@ -1,0 +1,115 @@
+import type { CastMember } from "@/lib/demo/cast";
+import type { DemoShift } from "@/lib/demo/shifts";
+import {
+  type Bench,
+  type Hall,
+  idle,
+  otherWork,
+  type Stretch,
+  spend,
+  tap,
+} from "@/lib/simulation/bench";
+import { breaksOf } from "@/lib/simulation/breaks";
+import { takeJob } from "@/lib/simulation/floor";
+import { currentStep } from "@/lib/simulation/traveller";
+import { doJob, itemOf } from "@/lib/simulation/work";
+
+/** Chances in one shift or after one job. */
+const IS_LATE = 0.08;
+const CLEANS = 0.8;
+const DOES_OTHER_WORK = 0.11;
+const LEAD_DOES_OTHER_WORK = 0.6;
+const FORGETS_TO_TAP = 0.03;
+
+const LEAD_WORK = ["meeting", "training", "jigs", "waiting-material", "prototype"];
+const WAITS = ["waiting-material", "waiting-material", "cleaning", "tool-care", "training"];
+
+/** One shift of one person from coming in to going home. */
+export function* shiftOf(hall: Hall, person: CastMember, shift: DemoShift): Stretch {
+  const { random, troubles } = hall;
+  const endsAt = shift.end + random.whole(-40, 330);
+  const cleansFor = random.chance(CLEANS) ? random.whole(7, 12) * 60 : 0;
+  const bench: Bench = {
+    hall,
+    person,
+    shift,
+    at: arrival(hall, shift),
+    stopAt: endsAt - cleansFor,
+    breaks: breaksOf(shift, random),
+    cell: person.cell,
+  };
+  yield bench.at;
+  tap(bench, { kind: "shift-start" });
+  yield* meet(bench);
+  while (bench.at < bench.stopAt) yield* oneThing(bench);
+  if (troubles.forgetsToEnd(shift)) return;
+  yield* goHome(bench, endsAt);
+}
+
+function arrival({ random }: Hall, { start }: DemoShift): number {
+  const seconds = random.chance(IS_LATE) ? random.whole(90, 1_100) : -random.whole(40, 620);
+  return start + seconds;
+}
+
+/** Monday begins with a meeting of the cell. */
+function* meet(bench: Bench): Stretch {
+  const { random } = bench.hall;
+  const isMonday = new Date(bench.shift.workOn).getUTCDay() === 1;
+  if (isMonday && bench.shift.start - bench.at > -600) {
+    yield* otherWork(bench, random.whole(12, 20), "meeting");
+  }
+}
+
+/** One job, other work, or waiting for something to do. */
+function* oneThing(bench: Bench): Stretch {
+  const { hall, person } = bench;
+  const { random, troubles } = hall;
+  yield* idle(
+    bench,
+    random.chance(FORGETS_TO_TAP) ? random.whole(240, 900) : random.whole(15, 110),
+  );
+  if (bench.at >= bench.stopAt) return;
+  if (troubles.isDown(person.cell, bench.at)) {
+    yield* otherWork(bench, random.whole(20, 45), "machine-down");
+  } else if (troubles.isHasty(person.cell, bench.at)) {
+    yield* tooSoon(bench);
+  } else if (random.chance(person.leads.length > 0 ? LEAD_DOES_OTHER_WORK : DOES_OTHER_WORK)) {
+    const code = person.leads.length > 0 ? random.pick(LEAD_WORK) : undefined;
+    yield* otherWork(bench, random.whole(9, person.leads.length > 0 ? 45 : 32), code);
+  } else {
+    yield* nextJob(bench);
+  }
+}
+
+function* nextJob(bench: Bench): Stretch {
+  const { hall, person } = bench;
+  const job = takeJob(hall.open, person, bench.at, hall.random);
+  if (job) yield* doJob(bench, job);
+  else yield* otherWork(bench, hall.random.whole(10, 25), hall.random.pick(WAITS));
+}
+
+/** Takes up a ticket whose operation before is still in other hands, and is sent away again. */
+function* tooSoon(bench: Bench): Stretch {
+  const { open, random } = bench.hall;
+  const traveller = open.find((each) => {
+    const next = each.steps[each.current + 1];
+    return (currentStep(each)?.crew.size ?? 0) > 0 && next?.operation.cell === bench.person.cell;
+  });
+  const step = traveller?.steps[traveller.current + 1];
+  if (!traveller || !step) return;
+  bench.cell = step.operation.cell;
+  const items = [itemOf({ traveller, step })];
+  tap(bench, { kind: "work", activity: "run", items });
+  yield* spend(bench, random.whole(600, 1_500));
+  tap(bench, { kind: "pause", items });
+}
+
+/** Sweeps the bench and ends the shift at the kiosk of the own cell. */
+function* goHome(bench: Bench, endsAt: number): Stretch {
+  bench.cell = bench.person.cell;
+  bench.breaks = [];
+  bench.stopAt = endsAt;
+  const left = endsAt - bench.at;
+  if (left > 60) yield* otherWork(bench, left / 60, "cleaning");
+  tap(bench, { kind: "shift-end" });
+}
