@@ -1,4 +1,5 @@
-import { Temporal } from "temporal-polyfill";
+import { addDays, localDate } from "@/lib/time/site-day";
+import { boundaryMs } from "@/lib/time/wall-time";
 
 /** The zone of the invented town of Larkmoor. */
 export const TIME_ZONE = "America/Chicago";
@@ -33,10 +34,9 @@ export interface DemoCalendar {
 
 /** Lays out the calendar for an instant: `weeks` whole weeks and the current one up to now. */
 export function calendarAt(nowMs: number, weeks = HISTORY_WEEKS): DemoCalendar {
-  const zoned = Temporal.Instant.fromEpochMilliseconds(nowMs).toZonedDateTimeISO(TIME_ZONE);
-  const date = zoned.toPlainDate();
-  const first = date.subtract({ days: date.dayOfWeek - 1 + weeks * 7 });
-  const today = weeks * 7 + date.dayOfWeek - 1;
+  const date = localDate(nowMs, TIME_ZONE);
+  const today = weeks * 7 + weekdayOf(date) - 1;
+  const first = addDays(date, -today);
   const length = WARM_UP_DAYS + today + 1 + PLANNED_DAYS;
   const days = Array.from({ length }, (_, at) => dayOf(first, at - WARM_UP_DAYS));
   return {
@@ -47,21 +47,28 @@ export function calendarAt(nowMs: number, weeks = HISTORY_WEEKS): DemoCalendar {
   };
 }
 
-function dayOf(first: Temporal.PlainDate, index: number): DemoDay {
-  const date = first.add({ days: index });
+function dayOf(first: string, index: number): DemoDay {
+  const date = addDays(first, index);
   return {
     index,
-    date: date.toString(),
-    weekday: date.dayOfWeek,
-    at: (minutes) => {
-      const day = date.add({ days: Math.floor(minutes / 1440) });
-      const time = Temporal.PlainTime.from({
-        hour: Math.floor((minutes % 1440) / 60),
-        minute: minutes % 60,
-      });
-      return Math.floor(
-        day.toPlainDateTime(time).toZonedDateTime(TIME_ZONE).epochMilliseconds / 1000,
-      );
+    date,
+    weekday: weekdayOf(date),
+    at(minutes) {
+      const day = addDays(date, Math.floor(minutes / MINUTES_A_DAY));
+      const time = clockTime(minutes % MINUTES_A_DAY);
+      return Math.floor(boundaryMs(`${day}T${time}`, TIME_ZONE) / 1000);
     },
   };
+}
+
+const MINUTES_A_DAY = 1_440;
+
+/** 1 Monday to 7 Sunday: a date's weekday is the same in every zone. */
+function weekdayOf(date: string): number {
+  return new Date(`${date}T00:00:00Z`).getUTCDay() || 7;
+}
+
+function clockTime(minutes: number): string {
+  const two = (value: number) => String(value).padStart(2, "0");
+  return `${two(Math.floor(minutes / 60))}:${two(minutes % 60)}`;
 }

@@ -19,8 +19,8 @@ const hours: Record<Pattern, { start: number; end: number; weekdays: readonly nu
   day: { start: 390, end: 900, weekdays: [1, 2, 3, 4, 5] },
   evening: { start: 885, end: 1395, weekdays: [1, 2, 3, 4, 5] },
   night: { start: 1365, end: 1860, weekdays: [7, 1, 2, 3, 4, 5] },
-  "weekend-day": { start: 405, end: 1155, weekdays: [6, 7] },
-  "weekend-night": { start: 1125, end: 1875, weekdays: [5, 6, 7] },
+  "weekend-day": { start: 410, end: 1145, weekdays: [6, 7] },
+  "weekend-night": { start: 1130, end: 1865, weekdays: [5, 6, 7] },
 };
 
 const SICK_SHARE = 0.035;
@@ -56,12 +56,12 @@ function crewShifts(
   );
   const luck = randomFrom(`sick ${day.date} ${pattern}`);
   const away = isSmall ? [awayFromSmallCrew(planned, luck)] : planned.map(sickWith(luck));
+  const bounds = { start: day.at(start), end: day.at(end) };
   return planned.map(({ number }) => ({
     worker: number,
     workOn: day.date,
     day: day.index,
-    start: day.at(start),
-    end: day.at(end),
+    ...bounds,
     attends: !away.includes(number),
   }));
 }

@@ -17,7 +17,7 @@ import { doJob, itemOf } from "@/lib/simulation/work";
 /** Chances in one shift or after one job. */
 const IS_LATE = 0.08;
 const CLEANS = 0.8;
-const DOES_OTHER_WORK = 0.11;
+const DOES_OTHER_WORK = 0.14;
 const LEAD_DOES_OTHER_WORK = 0.6;
 const FORGETS_TO_TAP = 0.03;
 

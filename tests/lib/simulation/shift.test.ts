@@ -1,0 +1,76 @@
+import { describe, expect, test } from "vitest";
+import type { Hall } from "@/lib/simulation/bench";
+import { shiftOf } from "@/lib/simulation/shift";
+import { currentStep } from "@/lib/simulation/traveller";
+import {
+  eventsOf,
+  kindsOf,
+  makeHall,
+  makeShift,
+  makeTraveller,
+  personOf,
+  through,
+} from "@/tests/make/hall";
+
+const person = personOf("Neck");
+const shift = makeShift(person.number);
+const tickets = () =>
+  Array.from({ length: 20 }, (_, at) => makeTraveller({ number: String(at), operation: "280" }));
+
+function play(hall: Hall) {
+  through(shiftOf(hall, person, shift));
+  return eventsOf(hall);
+}
+
+describe("shiftOf", () => {
+  test("comes in around the start, works, eats, and goes home around the end", () => {
+    const events = play(makeHall(tickets()));
+    const [first, last] = [events[0]!, events.at(-1)!];
+    expect(first.kind).toBe("shift-start");
+    expect(Math.abs(Date.parse(first.at) / 1000 - shift.start)).toBeLessThan(1_200);
+    expect(last.kind).toBe("shift-end");
+    expect(Math.abs(Date.parse(last.at) / 1000 - shift.end)).toBeLessThan(600);
+    const kinds = new Set(events.map(({ kind }) => kind));
+    for (const kind of ["work", "report", "break-start", "break-end"] as const) {
+      expect(kinds).toContain(kind);
+    }
+  });
+
+  test("yields ever later seconds", () => {
+    const seconds = [...shiftOf(makeHall(tickets()), person, shift)];
+    expect(seconds).toEqual([...seconds].sort((a, b) => a - b));
+  });
+
+  test("without a ticket the time is other work, never nothing", () => {
+    const events = play(makeHall([]));
+    expect(events.filter(({ kind }) => kind === "indirect").length).toBeGreaterThan(10);
+    expect(events.some(({ kind }) => kind === "work")).toBe(false);
+  });
+
+  test("somebody forgets to end the shift, and no tap tells", () => {
+    const hall = makeHall(tickets());
+    play({ ...hall, troubles: { ...hall.troubles, forgetsToEnd: () => true } });
+    expect(kindsOf(hall)).not.toContain("shift-end");
+  });
+
+  test("while the machines stand still nobody works in the cell", () => {
+    const hall = makeHall(tickets());
+    const events = play({ ...hall, troubles: { ...hall.troubles, isDown: () => true } });
+    expect(events.some((event) => event.kind === "indirect" && event.code === "machine-down")).toBe(
+      true,
+    );
+    expect(events.some(({ kind }) => kind === "work")).toBe(false);
+  });
+
+  test("a hasty hand takes up what is still being worked on, and lays it down again", () => {
+    const ticket = makeTraveller({ operation: "230" });
+    currentStep(ticket)!.crew.add("somebody");
+    const hall = makeHall([ticket]);
+    let once = 1;
+    const events = play({ ...hall, troubles: { ...hall.troubles, isHasty: () => once-- === 1 } });
+    const item = { ticket: ticket.number, operation: "240" };
+    expect(events.find(({ kind }) => kind === "work")).toMatchObject({ items: [item] });
+    expect(events.find(({ kind }) => kind === "pause")).toMatchObject({ items: [item] });
+    expect(ticket.steps.find(({ operation }) => operation.code === "240")?.crew.size).toBe(0);
+  });
+});
