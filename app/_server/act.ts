@@ -23,7 +23,7 @@ export interface DeedCall<I> extends Visit {
 }
 
 /** A server action as `useActionState` calls it. */
-export type FormAction<V> = (before: Answer<V>, form: FormData) => Promise<Answer<V>>;
+export type FormAction<V> = (before: unknown, form: FormData) => Promise<Answer<V>>;
 
 /**
  * Wraps a server action as `handle` wraps a route: person, then permission, then the form, then

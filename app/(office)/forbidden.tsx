@@ -1,0 +1,16 @@
+import { Empty } from "@/components/ui/empty";
+
+/** What someone sees whose role does not open a page. */
+export default function Forbidden() {
+  return (
+    <Empty
+      act={
+        <a href="/" className="button">
+          Go to your first page
+        </a>
+      }
+    >
+      This page is not for your role. An admin can open it for you.
+    </Empty>
+  );
+}
