@@ -60,8 +60,8 @@ export function sumDays(
 ): Map<string, TimeSums> {
   if (segments.length === 0) return new Map();
   // Zones are asked once a day, not once a segment: a fortnight of a site has 10,000 segments.
-  const start = segments.reduce((first, segment) => Math.min(first, segment.start), now);
-  const end = segments.reduce((last, segment) => Math.max(last, segment.end ?? now), now);
+  const start = segments.reduce((first, segment) => Math.min(first, segment.start), Infinity);
+  const end = segments.reduce((last, segment) => Math.max(last, segment.end ?? now), -Infinity);
   const days = daysTouched({ start, end }, rules);
   const byDate = new Map<string, TimeSums>();
   for (const segment of segments) {

@@ -1,0 +1,63 @@
+import type { Act } from "@/lib/acts/act";
+import { effectiveEvents } from "@/lib/acts/effective";
+import { reassigned } from "@/lib/acts/reassigned";
+import { gatherEnds } from "@/lib/timeline/loose-ends";
+import type { CountedReport, Folded, FoldFacts, LedgerEvent } from "@/lib/timeline/schema";
+import { settlementsOf, withToldEnds } from "@/lib/timeline/settlements";
+import { walk } from "@/lib/timeline/walk";
+
+/**
+ * Derives one worker's time from the events: segments that partition each shift, the counts that
+ * stand, and what is odd as loose ends (LEDGER.md 3, 4 and 6). Pure, and the same on server and
+ * kiosk: arrival order and duplicates play no part, and nothing is asked of a clock but `asOfMs`.
+ * A window gives what the whole would give for it, if gaps longer than the shift limit and the rest
+ * between shifts bound it and it holds the corrections of its events, whenever they were entered.
+ *
+ * @param events of one worker, in any order
+ * @param facts what holds at the site and for the worker, each from its instant on
+ * @param asOfMs epoch milliseconds: whether a shift without an end is past its limit
+ * @returns segments, shifts and reports in order of time, loose ends by time and key
+ */
+export function fold(events: readonly LedgerEvent[], facts: FoldFacts, asOfMs: number): Folded {
+  const { acts, standing, lateUndos } = effectiveEvents(events);
+  const settlements = settlementsOf(standing);
+  const way = { facts, settlements, asOfMs };
+  const told = withToldEnds(acts, settlements, facts);
+  const before = walk(told, way);
+  // Reassignments change what time is booked to, never when shifts begin and end.
+  const changed = reassigned(told, before.shiftOf);
+  const walked = changed.acts === told ? before : walk(changed.acts, way);
+  return {
+    segments: walked.segments,
+    shifts: walked.shifts,
+    reports: changed.acts.flatMap((act) => countedReport(act) ?? []),
+    looseEnds: gatherEnds({
+      found: walked.looseEnds,
+      standing,
+      lateUndos,
+      unclear: standing.filter(({ id }) => changed.questions.includes(id)),
+      settlements,
+    }),
+    standing: walked.standing,
+  };
+}
+
+function countedReport({ id, atMs, body, cell }: Act): CountedReport | null {
+  if (body.kind !== "report" && body.kind !== "inspect") return null;
+  const { kind, ticket, operation, good, rework, scrap, causedBy, defects } = body;
+  const stop = body.kind === "report" && body.stop;
+  return {
+    event: id,
+    kind,
+    atMs,
+    ticket,
+    operation,
+    good,
+    rework,
+    scrap,
+    stop,
+    causedBy: causedBy ?? null,
+    defects: defects ?? [],
+    cell,
+  };
+}
