@@ -1,7 +1,6 @@
 import { createHash } from "node:crypto";
 import { existsSync, readdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
-import { collectInlineScripts } from "./inline-scripts.mjs";
 import { root } from "./place.mjs";
 import { run } from "./run.mjs";
 import { Stop, say } from "./say.mjs";
@@ -53,6 +52,5 @@ export async function build(actionKey) {
     mayFail: true,
   });
   if (code !== 0) throw new Stop("The build did not work; its reason stands above.");
-  collectInlineScripts();
   writeFileSync(stamp, digest);
 }
