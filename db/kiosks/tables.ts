@@ -91,7 +91,7 @@ export const kioskSessions = pgTable(
     foreignKey({ columns: [t.siteId, t.kioskId], foreignColumns: [kiosks.siteId, kiosks.id] }),
     foreignKey({ columns: [t.siteId, t.workerId], foreignColumns: [workers.siteId, workers.id] }),
     index().on(t.siteId, t.kioskId),
-    index().on(t.siteId, t.workerId),
+    index().on(t.siteId, t.workerId, t.openedAt),
   ],
 );
 

@@ -502,7 +502,7 @@ CREATE INDEX "enrolment_codes_site_id_cell_id_index" ON "enrolment_codes" USING 
 CREATE INDEX "kiosk_cells_site_id_kiosk_id_effective_from_index" ON "kiosk_cells" USING btree ("site_id","kiosk_id","effective_from");--> statement-breakpoint
 CREATE INDEX "kiosk_cells_site_id_cell_id_index" ON "kiosk_cells" USING btree ("site_id","cell_id");--> statement-breakpoint
 CREATE INDEX "kiosk_sessions_site_id_kiosk_id_index" ON "kiosk_sessions" USING btree ("site_id","kiosk_id");--> statement-breakpoint
-CREATE INDEX "kiosk_sessions_site_id_worker_id_index" ON "kiosk_sessions" USING btree ("site_id","worker_id");--> statement-breakpoint
+CREATE INDEX "kiosk_sessions_site_id_worker_id_opened_at_index" ON "kiosk_sessions" USING btree ("site_id","worker_id","opened_at");--> statement-breakpoint
 CREATE INDEX "clock_events_worker" ON "clock_events" USING btree ("site_id","worker_id","at");--> statement-breakpoint
 CREATE INDEX "clock_events_id" ON "clock_events" USING btree ("site_id","id");--> statement-breakpoint
 CREATE INDEX "clock_events_corrections" ON "clock_events" USING btree ("site_id","worker_id") WHERE kind in ('void', 'move', 'insert', 'reassign', 'settle');--> statement-breakpoint

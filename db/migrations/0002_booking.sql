@@ -11,6 +11,7 @@ return (extract(epoch from instant) * 1000)::bigint;
 -- gap without any event longer than p_gap to the next one (LEDGER.md 4), extended to what a
 -- correction takes from elsewhere and to a shift that is still open. The worker's corrections come
 -- along, with what they are about, also from outside. `truncated`: no gap within p_reach, ask again.
+-- With p_now comes what only a bench shows: the day before the window, the judge's questions, notes.
 create function timeline_windows(
   p_site uuid,
   p_workers uuid[],
@@ -18,7 +19,8 @@ create function timeline_windows(
   p_ids uuid[],
   p_targets uuid[],
   p_gap interval,
-  p_reach interval
+  p_reach interval,
+  p_now timestamptz
 ) returns jsonb
 language plpgsql stable
 set search_path = public, pg_temp
@@ -131,7 +133,9 @@ begin
           'id', e.id, 'atMs', epoch_ms(e.at), 'seq', coalesce(e.seq, 0), 'kiosk', e.kiosk_id,
           'session', e.session_id, 'cell', e.cell_id, 'by', e.by,
           'receivedMs', epoch_ms(e.received_at), 'weights', coalesce(e.weights, '{}'),
-          'questions', coalesce(e.questions, '{}'), 'body', e.body - 'v' - 'clock'))
+          'questions', coalesce(e.questions, '{}'), 'body', e.body - 'v' - 'clock',
+          'note', case when p_now is not null and e.by is not null then (
+            select n.text from notes n where n.site_id = p_site and n.event_id = e.id) end))
         from events e
         where e.worker_id = b.worker_id),
       'planned', (
@@ -174,10 +178,242 @@ begin
           'code', l.code, 'subject', l.subject, 'atMs', epoch_ms(l.at), 'settled', l.settled))
         from loose_ends l
         where l.site_id = p_site and l.worker_id = b.worker_id and l.source = 'fold'
-          and l.at >= date_trunc('second', b.first) and l.at <= b.last)))
+          and l.at >= date_trunc('second', b.first) and l.at <= b.last),
+      'judged', case when p_now is not null then (
+        select jsonb_agg(jsonb_build_object(
+          'code', l.code, 'subject', l.subject, 'atMs', epoch_ms(l.at), 'settled', l.settled))
+        from loose_ends l
+        where l.site_id = p_site and l.worker_id = b.worker_id and l.source = 'judge'
+          and l.at >= date_trunc('second', b.first) and l.at <= b.last) end,
+      'earlier', case when p_now is not null then (
+        select jsonb_agg(jsonb_build_object(
+          'startMs', epoch_ms(s.start_at), 'item', s.item, 'endMs', epoch_ms(s.end_at),
+          'activity', s.activity, 'ticket', s.ticket, 'operation', s.operation, 'code', s.code,
+          'weight', s.weight, 'seconds', s.seconds, 'cellId', s.cell_id, 'said', s.said,
+          'eventId', s.event_id))
+        from segments s
+        where s.site_id = p_site and s.worker_id = b.worker_id
+          and s.start_at >= p_now - interval '2 days' and s.start_at < date_trunc('second', b.first)
+        ) end,
+      -- the sign-in before this one: what others changed until then was shown at it
+      'seenMs', case when p_now is not null then (
+        select epoch_ms(s.opened_at)
+        from kiosk_sessions s
+        where s.site_id = p_site and s.worker_id = b.worker_id
+        order by s.opened_at desc
+        offset 1
+        limit 1) end))
     from bounds b
     join workers w on w.site_id = p_site and w.id = b.worker_id
     left join timeline_heads h on h.site_id = p_site and h.worker_id = b.worker_id
+  );
+end $$;
+--> statement-breakpoint
+
+-- What is known of some ticket operations: what sharing time fairly and showing a bench both need.
+-- Pairs whose ticket or operation is unknown are left out. `booked` is by worker: closed seconds, and
+-- where the worker is on it now, since when and with which weight of which total.
+create function ticket_facts(p_site uuid, p_tickets text[], p_operations text[]) returns jsonb
+language plpgsql stable
+set search_path = public, pg_temp
+as $$
+begin
+  return (
+    select jsonb_agg(jsonb_build_object(
+      'ticket', t.number, 'operation', o.code, 'quantity', t.quantity, 'status', t.status,
+      'dueOn', t.due_on, 'model', m.name, 'name', o.name, 'cellId', o.cell_id,
+      'shareBy', o.share_by, 'hazards', o.hazards,
+      'options', (
+        select coalesce(jsonb_agg(x.name order by x.name), '[]')
+        from ticket_options c
+        join options x on x.site_id = p_site and x.id = c.option_id
+        where c.site_id = p_site and c.ticket_id = t.id),
+      'standards', (
+        select coalesce(jsonb_agg(jsonb_build_object(
+          'seq', s.seq, 'effectiveFrom', s.effective_from, 'option', s.option_id,
+          'setupSeconds', s.setup_seconds, 'runSeconds', s.run_seconds)), '[]')
+        from standards s
+        where s.site_id = p_site and s.model_id = t.model_id and s.operation_id = o.id
+          and (s.option_id is null or s.option_id in (
+            select c.option_id from ticket_options c
+            where c.site_id = p_site and c.ticket_id = t.id))),
+      'good', r.good, 'scrap', r.scrap,
+      'earlierScrap', (
+        select coalesce(sum(e.scrap), 0)
+        from ticket_operations mine
+        join ticket_operations before on before.site_id = p_site and before.ticket_id = t.id
+          and before.position < mine.position
+        join operations other on other.site_id = p_site and other.id = before.operation_id
+        join reports e on e.site_id = p_site and e.ticket = t.number and e.operation = other.code
+        where mine.site_id = p_site and mine.ticket_id = t.id and mine.operation_id = o.id),
+      'firstWorkMs', (
+        select epoch_ms(min(s.start_at))
+        from segments s
+        where s.site_id = p_site and s.ticket = t.number and s.operation = o.code
+          and s.activity in ('setup', 'run', 'inspect')),
+      'firstReportMs', r.first_ms,
+      'booked', (
+        select coalesce(jsonb_agg(jsonb_build_object(
+          'workerId', b.worker_id, 'seconds', b.seconds, 'sinceMs', b.since_ms,
+          'weight', b.weight, 'total', b.total)), '[]')
+        from (
+          select s.worker_id, coalesce(sum(s.seconds), 0) as seconds,
+            max(epoch_ms(s.start_at)) filter (where s.end_at is null) as since_ms,
+            max(s.weight) filter (where s.end_at is null) as weight,
+            max((
+              select sum(i.weight) from segments i
+              where i.site_id = p_site and i.start_at = s.start_at and i.worker_id = s.worker_id))
+              filter (where s.end_at is null) as total
+          from segments s
+          where s.site_id = p_site and s.ticket = t.number and s.operation = o.code
+          group by s.worker_id) b)))
+    from (select distinct * from unnest(p_tickets, p_operations) as u (ticket, operation)) u
+    join tickets t on t.site_id = p_site and t.number = u.ticket
+    join operations o on o.site_id = p_site and o.code = u.operation
+    join models m on m.site_id = p_site and m.id = t.model_id
+    cross join lateral (
+      select coalesce(sum(e.good), 0) as good, coalesce(sum(e.scrap), 0) as scrap,
+        epoch_ms(min(e.at)) as first_ms
+      from reports e
+      where e.site_id = p_site and e.ticket = t.number and e.operation = o.code) r
+  );
+end $$;
+--> statement-breakpoint
+
+-- The rules of a site, each from its instant on.
+create function site_rules_of(p_site uuid) returns jsonb
+language sql stable
+return (
+  select coalesce(jsonb_agg(jsonb_build_object(
+    'fromMs', epoch_ms(r.effective_from), 'timeZone', r.time_zone,
+    'productionDayStartsAtMinutes', r.production_day_starts_at_minutes,
+    'shiftLimitSeconds', r.shift_limit_seconds, 'sinceLimitSeconds', r.since_limit_seconds,
+    'restMaxSeconds', r.rest_max_seconds, 'mealMaxSeconds', r.meal_max_seconds,
+    'restBetweenShiftsSeconds', r.rest_between_shifts_seconds) order by r.effective_from), '[]')
+  from site_rules r
+  where r.site_id = p_site);
+--> statement-breakpoint
+
+-- What a kiosk's cells could take up next: open tickets by due date, the oldest first within a day.
+create function next_work(p_site uuid, p_kiosk uuid, p_now timestamptz) returns jsonb
+language plpgsql stable
+set search_path = public, pg_temp
+as $$
+begin
+  return (
+    select coalesce(jsonb_agg(jsonb_build_object(
+      'ticket', n.number, 'operation', n.code, 'name', n.name, 'model', n.model,
+      'options', (
+        select coalesce(jsonb_agg(x.name order by x.name), '[]')
+        from ticket_options c
+        join options x on x.site_id = p_site and x.id = c.option_id
+        where c.site_id = p_site and c.ticket_id = n.id),
+      'quantity', n.quantity, 'openQuantity', n.open_quantity, 'dueOn', n.due_on)
+      order by n.due_on, n.seq), '[]')
+    from (
+      select t.id, t.seq, t.number, t.quantity, t.due_on, o.code, o.name, m.name as model,
+        p.open_quantity
+      from kiosk_cells k
+      join operations o on o.site_id = p_site and o.cell_id = k.cell_id
+      join ticket_operations p on p.site_id = p_site and p.operation_id = o.id
+        and p.state = 'ready'
+      join tickets t on t.site_id = p_site and t.id = p.ticket_id and t.status = 'open'
+      join models m on m.site_id = p_site and m.id = t.model_id
+      where k.site_id = p_site and k.kiosk_id = p_kiosk
+        and k.effective_from = (
+          select max(l.effective_from) from kiosk_cells l
+          where l.site_id = p_site and l.kiosk_id = p_kiosk and l.effective_from <= p_now)
+      order by t.due_on, t.seq
+      limit 8) n
+  );
+end $$;
+--> statement-breakpoint
+
+-- All that booking a batch must know, in one statement and so of one moment.
+create function booking_context(
+  p_site uuid,
+  p_kiosk uuid,
+  p_numbers text[],
+  p_sessions uuid[],
+  p_ids uuid[],
+  p_touched_numbers text[],
+  p_touched timestamptz[],
+  p_targets uuid[],
+  p_tickets text[],
+  p_operations text[],
+  p_reach interval,
+  p_now timestamptz
+) returns jsonb
+language plpgsql stable
+set search_path = public, pg_temp
+as $$
+declare
+  touched_workers uuid[];
+  touched timestamptz[];
+  gap interval;
+begin
+  select array_agg(t.id), array_agg(t.at)
+  into touched_workers, touched
+  from (
+    select w.id, n.at
+    from unnest(p_touched_numbers, p_touched) as n (number, at)
+    join workers w on w.site_id = p_site and w.number = n.number
+    union all
+    -- whether a session was over asks for the shifts since it was opened
+    select s.worker_id, s.opened_at
+    from kiosk_sessions s
+    join workers w on w.site_id = p_site and w.id = s.worker_id
+      and w.number = any (p_touched_numbers)
+    where s.site_id = p_site and s.id = any (p_sessions)
+  ) t;
+  -- a bench also shows what its worker is on already
+  if p_now is not null then
+    select p_tickets || array_agg(s.ticket), p_operations || array_agg(s.operation)
+    into p_tickets, p_operations
+    from segments s
+    where s.site_id = p_site and s.worker_id = any (touched_workers) and s.end_at is null
+      and s.ticket is not null;
+  end if;
+  select make_interval(secs => max(greatest(r.shift_limit_seconds, r.rest_between_shifts_seconds)))
+  into gap
+  from site_rules r
+  where r.site_id = p_site;
+  return jsonb_build_object(
+    'workers', (
+      select coalesce(jsonb_agg(jsonb_build_object(
+        'id', w.id, 'number', w.number, 'homeCellId', w.home_cell_id,
+        'roles', (
+          select coalesce(jsonb_agg(jsonb_build_object('role', r.role, 'cellId', r.cell_id)), '[]')
+          from account_workers a
+          join accounts c on c.id = a.account_id and c.disabled_at is null
+          join account_roles r on r.account_id = a.account_id and r.site_id = p_site
+          where a.site_id = p_site and a.worker_id = w.id))), '[]')
+      from workers w
+      where w.site_id = p_site and w.number = any (p_numbers)),
+    'sessions', (
+      select coalesce(jsonb_agg(jsonb_build_object(
+        'id', s.id, 'workerId', s.worker_id, 'openedMs', epoch_ms(s.opened_at),
+        'endedMs', epoch_ms(s.ended_at))), '[]')
+      from kiosk_sessions s
+      where s.site_id = p_site and s.id = any (p_sessions) and s.kiosk_id = p_kiosk),
+    'known', (
+      select coalesce(jsonb_agg(jsonb_build_object(
+        'id', i.id, 'bodyHash', i.body_hash, 'keptFor', e.kept_for, 'questions', e.questions)), '[]')
+      from event_ids i
+      join clock_events e on e.site_id = p_site and e.received_at = i.received_at and e.id = i.id
+      where i.site_id = p_site and i.id = any (p_ids)),
+    'served', (
+      select coalesce(jsonb_agg(jsonb_build_object(
+        'cellId', k.cell_id, 'fromMs', epoch_ms(k.effective_from), 'position', k.position)), '[]')
+      from kiosk_cells k
+      where k.site_id = p_site and k.kiosk_id = p_kiosk),
+    'rules', site_rules_of(p_site),
+    'windows', timeline_windows(
+      p_site, touched_workers, touched, p_ids, p_targets, gap, p_reach, p_now),
+    'facts', case
+      when cardinality(p_tickets) > 0 then ticket_facts(p_site, p_tickets, p_operations)
+    end,
+    'next', case when p_now is not null then next_work(p_site, p_kiosk, p_now) end
   );
 end $$;
 --> statement-breakpoint

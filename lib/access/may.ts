@@ -30,6 +30,7 @@ export const permissions = {
   "tickets.read": { planner: "site", lead: "site" },
   "segments.read": { planner: "site" },
   "segments.name-people": { payroll: "site" },
+  "records.correct": { lead: "cells" },
   "standards.read": { planner: "site", lead: "site" },
   calculate: { planner: "site" },
 } as const satisfies Record<string, Partial<Record<Role, Reach>>>;
