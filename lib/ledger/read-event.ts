@@ -34,11 +34,15 @@ function arePlaceable(event: ClockEvent): boolean {
   return instants.every((text) => (instantMs(text) ?? 0) >= OLDEST_MS);
 }
 
-/** Reads the event inside an `insert`, so that everything later may trust it. */
+/**
+ * Reads the event inside an `insert`, so that everything later may trust it. Its note becomes the
+ * note of the whole: free text has one place, from which it can be erased.
+ */
 function withReadInsert(event: ClockEvent): ClockEvent | null {
   if (event.kind !== "insert") return event;
   const inner = clockEvent.safeParse(event.event);
   if (!inner.success || inner.data.kind === "insert") return null;
   if (inner.data.worker !== event.worker || !arePlaceable(inner.data)) return null;
-  return { ...event, event: inner.data };
+  const { note = event.note, ...inserted } = inner.data;
+  return { ...event, event: inserted, ...(note === undefined ? {} : { note }) };
 }
