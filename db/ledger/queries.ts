@@ -1,24 +1,8 @@
 import { sql } from "drizzle-orm";
 import { heldOf } from "@/db/access/queries";
 import type { Scope } from "@/db/client";
+import type { Asked } from "@/lib/ledger/asked";
 import type { BookingContext, ItemFacts, Window } from "@/lib/ledger/context";
-
-/** What a booking, a bench or a rebuild asks of the ledger. */
-export interface Asked {
-  kioskId: string | null;
-  /** Numbers of workers who are named. */
-  numbers?: readonly string[];
-  sessions?: readonly string[];
-  /** The ids under which the records of a batch may be known. */
-  ids?: readonly string[];
-  /** Whose timeline is touched, and when. */
-  touched: readonly { number: string; atMs: number }[];
-  /** Events that corrections of the batch are about. */
-  targets?: readonly string[];
-  items?: readonly { ticket: string; operation: string }[];
-  /** Where a bench is wanted, the instant that it shows. */
-  benchAtMs?: number | null;
-}
 
 /** How far a gap is looked for at first: hardly anybody works for longer without one. */
 const REACH_DAYS = 12;
@@ -34,20 +18,20 @@ export async function readContext(
   asked: Asked,
   reachDays = REACH_DAYS,
 ): Promise<BookingContext> {
-  const { touched, items = [] } = asked;
+  const { touched, items } = asked;
   const { rows } = await scope.db.execute<{ context: Raw }>(sql`select booking_context(
     ${scope.siteId},
     ${asked.kioskId},
-    ${sql.param(asked.numbers ?? touched.map(({ number }) => number))}::text[],
-    ${sql.param(asked.sessions ?? [])}::uuid[],
-    ${sql.param(asked.ids ?? [])}::uuid[],
+    ${sql.param(asked.numbers)}::text[],
+    ${sql.param(asked.sessions)}::uuid[],
+    ${sql.param(asked.ids)}::uuid[],
     ${sql.param(touched.map(({ number }) => number))}::text[],
     ${sql.param(touched.map(({ atMs }) => new Date(atMs).toISOString()))}::timestamptz[],
-    ${sql.param(asked.targets ?? [])}::uuid[],
+    ${sql.param(asked.targets)}::uuid[],
     ${sql.param(items.map(({ ticket }) => ticket))}::text[],
     ${sql.param(items.map(({ operation }) => operation))}::text[],
     make_interval(days => ${reachDays}),
-    ${asked.benchAtMs ? new Date(asked.benchAtMs).toISOString() : null}::timestamptz) as context`);
+    ${asked.benchAtMs === null ? null : new Date(asked.benchAtMs).toISOString()}::timestamptz) as context`);
   // safe because the function always answers with one row
   const context = contextOf(rows[0]!.context);
   const isTruncated = context.windows.some(({ truncated }) => truncated);
@@ -58,7 +42,12 @@ export async function readContext(
 
 /** What the database sends: lists that are empty may be null. */
 type Raw = Omit<BookingContext, "workers" | "windows" | "facts" | "next"> & {
-  workers: { id: string; number: string; homeCellId: string; roles: Parameters<typeof heldOf>[0] }[];
+  workers: {
+    id: string;
+    number: string;
+    homeCellId: string;
+    roles: Parameters<typeof heldOf>[0];
+  }[];
   windows: { [K in keyof Window]: Window[K] | null }[] | null;
   facts: ItemFacts[] | null;
   next: BookingContext["next"] | null;

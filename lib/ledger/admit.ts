@@ -18,6 +18,7 @@ export interface KnownSession {
   id: string;
   workerId: string;
   openedMs: number;
+  endedMs?: number | null;
 }
 
 /** What is known around one event when it is judged at the door of the ledger. */

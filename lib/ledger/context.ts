@@ -78,7 +78,7 @@ export interface ContextWorker {
 /** All that booking a batch must know, of one moment. */
 export interface BookingContext {
   workers: ContextWorker[];
-  sessions: (KnownSession & { endedMs: number | null })[];
+  sessions: KnownSession[];
   /** The ids of the batch that are in the ledger already. */
   known: { id: string; bodyHash: string; keptFor: string | null; questions: string[] | null }[];
   served: ServedCell[];

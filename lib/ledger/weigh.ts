@@ -18,7 +18,11 @@ export function standardOf(
 ): Standard | null {
   const { standards, firstWorkMs, firstReportMs } = facts;
   const options = standards.flatMap(({ option }) => option ?? []);
-  return standardInForce(standards, productionDay(firstWorkMs ?? firstReportMs ?? atMs, rules), options);
+  return standardInForce(
+    standards,
+    productionDay(firstWorkMs ?? firstReportMs ?? atMs, rules),
+    options,
+  );
 }
 
 /** Pieces that are still to be made at a ticket operation: the lot less scrap and good; 0 or more. */

@@ -1,0 +1,118 @@
+import type { LedgerRow } from "@/lib/ledger/decide";
+import type { DerivedTimeline, NewSession } from "@/lib/ledger/decide-booking";
+import { type Derived, ticketsTouched } from "@/lib/timeline/derive";
+
+/** What a row gains so that the database can take it: instants as text, names as its columns. */
+type Fields = Record<string, unknown>;
+
+export interface Booking {
+  siteId: string;
+  kioskId: string | null;
+  receivedMs: number;
+  rows: readonly LedgerRow[];
+  timelines: readonly DerivedTimeline[];
+  sessions: readonly NewSession[];
+}
+
+/** Writes a booking as the one argument of the database's `book`. */
+export function payloadOf(booking: Booking): string {
+  const { siteId, kioskId, timelines, rows } = booking;
+  const site = { site_id: siteId };
+  const from = <T extends object>(
+    pick: (derived: Derived) => readonly T[],
+    name: (row: T) => Fields = columnsOf,
+  ) =>
+    timelines.flatMap(({ workerId, derived }) =>
+      pick(derived).map((row) => ({ ...site, worker_id: workerId, ...name(row) })),
+    );
+  return JSON.stringify({
+    heads: timelines.map(({ workerId, window, derived }) => ({
+      worker_id: workerId,
+      version: window.version,
+      as_of: instant(derived.asOfMs),
+    })),
+    events: rows.map((row) => ({ ...site, ...eventColumns(row, booking) })),
+    notes: rows.flatMap(({ id, note }) => (note === null ? [] : [{ event_id: id, text: note }])),
+    sessions: booking.sessions.map((session) => ({ ...columnsOf(session), kiosk_id: kioskId })),
+    gone: {
+      segments: from(({ segments }) => segments.gone),
+      shifts: from(({ shifts }) => shifts.gone),
+      reports: from(({ reports }) => reports.gone),
+      loose_ends: from(({ looseEnds }) => looseEnds.gone),
+    },
+    segments: from(({ segments }) => segments.changed),
+    shifts: from(({ shifts }) => shifts.changed),
+    reports: from(({ reports }) => reports.changed),
+    loose_ends: [
+      ...from(
+        ({ looseEnds }) => looseEnds.changed,
+        (row) => ({ ...columnsOf(row), source: "fold" }),
+      ),
+      ...rows.flatMap((row) => keptEnd(row, booking)),
+    ],
+    marks: [...new Set(timelines.flatMap(({ derived }) => ticketsTouched(derived)))].map((key) => ({
+      kind: "ticket",
+      key,
+    })),
+    audit: rows.flatMap((row) => auditOf(row, kioskId)),
+  });
+}
+
+/** `startMs` is the column `start_at`, `cellId` the column `cell_id`. */
+function columnsOf(row: object): Fields {
+  return Object.fromEntries(
+    Object.entries(row).map(([name, value]) =>
+      name.endsWith("Ms")
+        ? [`${snake(name.slice(0, -2))}_at`.replace(/^at_at$/, "at"), instant(value)]
+        : [snake(name), value],
+    ),
+  );
+}
+
+function snake(name: string): string {
+  return name.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`);
+}
+
+function instant(ms: number | null): string | null {
+  return ms === null ? null : new Date(ms).toISOString();
+}
+
+function eventColumns(row: LedgerRow, { kioskId, receivedMs }: Booking): Fields {
+  const { uncertaintyMs, note, ...columns } = row;
+  return {
+    ...columnsOf(columns),
+    uncertainty_ms: uncertaintyMs,
+    received_at: instant(receivedMs),
+    kiosk_id: kioskId,
+  };
+}
+
+/** A record that is kept and not counted hangs on its kiosk until a person settles it. */
+function keptEnd(row: LedgerRow, { siteId, kioskId, receivedMs }: Booking): Fields[] {
+  if (!row.keptFor) return [];
+  return [
+    {
+      site_id: siteId,
+      code: row.keptFor,
+      subject: row.id,
+      source: "receipt",
+      worker_id: row.workerId,
+      kiosk_id: kioskId,
+      at: instant(row.atMs ?? receivedMs),
+      settled: false,
+    },
+  ];
+}
+
+/** What a lead enters for somebody else is everybody's to see later. */
+function auditOf({ by, id, kind, workerNumber, keptFor }: LedgerRow, kioskId: string | null) {
+  if (by === null || keptFor) return [];
+  return [
+    {
+      actor: `kiosk:${kioskId}`,
+      action: `records.${kind}`,
+      subject: `event:${id}`,
+      detail: { by, worker: workerNumber },
+    },
+  ];
+}
