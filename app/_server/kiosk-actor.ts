@@ -5,12 +5,11 @@ import { database } from "@/app/_server/database";
 import { hashSecret } from "@/app/_server/secret";
 import { listRolesOfWorker } from "@/db/access/queries";
 import { findKioskByToken, findKioskSession } from "@/db/kiosks/queries";
+import { isSessionOver } from "@/lib/kiosks/session";
 import { no, ok, type Result } from "@/lib/result";
 
 /** The device cookie that enrolment sets. */
 export const KIOSK_COOKIE = "bookmatch_kiosk";
-/** A session holds until its worker's shift ends, 16 hours at most (LEDGER.md 9). */
-export const SESSION_MAX_MS = 16 * 3_600_000;
 
 /** Finds the kiosk of a request by its device cookie; a revoked one is found too. */
 export async function kioskOf(request: Request): Promise<Result<KioskActor>> {
@@ -29,12 +28,21 @@ export async function workerOf(request: Request): Promise<Result<WorkerActor>> {
   const scope = { db: database(), siteId };
   const token = bearerOf(request);
   const session = token ? await findKioskSession(scope, kioskId, hashSecret(token)) : null;
-  const isOver =
-    !session || session.endedAt || Date.now() - session.openedAt.getTime() > SESSION_MAX_MS;
-  if (isOver) return no("unauthenticated", "Sign in at this tablet first: number and PIN.");
+  if (!session || isOver(session))
+    return no("unauthenticated", "Sign in at this tablet first: number and PIN.");
   const held = await listRolesOfWorker(scope, session.workerId);
   const { sessionId, workerId, number } = session;
   return ok({ kind: "worker", siteId, kioskId, sessionId, workerId, number, held });
+}
+
+/** A token opens nothing any more once its session is over: the next act asks for the PIN. */
+function isOver(session: NonNullable<Awaited<ReturnType<typeof findKioskSession>>>): boolean {
+  const { openedAt, endedAt, shiftEndAt } = session;
+  const shifts = shiftEndAt
+    ? [{ end: Math.floor(shiftEndAt.getTime() / 1000), endEvent: session.sessionId }]
+    : [];
+  const held = { openedMs: openedAt.getTime(), endedMs: endedAt?.getTime() ?? null };
+  return isSessionOver(held, { atMs: Date.now(), kind: "read" }, shifts);
 }
 
 function cookieOf(request: Request, name: string): string | null {

@@ -13,7 +13,10 @@ export async function findKioskByToken(db: Db, tokenHash: string) {
   return kiosk ?? null;
 }
 
-/** Finds a kiosk session by its token's SHA-256, on one kiosk only; ended ones too. */
+/**
+ * Finds a kiosk session by its token's SHA-256, on one kiosk only; ended ones too. `shiftEndAt`: when
+ * its worker first ended a shift since it was opened; null where that is still to come.
+ */
 export async function findKioskSession({ db, siteId }: Scope, kioskId: string, tokenHash: string) {
   const [session] = await db
     .select({
@@ -22,6 +25,13 @@ export async function findKioskSession({ db, siteId }: Scope, kioskId: string, t
       number: workers.number,
       openedAt: kioskSessions.openedAt,
       endedAt: kioskSessions.endedAt,
+      shiftEndAt: sql<Date | null>`(
+        select min(s.end_at)
+        from shifts s
+        where s.site_id = ${siteId}
+          and s.worker_id = ${kioskSessions.workerId}
+          and s.end_at > ${kioskSessions.openedAt}
+          and s.end_event_id is not null)`.mapWith(kioskSessions.endedAt),
     })
     .from(kioskSessions)
     .innerJoin(

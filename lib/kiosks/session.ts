@@ -1,7 +1,7 @@
 import type { Shift } from "@/lib/timeline/schema";
 
 /** A session holds until its worker's shift ends, 16 hours at most (LEDGER.md 9). */
-export const SESSION_MAX_MS = 16 * 3_600_000;
+const SESSION_MAX_MS = 16 * 3_600_000;
 /** An undo or an agreement may come this much after the shift's end. */
 const GRACE_MS = 10_000;
 

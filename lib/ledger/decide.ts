@@ -1,6 +1,6 @@
 import { actCell, cellsServedAt } from "@/lib/ledger/act-cell";
 import { type KeptCode, keptFor } from "@/lib/ledger/admit";
-import type { BookingContext, ItemFacts } from "@/lib/ledger/context";
+import type { BookingContext } from "@/lib/ledger/context";
 import { effectMs, type Placed } from "@/lib/ledger/place";
 import type { ClockEvent, EventBody, Item, LooseEndCode, Verdict } from "@/lib/ledger/schema";
 import { actOf, namedItems, sharedItems, targetOf } from "@/lib/ledger/target";
