@@ -13,7 +13,7 @@ export const KIOSK_COOKIE = "bookmatch_kiosk";
 
 /** Finds the kiosk of a request by its device cookie; a revoked one is found too. */
 export async function kioskOf(request: Request): Promise<Result<KioskActor>> {
-  const token = cookieOf(request, KIOSK_COOKIE);
+  const token = kioskTokenOf(request);
   const kiosk = token ? await findKioskByToken(database(), hashSecret(token)) : null;
   if (!kiosk) return no("unauthenticated", "This tablet is not enrolled. Ask an admin for a code.");
   return ok({ kind: "kiosk", ...kiosk });
@@ -45,7 +45,9 @@ function isOver(session: NonNullable<Awaited<ReturnType<typeof findKioskSession>
   return isSessionOver(held, { atMs: Date.now(), kind: "read" }, shifts);
 }
 
-function cookieOf(request: Request, name: string): string | null {
+/** The device token of a request's cookie; null where it carries none. */
+export function kioskTokenOf(request: Request): string | null {
   const cookies = (request.headers.get("cookie") ?? "").split(/;\s*/);
-  return cookies.find((cookie) => cookie.startsWith(`${name}=`))?.slice(name.length + 1) ?? null;
+  const prefix = `${KIOSK_COOKIE}=`;
+  return cookies.find((cookie) => cookie.startsWith(prefix))?.slice(prefix.length) ?? null;
 }

@@ -1,5 +1,5 @@
 import "server-only";
-import { KIOSK_COOKIE } from "@/app/_server/kiosk-actor";
+import { KIOSK_COOKIE, kioskTokenOf } from "@/app/_server/kiosk-actor";
 
 /** As long as browsers keep any cookie (400 days); renewed at every hand-in. */
 const MAX_AGE_SECONDS = 400 * 86_400;
@@ -18,6 +18,11 @@ export function kioskCookie(token: string, request: Request): string {
     "SameSite=Strict",
   ];
   return (isLocal(request) ? parts : [...parts, "Secure"]).join("; ");
+}
+
+/** The same for the kiosk that asks: its cookie lives on as long as it hands records in. */
+export function renewedCookie(request: Request): string {
+  return kioskCookie(kioskTokenOf(request) ?? "", request);
 }
 
 /** Next gives a handler the address that it listens on; the browser's own is in `Host`. */

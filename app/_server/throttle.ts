@@ -1,8 +1,11 @@
 import "server-only";
 import { clearTries } from "@/db/access/commands";
-import type { Db } from "@/db/client";
-import { reserveTries, takeBackTry } from "@/db/kiosks/pin-tries";
+import type { Db, Scope } from "@/db/client";
+import { addUpTo, reserveTries, takeBackTry } from "@/db/kiosks/tries";
 import { pinWaits } from "@/lib/kiosks/pin-waits";
+import { canonicalJson } from "@/lib/ledger/canonical";
+import { no } from "@/lib/result";
+import { sum } from "@/lib/sum";
 
 /** One try at a PIN: whose, on which tablet. `worker` is the id, or the number of nobody known. */
 export interface PinTry {
@@ -28,6 +31,20 @@ export async function forgetPinTries(db: Db, one: PinTry): Promise<void> {
   const { pair, worker, kiosk } = keysOf(one);
   await clearTries(db, [pair, worker]);
   await takeBackTry(db, kiosk);
+}
+
+/** What a tablet taken out of use may still hand in: 2 MB, in parts of 500 bytes. */
+const KEPT_MAX = 4000;
+const KEPT_PART_BYTES = 500;
+
+/** Makes room for what a revoked kiosk hands in; a problem once it has handed in its share. */
+export async function reserveKept(scope: Scope, kioskId: string, events: readonly unknown[]) {
+  const parts = sum(
+    events.map((event) => Math.ceil(canonicalJson(event).length / KEPT_PART_BYTES)),
+  );
+  const key = `revoked:${scope.siteId}:${kioskId}`;
+  if (await addUpTo(scope.db, { key, parts, max: KEPT_MAX, now: new Date() })) return null;
+  return no("forbidden", "This tablet was taken out of use and has handed in all it may.");
 }
 
 function keysOf({ siteId, worker, kioskId, now }: PinTry) {

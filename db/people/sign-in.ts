@@ -10,6 +10,7 @@ export async function findWorkerToSignIn({ db, siteId }: Scope, number: string) 
       number: workers.number,
       name: workers.name,
       language: workers.language,
+      homeCellId: workers.homeCellId,
       pinHash: workers.pinHash,
       endsOn: workers.endsOn,
     })

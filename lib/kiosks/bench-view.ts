@@ -1,19 +1,11 @@
-import type { Bench, BenchItem } from "@/lib/kiosks/schema";
-import type { BookingContext, ItemFacts, Window } from "@/lib/ledger/context";
-import { openPieces, standardOf } from "@/lib/ledger/weigh";
-import { sum } from "@/lib/sum";
+import { type BenchSource, benchItem, isSame, itemsOn } from "@/lib/kiosks/bench-item";
+import type { Bench } from "@/lib/kiosks/schema";
+import type { Window } from "@/lib/ledger/context";
 import { dayBounds, productionDay, ruleAt } from "@/lib/time/site-day";
-import { shareOf, sumWindow } from "@/lib/timeline/day-sums";
+import { sumWindow } from "@/lib/timeline/day-sums";
+import { isInWindow } from "@/lib/timeline/derive";
 import type { SegmentRow } from "@/lib/timeline/rows";
-import type { Folded, Segment, SiteRules, WorkItem } from "@/lib/timeline/schema";
-
-/** A worker's window and what the fold makes of it, with what else is known at that moment. */
-export interface BenchSource {
-  window: Window;
-  folded: Folded;
-  context: Pick<BookingContext, "rules" | "facts" | "next">;
-  atMs: number;
-}
+import type { Folded, Segment, SiteRules } from "@/lib/timeline/schema";
 
 /** What a worker's own screen shows at an instant (API.md). */
 export function benchOf(source: BenchSource): Bench {
@@ -40,106 +32,24 @@ export function benchOf(source: BenchSource): Bench {
     looseEnds: looseEndsOf(window, folded),
     events: openEvents(window, context.rules, atMs),
     planned: plannedAt(window, atMs),
-    next: context.next.filter(({ ticket, operation }) => !isOn(folded, { ticket, operation })),
+    next: context.next.filter((next) => !itemsOn(folded).some((item) => isSame(item, next))),
   };
-}
-
-/** The ticket operations that a worker is on and that facts are needed of; may be empty. */
-export function itemsOn({ standing }: Folded): readonly WorkItem[] {
-  return standing?.doing.kind === "work" ? standing.doing.items : [];
-}
-
-function isOn(folded: Folded, pair: Pair): boolean {
-  return itemsOn(folded).some((item) => isSame(item, pair));
-}
-
-function benchItem(item: WorkItem, source: BenchSource): BenchItem {
-  const { ticket, operation, weight } = item;
-  const found = source.context.facts.find((facts) => isSame(facts, item));
-  if (!found) return { ...NOTHING_KNOWN, ticket, operation, weight, name: operation };
-  const facts = withOwnCounts(found, source);
-  const standard = standardOf(facts, source.context.rules, source.atMs);
-  return {
-    ticket,
-    operation,
-    weight,
-    model: facts.model,
-    options: facts.options,
-    name: facts.name,
-    quantity: facts.quantity,
-    openQuantity: openPieces(facts),
-    good: facts.good,
-    setupSeconds: standard?.setupSeconds ?? null,
-    runSeconds: standard?.runSeconds ?? null,
-    bookedSeconds: bookedBefore(facts, source),
-    hazards: facts.hazards,
-  };
-}
-
-const NOTHING_KNOWN = {
-  model: "",
-  options: [],
-  quantity: 0,
-  openQuantity: 0,
-  good: 0,
-  setupSeconds: null,
-  runSeconds: null,
-  bookedSeconds: 0,
-  hazards: [],
-};
-
-/** Facts are of the moment before the batch: its worker's counts are put in place of the old ones. */
-function withOwnCounts(facts: ItemFacts, { window, folded }: BenchSource): ItemFacts {
-  const before = window.reports.filter((report) => isSame(report, facts));
-  const now = folded.reports.filter(
-    (report) => isSame(report, facts) && isWithin(window, report.atMs),
-  );
-  const change = (count: "good" | "scrap") =>
-    sum(now.map((report) => report[count])) - sum(before.map((report) => report[count]));
-  return { ...facts, good: facts.good + change("good"), scrap: facts.scrap + change("scrap") };
-}
-
-/**
- * All time booked to an item before the worker's present stretch on it, in whole seconds: others'
- * as of the instant, one's own as the fold has it now.
- */
-function bookedBefore(facts: ItemFacts, { window, folded, atMs }: BenchSource): number {
-  const others = facts.booked
-    .filter(({ workerId }) => workerId !== window.workerId)
-    .map(({ seconds, sinceMs, weight, total }) => {
-      const runningSeconds = sinceMs === null ? 0 : Math.max(0, atMs - sinceMs) / 1000;
-      return seconds + Math.floor((runningSeconds * (weight ?? 1)) / (total || 1));
-    });
-  const kept = facts.booked.find(({ workerId }) => workerId === window.workerId)?.seconds ?? 0;
-  const replaced = window.segments.filter((row) => isSame(row, facts));
-  const own = folded.segments
-    .filter(({ start, end }) => end !== null && isWithin(window, start * 1000))
-    .filter(({ start }) => start < (folded.standing?.since ?? Number.POSITIVE_INFINITY))
-    .flatMap((segment) => shareOf(segment, segment.end ?? segment.start))
-    .filter((share) => isSame(share, facts));
-  const ownBefore = kept - sum(replaced.map(({ seconds }) => seconds ?? 0));
-  return Math.max(0, sum(others) + ownBefore + sum(own.map(({ seconds }) => seconds)));
 }
 
 function todayOf({ window, folded, context, atMs }: BenchSource): Bench["today"] {
   const day = dayBounds(productionDay(atMs, context.rules), context.rules);
   const segments = [
     ...window.earlier.filter(({ item }) => item === 0).map(segmentOf),
-    ...folded.segments.filter(({ start }) => isWithin(window, start * 1000)),
+    ...folded.segments.filter(({ start }) => isInWindow(window, start * 1000)),
   ];
-  const { attendanceSeconds, directSeconds, indirectSeconds, ...rest } = sumWindow(
-    segments,
-    day,
-    Math.floor(atMs / 1000),
-  );
-  const { restSeconds, mealSeconds, unassignedSeconds } = rest;
+  const sums = sumWindow(segments, day, Math.floor(atMs / 1000));
   return {
-    attendanceSeconds,
-    directSeconds,
-    indirectSeconds,
-    restSeconds,
-    mealSeconds,
-    unassignedSeconds,
+    attendanceSeconds: sums.attendanceSeconds,
+    directSeconds: sums.directSeconds,
+    indirectSeconds: sums.indirectSeconds,
+    restSeconds: sums.restSeconds,
+    mealSeconds: sums.mealSeconds,
+    unassignedSeconds: sums.unassignedSeconds,
   };
 }
 
@@ -172,7 +82,7 @@ function changesOf({ events, seenMs }: Window): Bench["changes"] {
 function looseEndsOf(window: Window, folded: Folded): Bench["looseEnds"] {
   const own = folded.looseEnds
     .map(({ code, subject, at, settled }) => ({ code, subject, atMs: at * 1000, settled }))
-    .filter(({ atMs }) => isWithin(window, atMs));
+    .filter(({ atMs }) => isInWindow(window, atMs));
   return [...own, ...window.judged]
     .filter(({ settled }) => !settled)
     .map(({ code, subject, atMs }) => ({
@@ -214,19 +124,6 @@ function plannedAt({ planned }: Window, atMs: number): Bench["planned"] {
 
 /** A shift that begins later than this is not today's. */
 const PLANNED_AHEAD_MS = 12 * 3_600_000;
-
-interface Pair {
-  ticket: string | null;
-  operation: string | null;
-}
-
-function isSame(one: Pair, other: Pair): boolean {
-  return one.ticket === other.ticket && one.operation === other.operation;
-}
-
-function isWithin({ firstMs, lastMs }: Window, atMs: number): boolean {
-  return atMs >= Math.floor(firstMs / 1000) * 1000 && atMs <= lastMs;
-}
 
 function iso(ms: number): string {
   return new Date(ms).toISOString();

@@ -23,7 +23,7 @@ export interface NewSession extends KnownSession {
   sealedHash: string | null;
 }
 
-/** A worker's window with what the batch makes of it. */
+/** A worker's window, with the events of the batch, and what they make of it. */
 export interface DerivedTimeline {
   workerId: string;
   window: Window;
@@ -100,7 +100,8 @@ function deriveTimeline(
   const { workerId } = window;
   const added = decided.flatMap((one) => (one.worker === workerId ? (one.added ?? []) : []));
   const derived = deriveWindow(window, added, { rules, asOfMs: receivedMs });
-  return { workerId, window, derived, isTouched: added.length > 0 };
+  const events = [...window.events, ...added];
+  return { workerId, window: { ...window, events }, derived, isTouched: added.length > 0 };
 }
 
 /** An act after its session was over is booked, and asks (LEDGER.md 9); a lead needs no shift. */

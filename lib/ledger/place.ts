@@ -52,16 +52,23 @@ export function placeEvent(event: ClockEvent, arrival: Arrival): Placed | null {
   };
 }
 
+/** An answer such as `end-at:2026-05-14T16:00:00Z` says when. */
+function toldMs(answer: string): number | null {
+  const told = instantMs(answer.slice(answer.indexOf(":") + 1));
+  return told !== null && isShown(told) ? told : null;
+}
+
 function isShown(instant: number): boolean {
   return instant >= OLDEST_MS && instant < NEWEST_MS;
 }
 
 /**
- * The instant at which a correction makes something count: a move's `to`, an inserted event's own;
- * null for every other kind.
+ * The instant at which a correction makes something count: a move's `to`, an inserted event's own,
+ * the end that an answer tells; null for everything else.
  */
 export function effectMs(event: ClockEvent): number | null {
   if (event.kind === "move") return instantMs(event.to);
+  if (event.kind === "settle") return toldMs(event.answer);
   // safe because an inserted event was read as a whole one
   if (event.kind === "insert") return instantMs((event.event as ClockEvent).at);
   return null;

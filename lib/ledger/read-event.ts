@@ -11,8 +11,8 @@ export const OLDEST_MS = Date.UTC(2000, 0, 1);
  */
 export function readEvent(raw: unknown): ClockEvent | null {
   const parsed = clockEvent.safeParse(withStorableNote(raw));
-  if (!parsed.success || !isStorable(parsed.data)) return null;
-  return arePlaceable(parsed.data) ? withReadInsert(parsed.data) : null;
+  const event = parsed.success ? withReadInsert(parsed.data) : null;
+  return event && isStorable(event) && arePlaceable(event) ? event : null;
 }
 
 /** A note is free text, and half a character at its end is no reason to lose the act. */

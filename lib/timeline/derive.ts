@@ -40,8 +40,7 @@ export function deriveWindow(
   };
   const latestMs = Math.max(window.asOfMs ?? 0, asOfMs);
   const folded = fold([...window.events, ...added], facts, latestMs);
-  const fromMs = Math.floor(window.firstMs / 1000) * 1000;
-  const rows = derivedRows(folded, fromMs, window.lastMs);
+  const rows = derivedRows(folded, (atMs) => isInWindow(window, atMs));
   return {
     folded,
     asOfMs: latestMs,
@@ -50,6 +49,14 @@ export function deriveWindow(
     reports: difference(window.reports, rows.reports, (row) => row.id),
     looseEnds: difference(window.looseEnds, rows.looseEnds, (row) => `${row.code} ${row.subject}`),
   };
+}
+
+/** Says whether an instant, or the second that it was floored to, lies in a window. */
+export function isInWindow(
+  { firstMs, lastMs }: Pick<Window, "firstMs" | "lastMs">,
+  atMs: number,
+): boolean {
+  return atMs >= Math.floor(firstMs / 1000) * 1000 && atMs <= lastMs;
 }
 
 /** The tickets whose time or counts a derivation changes; each once. */

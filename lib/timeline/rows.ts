@@ -47,17 +47,13 @@ export interface DerivedRows {
   looseEnds: readonly LooseEndRow[];
 }
 
-/** Turns what the fold found into the rows that are kept, from `fromMs` up to `toMs`, both in. */
-export function derivedRows(folded: Folded, fromMs: number, toMs: number): DerivedRows {
-  const isInside = (row: { startMs: number } | { atMs: number }) => {
-    const at = "startMs" in row ? row.startMs : row.atMs;
-    return at >= fromMs && at <= toMs;
-  };
+/** Turns what the fold found into the rows that are kept, where `isKept` says so of their instant. */
+export function derivedRows(folded: Folded, isKept: (atMs: number) => boolean): DerivedRows {
   return {
-    segments: folded.segments.flatMap(segmentRows).filter(isInside),
-    shifts: folded.shifts.map(shiftRow).filter(isInside),
-    reports: folded.reports.map(reportRow).filter(isInside),
-    looseEnds: folded.looseEnds.map(looseEndRow).filter(isInside),
+    segments: folded.segments.flatMap(segmentRows).filter(({ startMs }) => isKept(startMs)),
+    shifts: folded.shifts.map(shiftRow).filter(({ startMs }) => isKept(startMs)),
+    reports: folded.reports.map(reportRow).filter(({ atMs }) => isKept(atMs)),
+    looseEnds: folded.looseEnds.map(looseEndRow).filter(({ atMs }) => isKept(atMs)),
   };
 }
 

@@ -3,7 +3,7 @@ import { handle } from "@/app/_server/handle";
 import { kioskCookie } from "@/app/_server/kiosk-cookie";
 import { currentSealKey } from "@/app/_server/seal";
 import { hashSecret, newSecret } from "@/app/_server/secret";
-import { enrolKiosk } from "@/db/kiosks/enrol";
+import { enrolKiosk } from "@/db/kiosks/enrolment";
 import { findSite } from "@/db/sites/queries";
 import { type Enrolled, enrolRequest } from "@/lib/kiosks/schema";
 import { no } from "@/lib/result";

@@ -50,4 +50,22 @@ export async function takeBackTry(db: Db, key: string): Promise<void> {
     .where(sql`${throttles.key} = ${key}`);
 }
 
+/** Adds to a count that may not pass `max`; false, and nothing added, where it would. */
+export async function addUpTo(
+  db: Db,
+  { key, parts, max, now }: { key: string; parts: number; max: number; now: Date },
+): Promise<boolean> {
+  if (parts > max) return false;
+  const added = await db
+    .insert(throttles)
+    .values({ key, failures: parts, lastFailedAt: now })
+    .onConflictDoUpdate({
+      target: throttles.key,
+      set: { failures: sql`${throttles.failures} + ${parts}`, lastFailedAt: now },
+      setWhere: sql`${throttles.failures} + ${parts} <= ${max}`,
+    })
+    .returning({ key: throttles.key });
+  return added.length > 0;
+}
+
 const step = (place: number) => sql.raw(`step_${place}`);
