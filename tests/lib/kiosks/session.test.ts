@@ -5,7 +5,7 @@ const HOUR = 3_600_000;
 const ended = (end: number) => [{ end, endEvent: "e" }];
 
 describe("isSessionOver", () => {
-  test.each([
+  test.each<[string, number, { end: number | null; endEvent: string | null }[], boolean, string]>([
     ["run", 16 * HOUR, [], false, "16 hours to the millisecond"],
     ["run", 16 * HOUR + 1, [], true, "no longer"],
     ["run", 5000, ended(4), true, "after the second in which its worker's shift ended"],

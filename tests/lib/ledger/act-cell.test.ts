@@ -18,7 +18,7 @@ describe("cellsServedAt", () => {
 });
 
 describe("actCell", () => {
-  test.each([
+  test.each<[string[], string | null, boolean, string | null, string]>([
     [["mill", "neck"], "neck", false, "neck", "the operation's, where the kiosk serves it"],
     [["mill", "neck"], "spray", false, "mill", "else the kiosk's first: borrowed hands count here"],
     [["mill"], null, false, "mill", "an act without operation"],

@@ -21,8 +21,9 @@ describe("targetOf", () => {
 
 describe("actOf", () => {
   test("is the inserted event of an insert, and any other event itself", () => {
-    const inner = { id, kind: "shift-end" } as ClockEvent;
-    expect(actOf({ kind: "insert", event: inner } as ClockEvent)).toBe(inner);
+    // safe because only the kind and what it holds are asked
+    const inner = { id, kind: "shift-end" } as unknown as ClockEvent;
+    expect(actOf({ kind: "insert", event: inner } as unknown as ClockEvent)).toBe(inner);
     expect(actOf(inner)).toBe(inner);
   });
 });
