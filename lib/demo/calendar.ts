@@ -24,7 +24,9 @@ export interface DemoDay {
 /** The days of the scenario, laid out backwards from the instant at which it is loaded. */
 export interface DemoCalendar {
   days: readonly DemoDay[];
-  /** The history's first second: a Monday's local midnight. */
+  /** The history's first day, a Monday. */
+  startsOn: string;
+  /** Its first second: the local midnight. */
   startsAt: number;
   /** The second at which the scenario is loaded: nothing happens after it. */
   endsAt: number;
@@ -41,6 +43,7 @@ export function calendarAt(nowMs: number, weeks = HISTORY_WEEKS): DemoCalendar {
   const days = Array.from({ length }, (_, at) => dayOf(first, at - WARM_UP_DAYS));
   return {
     days,
+    startsOn: first,
     startsAt: days[WARM_UP_DAYS]!.at(0),
     endsAt: Math.floor(nowMs / 1000),
     today,

@@ -16,8 +16,21 @@ export interface Hall {
   tempo: Tempo;
   troubles: Troubles;
   record: Record;
+  /** What a lead must still look at. */
+  questions: Question[];
   /** The day of the history in which an epoch second lies. */
   dayOf(at: number): number;
+}
+
+/** A loose end that waits for the lead of somebody's home cell, with the answer it will get. */
+export interface Question {
+  worker: string;
+  cell: CellName;
+  /** The key of the loose end. */
+  end: string;
+  answer: string;
+  /** Epoch second from which on it can be seen. */
+  from: number;
 }
 
 /** Someone in a shift: where the person is and how far the time has gone. */
@@ -63,10 +76,20 @@ export function* spend(bench: Bench, seconds: number): Stretch<number> {
   }
 }
 
+/** A lead hears of it later: in the cell of the person, under the key of the loose end. */
+export function ask(bench: Bench, end: string, answer = "accept"): void {
+  const { hall, person, at } = bench;
+  hall.questions.push({ worker: person.number, cell: person.cell, end, answer, from: at });
+}
+
+/** Meals may last so long at Larkmoor Stringworks. */
+export const MEAL_MAX_SECONDS = 75 * 60;
+
 function* takeBreak(bench: Bench): Stretch {
   const next = bench.breaks.shift();
   if (!next) return;
-  tap(bench, { kind: "break-start", break: next.kind });
+  const event = tap(bench, { kind: "break-start", break: next.kind });
+  if (next.seconds > MEAL_MAX_SECONDS) ask(bench, `break-long:${event}`);
   bench.at += next.seconds;
   yield bench.at;
   tap(bench, { kind: "break-end", break: next.kind });

@@ -27,13 +27,22 @@ interface Tap {
   worker: string;
   session: DemoSession;
   body: EventBody;
+  /** The lead who entered it for the worker. */
   by?: string;
 }
 
 /** The taps of a run, kept in the order in which they were made. */
 export interface Record {
   /** Notes a tap at an epoch second and answers its event id. */
-  tap(tap: { at: number; cell: CellName; worker: string; shift: number; body: EventBody }): string;
+  tap(tap: {
+    at: number;
+    cell: CellName;
+    worker: string;
+    /** The lead who enters it for the worker, in a session of the own. */
+    by?: string;
+    shift: number;
+    body: EventBody;
+  }): string;
   /** Everything that reached the server by `untilMs`, in the order of the taps. */
   until(untilMs: number): { events: DemoEvent[]; sessions: DemoSession[] };
 }
@@ -50,11 +59,11 @@ export function recordOf(random: Random, cutOffs: readonly CutOff[]): Record {
   const taps: Tap[] = [];
   const sessions = new Map<string, DemoSession>();
   return {
-    tap({ at, cell, worker, shift, body }) {
+    tap({ at, cell, worker, by, shift, body }) {
       const atMs = at * 1000 + random.whole(0, 999);
-      const session = sessionOf(sessions, { cell, worker, shift, atMs }, random);
+      const session = sessionOf(sessions, { cell, worker: by ?? worker, shift, atMs }, random);
       const id = uuidAt(atMs, random);
-      taps.push({ id, atMs, cell, worker, session, body });
+      taps.push({ id, atMs, cell, worker, session, body, ...(by && { by }) });
       return id;
     },
     until(untilMs) {
@@ -84,7 +93,7 @@ function handIn(taps: readonly Tap[], cutOffs: readonly CutOff[]): DemoEvent[] {
   const clocks = new Map<CellName, ReturnType<typeof clockOf>>();
   return [...taps]
     .sort((a, b) => a.atMs - b.atMs)
-    .map(({ id, atMs, cell, worker, session, body }) => {
+    .map(({ id, atMs, cell, worker, session, body, by }) => {
       const clock = clocks.get(cell) ?? clockOf(cell);
       clocks.set(cell, clock);
       const { reading, delayMs } = clock(atMs);
@@ -99,6 +108,7 @@ function handIn(taps: readonly Tap[], cutOffs: readonly CutOff[]): DemoEvent[] {
           worker,
           at: new Date(atMs).toISOString(),
           clock: reading,
+          ...(by && { by }),
           ...body,
         },
       };

@@ -1,6 +1,7 @@
 import type { CastMember } from "@/lib/demo/cast";
 import type { DemoShift } from "@/lib/demo/shifts";
 import {
+  ask,
   type Bench,
   type Hall,
   idle,
@@ -39,11 +40,12 @@ export function* shiftOf(hall: Hall, person: CastMember, shift: DemoShift): Stre
     cell: person.cell,
   };
   yield bench.at;
-  tap(bench, { kind: "shift-start" });
+  const start = tap(bench, { kind: "shift-start" });
   yield* meet(bench);
+  settleQuestions(bench);
   while (bench.at < bench.stopAt) yield* oneThing(bench);
-  if (troubles.forgetsToEnd(shift)) return;
-  yield* goHome(bench, endsAt);
+  if (!troubles.forgetsToEnd(shift)) yield* goHome(bench, endsAt);
+  else ask(bench, `no-shift-end:${start}`, `end-at:${toldEnd(bench)}`);
 }
 
 function arrival({ random }: Hall, { start }: DemoShift): number {
@@ -57,6 +59,33 @@ function* meet(bench: Bench): Stretch {
   const isMonday = new Date(bench.shift.workOn).getUTCDay() === 1;
   if (isMonday && bench.shift.start - bench.at > -600) {
     yield* otherWork(bench, random.whole(12, 20), "meeting");
+  }
+}
+
+/** What the person will say when asked: the planned end, or just after the last tap. */
+function toldEnd({ shift, at }: Bench): string {
+  return new Date(Math.max(shift.end, at + 60) * 1000).toISOString();
+}
+
+/** A question is looked at on the next day at the soonest. */
+const NEXT_DAY_SECONDS = 10 * 3_600;
+
+/** A lead answers what has come up in the own cells and is not left open for the visitor. */
+function settleQuestions({ hall, person, shift, cell, ...bench }: Bench): void {
+  const { questions, troubles, record, random } = hall;
+  let at = bench.at;
+  const mine = questions.filter(
+    (question) =>
+      person.leads.includes(question.cell) &&
+      at - question.from > NEXT_DAY_SECONDS &&
+      troubles.isSettled(question.from),
+  );
+  for (const question of mine) {
+    const { worker, end, answer } = question;
+    const body = { kind: "settle", end, answer } as const;
+    record.tap({ at, cell, worker, by: person.number, shift: shift.start, body });
+    at += random.whole(8, 20);
+    questions.splice(questions.indexOf(question), 1);
   }
 }
 
@@ -106,9 +135,10 @@ function* tooSoon(bench: Bench): Stretch {
 
 /** Sweeps the bench and ends the shift at the kiosk of the own cell. */
 function* goHome(bench: Bench, endsAt: number): Stretch {
-  bench.cell = bench.person.cell;
   bench.breaks = [];
   bench.stopAt = endsAt;
+  if (bench.cell !== bench.person.cell) bench.at += bench.hall.random.whole(25, 90);
+  bench.cell = bench.person.cell;
   const left = endsAt - bench.at;
   if (left > 60) yield* otherWork(bench, left / 60, "cleaning");
   tap(bench, { kind: "shift-end" });

@@ -50,6 +50,7 @@ export function simulate({ nowMs, weeks, people = cast, openTickets }: Scenario)
     tempo: tempoOf(random),
     troubles,
     record: recordOf(random, []),
+    questions: [],
     dayOf: (at) => dayOf(calendar, at),
   };
   const before = shifts.filter(({ end }) => end <= calendar.startsAt);

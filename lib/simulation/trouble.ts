@@ -18,6 +18,8 @@ export interface Troubles {
   mustFail(traveller: Traveller, operation: DemoOperation, at: number): boolean;
   /** Somebody takes up a ticket whose operation before is still in other hands. */
   isHasty(cell: CellName, at: number): boolean;
+  /** What came up then has been settled; later questions are still open. */
+  isSettled(from: number): boolean;
   cutOffs: readonly CutOff[];
 }
 
@@ -30,6 +32,8 @@ const LOOP = { days: 20, model: "Avocet", operation: "420", times: 3 };
 const HASTY = { cell: "Binding", days: [3, 17] };
 const DOWN = { cell: "CNC", days: 15, fromMinutes: 560, toMinutes: 740 };
 const CUT_OFF = { cell: "Spray", days: 8, fromMinutes: 600, toMinutes: 715 } as const;
+
+const OPEN_DAYS = 5;
 
 const HOUR = 3_600;
 
@@ -61,6 +65,7 @@ export function troublesOf(calendar: DemoCalendar, shifts: readonly DemoShift[])
     isHasty(cell, at) {
       return cell === HASTY.cell && hasty.delete(dayOf(calendar, at));
     },
+    isSettled: (from) => dayOf(calendar, from) < calendar.today - OPEN_DAYS,
     cutOffs: [
       {
         cell: CUT_OFF.cell,

@@ -1,6 +1,6 @@
 import { faultAt } from "@/lib/demo/faults";
 import type { Item } from "@/lib/ledger/schema";
-import { type Bench, idle, otherWork, type Stretch, spend, tap } from "@/lib/simulation/bench";
+import { ask, type Bench, idle, otherWork, type Stretch, spend, tap } from "@/lib/simulation/bench";
 import { type InHand, type Job, waitingIn } from "@/lib/simulation/floor";
 import type { Stint } from "@/lib/simulation/tempo";
 import { countPieces, openPieces } from "@/lib/simulation/traveller";
@@ -17,7 +17,7 @@ const TAPS_LATE = 0.02;
 const UNDOES = 0.008;
 const SCANS_WRONG = 0.0008;
 const OVER_COUNTS = 0.0005;
-const OBJECTS = 0.0004;
+const OBJECTS = 0.0008;
 
 /** Does a job from the first tap to the count, or as far as the shift lets it. */
 export function* doJob(bench: Bench, job: Job): Stretch {
@@ -66,7 +66,11 @@ function beginWork(bench: Bench, job: Job): { id: string; isWrong: boolean } {
       step.operation.code === job.inHand[0]!.step.operation.code &&
       job.inHand.every((each) => each.traveller !== traveller),
   );
-  const isWrong = other !== undefined && activity === "run" && random.chance(SCANS_WRONG);
+  const isWrong =
+    other !== undefined &&
+    job.inHand.length === 1 &&
+    activity === "run" &&
+    random.chance(SCANS_WRONG);
   const items = isWrong ? [itemOf(other)] : job.inHand.map(itemOf);
   if (!isWrong && random.chance(TAPS_LATE)) {
     const from = bench.at + 2;
@@ -125,7 +129,10 @@ function* countAll(bench: Bench, job: Job, done: Map<InHand["step"], number>): S
     const pieces = done.get(each.step)!;
     if (pieces > 0) report(bench, each, pieces, true);
   }
-  if ([...done.values()].every((pieces) => pieces === 0) && bench.at < bench.stopAt) {
+  // a passed or failed piece stays in the work, and so does what somebody else finished meanwhile
+  const isInspected = job.inHand.some(({ step }) => step.operation.activity === "inspect");
+  const isNothing = [...done.values()].every((pieces) => pieces === 0);
+  if ((isInspected || isNothing) && bench.at < bench.stopAt) {
     tap(bench, { kind: "pause", items: job.inHand.map(itemOf) });
   }
 }
@@ -146,7 +153,8 @@ function report(bench: Bench, { traveller, step }: InHand, pieces: number, stop:
       : tap(bench, { kind: "report", ...counted, stop, ...fault });
   const restsSeconds = troubles.restsSeconds(traveller, operation, at);
   countPieces(traveller, step, { ...count, at: bench.at, restsSeconds });
-  if (random.chance(OBJECTS)) tap(bench, { kind: "object", subject: id });
+  if (random.chance(OBJECTS))
+    ask(bench, `objection:${tap(bench, { kind: "object", subject: id })}`);
 }
 
 function countOf(bench: Bench, { traveller, step }: InHand, pieces: number) {

@@ -25,6 +25,7 @@ export function makeHall(open: Traveller[] = [], seed = "hall"): Hall {
     tempo: tempoOf(random),
     troubles: { ...troubles, mustFail: () => false, isHasty: () => false, isDown: () => false },
     record: recordOf(random, []),
+    questions: [],
     dayOf: () => 30,
   };
 }

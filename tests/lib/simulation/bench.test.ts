@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { cells } from "@/lib/demo/cells";
-import { otherWork, spend, tap } from "@/lib/simulation/bench";
+import { MEAL_MAX_SECONDS, otherWork, spend, tap } from "@/lib/simulation/bench";
 import { eventsOf, kindsOf, makeBench, makeHall, personOf, through } from "@/tests/make/hall";
 
 const person = personOf("Neck");
@@ -35,6 +35,20 @@ describe("spend", () => {
     expect(bench.at).toBeGreaterThanOrEqual(before + 2_400);
     expect(bench.at).toBeLessThan(before + 2_415);
     expect(bench.breaks).toEqual([]);
+  });
+
+  test("a meal longer than the site allows is asked about", () => {
+    const hall = makeHall();
+    const bench = makeBench(hall, person);
+    bench.breaks = [
+      { at: bench.at + 100, seconds: MEAL_MAX_SECONDS, kind: "meal" },
+      { at: bench.at + 6_000, seconds: MEAL_MAX_SECONDS + 1, kind: "meal" },
+    ];
+    through(spend(bench, 7_000));
+    const long = eventsOf(hall).filter(({ kind }) => kind === "break-start")[1]!;
+    expect(hall.questions).toMatchObject([
+      { worker: person.number, cell: "Neck", end: `break-long:${long.id}`, answer: "accept" },
+    ]);
   });
 
   test("the end of the shift cuts it short and says what was left", () => {

@@ -1,4 +1,5 @@
 import { describe, expect, test } from "vitest";
+import { cast } from "@/lib/demo/cast";
 import type { Hall } from "@/lib/simulation/bench";
 import { shiftOf } from "@/lib/simulation/shift";
 import { currentStep } from "@/lib/simulation/traveller";
@@ -49,8 +50,37 @@ describe("shiftOf", () => {
 
   test("somebody forgets to end the shift, and no tap tells", () => {
     const hall = makeHall(tickets());
-    play({ ...hall, troubles: { ...hall.troubles, forgetsToEnd: () => true } });
+    const events = play({ ...hall, troubles: { ...hall.troubles, forgetsToEnd: () => true } });
     expect(kindsOf(hall)).not.toContain("shift-end");
+    const [question] = hall.questions;
+    expect(question).toMatchObject({ worker: person.number, end: `no-shift-end:${events[0]!.id}` });
+    const told = Date.parse(question!.answer.slice("end-at:".length));
+    expect(told).toBeGreaterThan(Date.parse(events.at(-1)!.at));
+    expect(told).toBeGreaterThanOrEqual(shift.end * 1000);
+  });
+
+  test("a lead answers what came up in the own cells the days before, in the lead's own session", () => {
+    const hall = makeHall(tickets());
+    const lead = cast.find(({ leads }) => leads.includes("Neck") && leads.length === 1)!;
+    const from = shift.start - 86_400;
+    const question = { worker: person.number, answer: "accept", from };
+    hall.questions = [
+      { ...question, cell: "Neck", end: "objection:1" },
+      { ...question, cell: "Buff", end: "objection:2" },
+      { ...question, cell: "Neck", end: "objection:3", from: shift.start - 60 },
+    ];
+    const troubles = { ...hall.troubles, isSettled: () => true };
+    through(shiftOf({ ...hall, troubles }, lead, { ...shift, worker: lead.number }));
+    const events = eventsOf(hall);
+    const settled = events.filter(({ kind }) => kind === "settle");
+    expect(settled).toHaveLength(1);
+    expect(settled[0]).toMatchObject({
+      end: "objection:1",
+      worker: person.number,
+      by: lead.number,
+    });
+    expect(settled[0]!.session).toBe(events[0]!.session);
+    expect(hall.questions.map(({ end }) => end)).toEqual(["objection:2", "objection:3"]);
   });
 
   test("while the machines stand still nobody works in the cell", () => {

@@ -16,7 +16,9 @@ vi.setConfig({ testTimeout: 60_000, hookTimeout: 60_000 });
 beforeAll(() => {
   run = simulate({ nowMs });
   byWorker = new Map(cast.map(({ number }) => [number, []]));
-  for (const each of run.events) byWorker.get(each.event.worker)!.push(each);
+  for (const each of run.events) {
+    if (each.event.by === undefined) byWorker.get(each.event.worker)!.push(each);
+  }
 });
 
 const at = ({ event }: DemoEvent) => Date.parse(event.at);

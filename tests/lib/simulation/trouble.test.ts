@@ -58,6 +58,12 @@ describe("troublesOf", () => {
     expect(isHasty("Neck", daysAgo(3))).toBe(false);
   });
 
+  test("what came up in the last days is still open, what is older is settled", () => {
+    const { isSettled } = troubles();
+    expect(isSettled(daysAgo(2))).toBe(false);
+    expect(isSettled(daysAgo(9))).toBe(true);
+  });
+
   test("a kiosk is cut off for some hours, and back before now", () => {
     const [cutOff] = troubles().cutOffs;
     expect(cutOff!.toMs - cutOff!.fromMs).toBeGreaterThan(HOUR * 1000);
