@@ -1,0 +1,94 @@
+import type {
+  BenchSession,
+  Choice,
+  CountField,
+  Device,
+  ItemKey,
+  KioskState,
+} from "@/lib/bench/schema";
+import type { Bench, KioskCell, KioskTicket, Language } from "@/lib/kiosks/schema";
+import type { ClockEvent, EventBody } from "@/lib/ledger/schema";
+
+/** What happens: the world's answers, time, and taps. */
+export type Input =
+  | { on: "started"; known: Known }
+  | { on: "tick" }
+  | { on: "touch" }
+  | { on: "scan"; text: string }
+  | { on: "cell"; cell: KioskCell }
+  | { on: "link"; connected: boolean }
+  | { on: "enrolled"; device: Device }
+  | { on: "enrol-refused"; says: "wrong" | "away" | "wait" }
+  | { on: "signed-in"; session: BenchSession; bench: Bench | null }
+  | { on: "sign-in-refused"; worker: string; waitSeconds: number | null }
+  | { on: "bench"; worker: string; bench: Bench }
+  | { on: "session-over"; worker: string }
+  | { on: "ticket"; code: string; ticket: KioskTicket }
+  | { on: "no-ticket"; code: string; away: boolean }
+  | { on: "recorded"; events: readonly ClockEvent[] }
+  | { on: "not-recorded" }
+  | { on: "settled"; ids: readonly string[]; benches: Readonly<Record<string, Bench>> }
+  | Tap;
+
+export type Tap =
+  | { on: "enrol"; code: string }
+  | { on: "digit"; digit: string }
+  | { on: "rub-out" }
+  | { on: "submit" }
+  | { on: "language"; language: Language }
+  | { on: "mute"; muted: boolean }
+  | { on: "back" }
+  | { on: "leave" }
+  | { on: "stay" }
+  | { on: "undo" }
+  | { on: "page"; page: number }
+  | { on: "start-shift" }
+  | { on: "say-in" }
+  | { on: "scan-for"; add: boolean }
+  | { on: "show-cell-tickets" }
+  | { on: "take-ticket"; ticket: string }
+  | { on: "take"; choice: Choice }
+  | { on: "go-ahead" }
+  | { on: "call-lead" }
+  | { on: "pick-another" }
+  | { on: "run" }
+  | { on: "resume" }
+  | { on: "show-break" }
+  | { on: "break"; break: "meal" | "rest" }
+  | { on: "end-break" }
+  | { on: "show-other-work" }
+  | { on: "other-work"; code: string }
+  | { on: "count" }
+  | { on: "pick-item"; item: ItemKey }
+  | { on: "step"; field: CountField; by: 1 | -1 }
+  | { on: "key-count"; field: CountField }
+  | { on: "counted"; stop: boolean }
+  | { on: "cause"; operation: string }
+  | { on: "show-hours" }
+  | { on: "wrong-ticket" }
+  | { on: "wrong-count" }
+  | { on: "object"; report: string }
+  | { on: "end-shift" };
+
+/** What the kiosk kept from before this page was loaded. */
+export interface Known {
+  device: Device | null;
+  cell: KioskCell | null;
+  sessions: readonly BenchSession[];
+  benches: Readonly<Record<string, Bench>>;
+  pending: readonly ClockEvent[];
+}
+
+/** What the reducer asks of the world; `kiosk/` does it and answers with an input. */
+export type Effect =
+  | { do: "record"; bodies: readonly EventBody[]; worker: string; session: string }
+  | { do: "sign-in"; worker: string; pin: string }
+  | { do: "find-ticket"; code: string; worker: string }
+  | { do: "fetch-bench"; worker: string }
+  | { do: "enrol"; code: string }
+  | { do: "end-sessions"; worker: string }
+  | { do: "mute"; muted: boolean }
+  | { do: "sound"; sound: "accept" | "refuse" | "hold" };
+
+/** A state and what is to be done next; the second is empty for most inputs. */
+export type Step = readonly [KioskState, readonly Effect[]];
