@@ -1,4 +1,5 @@
-import type { Device, Store } from "@/kiosk/store";
+import type { Store } from "@/kiosk/store";
+import type { Device } from "@/lib/bench/schema";
 import type { Enrolled } from "@/lib/kiosks/schema";
 
 /** Reads what this browser was enrolled as; null before enrolment. */

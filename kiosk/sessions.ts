@@ -1,20 +1,21 @@
-import type { KeptSession, Store } from "@/kiosk/store";
+import type { Store } from "@/kiosk/store";
+import type { BenchSession } from "@/lib/bench/schema";
 
 /** A session holds 16 hours at most, whatever became of the shift (LEDGER.md 9). */
 export const SESSION_MAX_MS = 16 * 3_600_000;
 
 /** Keeps a session; one worker has one open session on a kiosk, the latest. */
-export async function keepSession(store: Store, session: KeptSession): Promise<void> {
+export async function keepSession(store: Store, session: BenchSession): Promise<void> {
   await store.put("sessions", session);
 }
 
 /** Lists the sessions that a badge may reopen: not ended, not too old, the latest of each worker. */
-export async function listOpenSessions(store: Store, nowMs: number): Promise<KeptSession[]> {
+export async function listOpenSessions(store: Store, nowMs: number): Promise<BenchSession[]> {
   const sessions = await store.getAll("sessions");
   const open = sessions.filter(
     ({ endedMs, openedMs }) => endedMs === null && nowMs - openedMs < SESSION_MAX_MS,
   );
-  const latest = new Map<string, KeptSession>();
+  const latest = new Map<string, BenchSession>();
   for (const session of open.toSorted((a, b) => a.openedMs - b.openedMs)) {
     latest.set(session.worker, session);
   }

@@ -1,5 +1,6 @@
 import { type DBSchema, type IDBPDatabase, openDB } from "idb";
-import type { Bench, Enrolled, KioskCell } from "@/lib/kiosks/schema";
+import type { BenchSession, Device } from "@/lib/bench/schema";
+import type { Bench, KioskCell } from "@/lib/kiosks/schema";
 import type { ClockEvent } from "@/lib/ledger/schema";
 
 /** A record that waits to be handed in. `order` is the order of the acts on this kiosk. */
@@ -10,31 +11,11 @@ export interface Waiting {
   asideMs?: number;
 }
 
-/** One PIN entry on this kiosk (LEDGER.md 9), kept until its worker's shift ends. */
-export interface KeptSession {
-  session: string;
-  worker: string;
-  name: string;
-  language: string;
-  role: string;
-  openedMs: number;
-  endedMs: number | null;
-  /** The server's token; null where the PIN was keyed while the server was away. */
-  token: string | null;
-  /** The sealed credential that proves the session later; null where there is a token. */
-  sealed: string | null;
-}
-
 /** The last bench that the server sent for a worker. */
 export interface KeptBench {
   worker: string;
   bench: Bench;
   receivedMs: number;
-}
-
-/** What this browser is at the site, since it was enrolled. */
-export interface Device extends Omit<Enrolled, "serverTime"> {
-  muted: boolean;
 }
 
 /** The cell as the server last told it, with its `ETag`. */
@@ -46,7 +27,7 @@ export interface KeptCell {
 
 export interface KioskSchema extends DBSchema {
   outbox: { key: number; value: Waiting; indexes: { id: string } };
-  sessions: { key: string; value: KeptSession };
+  sessions: { key: string; value: BenchSession };
   benches: { key: string; value: KeptBench };
   device: { key: "device"; value: Device };
   cell: { key: "cell"; value: KeptCell };

@@ -1,6 +1,15 @@
 import { cautionVersion } from "@/lib/bench/cautions";
 import type { Input, Step, Tap } from "@/lib/bench/inputs";
-import { isSameItem, keyOf, type Look, record, refuse, show, still, toBench } from "@/lib/bench/moves";
+import {
+  isSameItem,
+  keyOf,
+  type Look,
+  record,
+  refuse,
+  show,
+  still,
+  toBench,
+} from "@/lib/bench/moves";
 import { findOperation, mayGoAhead, offersOf, onlyWay, refusalOf } from "@/lib/bench/offers";
 import type { Choice, KioskState, Purpose, Screen } from "@/lib/bench/schema";
 import type { BenchView } from "@/lib/bench/view";

@@ -1,4 +1,11 @@
-import type { Bench, Enrolled, KioskCell, KioskTicket, Language, Obstacle } from "@/lib/kiosks/schema";
+import type {
+  Bench,
+  Enrolled,
+  KioskCell,
+  KioskTicket,
+  Language,
+  Obstacle,
+} from "@/lib/kiosks/schema";
 import type { Activity, ClockEvent } from "@/lib/ledger/schema";
 
 /** What this browser is at the site, since it was enrolled. */
@@ -104,7 +111,7 @@ export type Screen =
   | { at: "offer"; purpose: Purpose; ticket: string; page: number }
   | { at: "refused"; purpose: Purpose; ticket: string; choice: Choice | null; why: Refusal }
   | { at: "caution"; purpose: Purpose; choice: Choice }
-  | { at: "pick-item"; then: "count" | "reassign" }
+  | { at: "pick-item"; to: "count" | "reassign" }
   | { at: "count"; item: ItemKey; counts: Counts; open: number; keying: Keying | null }
   | { at: "cause"; item: ItemKey; counts: Counts; open: number; stop: boolean; page: number }
   | { at: "scrap"; item: ItemKey; counts: Counts; open: number; stop: boolean; cause: string }
@@ -171,4 +178,3 @@ export interface Saving {
   worker: string;
   session: string;
 }
-

@@ -9,7 +9,8 @@ import {
   SESSION_MAX_MS,
   sealedSessions,
 } from "@/kiosk/sessions";
-import { type KeptSession, openStore, type Store } from "@/kiosk/store";
+import { openStore, type Store } from "@/kiosk/store";
+import type { BenchSession } from "@/lib/bench/schema";
 import { draft, uuidOf } from "./records";
 
 let store: Store;
@@ -20,7 +21,7 @@ beforeEach(async () => {
   store = await openStore(() => undefined, `sessions-${files}`);
 });
 
-const session = (n: number, change: Partial<KeptSession> = {}): KeptSession => ({
+const session = (n: number, change: Partial<BenchSession> = {}): BenchSession => ({
   session: uuidOf(n),
   worker: "1042",
   name: "Nia Vale",
