@@ -1,5 +1,6 @@
 import type { Outbox, Settled } from "@/kiosk/outbox";
 import type { Answer } from "@/kiosk/server";
+import type { Link } from "@/lib/bench/schema";
 import type { EventResults } from "@/lib/kiosks/schema";
 import { BATCH_MAX, type ClockEvent, type EventBatch } from "@/lib/ledger/schema";
 
@@ -18,11 +19,8 @@ export interface SenderParts {
   random(): number;
   /** Told after the records have left the outbox. */
   onSettled(settled: readonly Settled[]): void;
-  onLink(link: Link): void;
+  onLink(link: Link["is"]): void;
 }
-
-/** Whether the last batch was answered; `unknown-device` asks for enrolment. */
-export type Link = "connected" | "away" | "unknown-device";
 
 export interface Sender {
   /** Says that there is something to hand in, or that the network may be back. */
@@ -40,7 +38,7 @@ const UNKNOWN_DELAY_MS = 60_000;
 /** The batch itself is at fault: not JSON, too large, or not in the form (API.md). */
 const UNREADABLE = new Set([400, 413, 422]);
 
-type Outcome = "idle" | "more" | Exclude<Link, "connected">;
+type Outcome = "idle" | "more" | Exclude<Link["is"], "connected">;
 
 /**
  * Hands the outbox in, oldest first, for as long as the page lives:

@@ -7,6 +7,7 @@ export type SignName =
   | "w-rollers"
   | "w-general"
   | "m-mask"
+  | "m-dust"
   | "m-eyes"
   | "m-ears"
   | "m-gloves"
@@ -23,6 +24,7 @@ export type CautionWords =
   | "lacquerBurns"
   | "vapourExplodes"
   | "vapourHarms"
+  | "fumesHarm"
   | "dustHarms"
   | "dustBurns"
   | "noiseHarms"
@@ -47,7 +49,7 @@ const cautions: Record<string, Caution> = {
       { sign: "w-flame", words: "dustBurns" },
     ],
     wears: [
-      { sign: "m-mask", words: "dustMask" },
+      { sign: "m-dust", words: "dustMask" },
       { sign: "m-eyes", words: "goggles" },
     ],
   },
@@ -74,7 +76,7 @@ const cautions: Record<string, Caution> = {
     ],
   },
   fumes: {
-    warns: [{ sign: "w-general", words: "vapourHarms" }],
+    warns: [{ sign: "w-general", words: "fumesHarm" }],
     wears: [{ sign: "m-mask", words: "respirator" }],
   },
   static: { warns: [{ sign: "w-ex", words: "staticSparks" }], wears: [] },

@@ -96,12 +96,12 @@ export function signedIn(
 /** The PIN was not taken: the same words whatever was wrong, and how long to wait. */
 export function signInRefused(
   state: KioskState,
-  { worker, waitSeconds }: Extract<Input, { on: "sign-in-refused" }>,
+  { worker, says, waitSeconds }: Extract<Input, { on: "sign-in-refused" }>,
 ): Step {
   const { screen } = state;
   if (screen.at !== "pin" || screen.worker !== worker) return still(state);
   const waitUntilMs = waitSeconds === null ? null : state.nowMs + waitSeconds * 1000;
-  return refuse(state, { ...screen, digits: "", busy: false, says: "wrong", waitUntilMs });
+  return refuse(state, { ...screen, digits: "", busy: false, says, waitUntilMs });
 }
 
 /** Taps where no shift is open. */

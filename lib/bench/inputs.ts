@@ -5,6 +5,7 @@ import type {
   Device,
   ItemKey,
   KioskState,
+  Link,
 } from "@/lib/bench/schema";
 import type { Bench, KioskCell, KioskTicket, Language } from "@/lib/kiosks/schema";
 import type { ClockEvent, EventBody } from "@/lib/ledger/schema";
@@ -16,11 +17,11 @@ export type Input =
   | { on: "touch" }
   | { on: "scan"; text: string }
   | { on: "cell"; cell: KioskCell }
-  | { on: "link"; connected: boolean }
+  | { on: "link"; is: Link["is"] }
   | { on: "enrolled"; device: Device }
   | { on: "enrol-refused"; says: "wrong" | "away" | "wait" }
   | { on: "signed-in"; session: BenchSession; bench: Bench | null }
-  | { on: "sign-in-refused"; worker: string; waitSeconds: number | null }
+  | { on: "sign-in-refused"; worker: string; says: "wrong" | "away"; waitSeconds: number | null }
   | { on: "bench"; worker: string; bench: Bench }
   | { on: "session-over"; worker: string }
   | { on: "ticket"; code: string; ticket: KioskTicket }

@@ -100,7 +100,7 @@ export type Screen =
       worker: string;
       reason: PinReason;
       digits: string;
-      says: "wrong" | null;
+      says: "wrong" | "away" | null;
       busy: boolean;
       waitUntilMs: number | null;
     }
@@ -136,7 +136,8 @@ export interface Visit {
 }
 
 export interface Link {
-  connected: boolean;
+  /** `unknown-device` asks for enrolment: the server does not know this tablet any more. */
+  is: "connected" | "away" | "unknown-device";
   /** Since when; epoch milliseconds. */
   sinceMs: number;
 }

@@ -31,7 +31,7 @@ import { atDone, notRecorded, recorded, settled, undoLast } from "@/lib/bench/fi
 import type { Input, Step, Tap } from "@/lib/bench/inputs";
 import { type Look, refuse, show, still, toDoor } from "@/lib/bench/moves";
 import { atCause, atCount, atPickItem, atScrap } from "@/lib/bench/report";
-import type { KioskState } from "@/lib/bench/schema";
+import type { KioskState, Link } from "@/lib/bench/schema";
 import { stayOf } from "@/lib/bench/time-out";
 import { readCode } from "@/lib/codes/read-code";
 import type { KioskCell } from "@/lib/kiosks/schema";
@@ -45,7 +45,7 @@ export const firstState: KioskState = {
   cell: null,
   tickets: {},
   language: null,
-  link: { connected: true, sinceMs: 0 },
+  link: { is: "connected", sinceMs: 0 },
   pending: [],
   sessions: {},
   benches: {},
@@ -75,7 +75,7 @@ export function step(before: KioskState, input: Input, nowMs: number, look: Look
     case "cell":
       return still(withCell(state, input.cell));
     case "link":
-      return still(withLink(state, input.connected));
+      return still(withLink(state, input.is));
     case "enrolled":
       return toDoor({ ...state, device: input.device });
     case "enrol-refused":
@@ -204,9 +204,8 @@ function withCell(state: KioskState, cell: KioskCell): KioskState {
   return { ...state, cell, tickets: { ...state.tickets, ...Object.fromEntries(told) } };
 }
 
-function withLink(state: KioskState, connected: boolean): KioskState {
-  if (state.link.connected === connected) return state;
-  return { ...state, link: { connected, sinceMs: state.nowMs } };
+function withLink(state: KioskState, is: Link["is"]): KioskState {
+  return state.link.is === is ? state : { ...state, link: { is, sinceMs: state.nowMs } };
 }
 
 function withMuted(state: KioskState, muted: boolean): KioskState {

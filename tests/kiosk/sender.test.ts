@@ -1,9 +1,10 @@
 import "fake-indexeddb/auto";
 import { beforeEach, describe, expect, test } from "vitest";
 import { type Outbox, openOutbox, type Settled } from "@/kiosk/outbox";
-import { type Link, type Sender, type SenderParts, startSender } from "@/kiosk/sender";
+import { type Sender, type SenderParts, startSender } from "@/kiosk/sender";
 import type { Answer } from "@/kiosk/server";
 import { openStore } from "@/kiosk/store";
+import type { Link } from "@/lib/bench/schema";
 import type { EventResult, EventResults } from "@/lib/kiosks/schema";
 import type { ClockEvent, EventBatch } from "@/lib/ledger/schema";
 import { draft, uuidOf } from "./records";
@@ -15,7 +16,7 @@ let files = 0;
 let sent: string[][];
 let waits: number[];
 let settled: Settled[];
-let links: Link[];
+let links: Link["is"][];
 
 beforeEach(async () => {
   files += 1;
