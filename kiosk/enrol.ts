@@ -11,8 +11,7 @@ export async function enrolHere(world: World, code: string): Promise<void> {
     const device = await keepEnrolment(world.store, answer.value);
     return world.send({ on: "enrolled", device });
   }
-  const says =
-    answer.came === "nothing" ? "away" : isThrottled(answer) ? "wait" : "wrong";
+  const says = answer.came === "nothing" ? "away" : isThrottled(answer) ? "wait" : "wrong";
   world.send({ on: "enrol-refused", says });
 }
 

@@ -22,11 +22,7 @@ export async function recordActs(
   }
 }
 
-function draftOf(
-  world: World,
-  body: EventBody,
-  who: { worker: string; session: string },
-): Draft {
+function draftOf(world: World, body: EventBody, who: { worker: string; session: string }): Draft {
   const { atMs, clock } = world.clock.stamp();
   const state = world.state();
   const weighed = state.link.is === "connected" ? body : withWeights(state, body);

@@ -57,7 +57,8 @@ async function openSealed(
   const person = cell?.people.find((each) => each.worker === worker);
   try {
     if (!device) throw new RangeError("openSealed: this tablet is not enrolled");
-    const { sealPin } = await import("@/kiosk/seal");
+    const { sealPin } = await import("@/lib/kiosks/seal-format");
+    const boundTo = { siteId: device.site.id, kioskId: device.deviceId, worker, session };
     const opened: BenchSession = {
       session,
       worker,
@@ -67,7 +68,7 @@ async function openSealed(
       openedMs: world.clock.nowMs(),
       endedMs: null,
       token: null,
-      sealed: await sealPin(device, { session, worker, pin }),
+      sealed: await sealPin(pin, device.sealKey, boundTo),
     };
     await keepSession(world.store, opened);
     world.send({ on: "signed-in", session: opened, bench: null });

@@ -18,6 +18,7 @@ export type Input =
   | { on: "scan"; text: string }
   | { on: "cell"; cell: KioskCell }
   | { on: "link"; is: Link["is"] }
+  | { on: "device"; device: Device }
   | { on: "enrolled"; device: Device }
   | { on: "enrol-refused"; says: "wrong" | "away" | "wait" }
   | { on: "signed-in"; session: BenchSession; bench: Bench | null }

@@ -76,6 +76,8 @@ export function step(before: KioskState, input: Input, nowMs: number, look: Look
       return still(withCell(state, input.cell));
     case "link":
       return still(withLink(state, input.is));
+    case "device":
+      return still({ ...state, device: input.device });
     case "enrolled":
       return toDoor({ ...state, device: input.device });
     case "enrol-refused":

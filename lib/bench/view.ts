@@ -1,26 +1,21 @@
-import type { ItemKey } from "@/lib/bench/schema";
+import { type ItemView, itemView } from "@/lib/bench/item-view";
+import type { ItemKey, KioskState } from "@/lib/bench/schema";
+import { weightsHere } from "@/lib/bench/weights";
 import type { Bench, DaySums } from "@/lib/kiosks/schema";
-import type { Activity } from "@/lib/ledger/schema";
-import type { CountedReport, Doing, Segment } from "@/lib/timeline/schema";
-
-/** A ticket operation on someone's bench with what the screen says of it. */
-export interface ItemView extends ItemKey {
-  /** The operation's name. */
-  name: string;
-  model: string;
-  options: readonly string[];
-  quantity: number;
-  open: number;
-  good: number;
-  /** Setup and run of all pieces that are or will be good; null without a standard. */
-  standardSeconds: number | null;
-  setupSeconds: number | null;
-  runSeconds: number | null;
-  /** All time ever booked to it by anyone, until now. */
-  actualSeconds: number;
-  /** The part of each second now that goes to it, 0 to 1. */
-  share: number;
-}
+import type { Activity, ClockEvent, EventBody } from "@/lib/ledger/schema";
+import { instantMs } from "@/lib/time/instant";
+import { dayBounds, productionDay } from "@/lib/time/site-day";
+import { sumWindow } from "@/lib/timeline/day-sums";
+import { fold } from "@/lib/timeline/fold";
+import type {
+  CountedReport,
+  Doing,
+  Folded,
+  LedgerEvent,
+  Segment,
+  Shift,
+  SiteRules,
+} from "@/lib/timeline/schema";
 
 /** What a worker's bench shows: the server's last word and the records kept here, folded as one. */
 export interface BenchView {
@@ -52,4 +47,156 @@ export interface BenchView {
   changes: Bench["changes"];
   looseEnds: Bench["looseEnds"];
   next: Bench["next"];
+}
+
+/** Until the cell is known: long enough for any shift, as the site itself will say. */
+const UNTOLD_RULES = {
+  productionDayStartsAtMinutes: 0,
+  shiftLimitSeconds: 14 * 3600,
+  sinceLimitSeconds: 1800,
+  restMaxSeconds: 1200,
+  mealMaxSeconds: 4500,
+  restBetweenShiftsSeconds: 39_600,
+};
+
+/**
+ * Folds what the server last said of a worker and what waits in this tablet into one bench, with
+ * the same fold as the server's: what is tapped shows at once, and stays as it is when answered.
+ */
+export function benchView(state: KioskState, worker: string): BenchView {
+  const bench = state.benches[worker];
+  const mine = state.pending.filter((event) => event.worker === worker);
+  const events = [...(bench?.events ?? []).map(fromServer), ...mine.map((e) => fromHere(state, e))];
+  const rules = [rulesHere(state)];
+  const planned = plannedOf(bench);
+  const facts = { rules, planned: planned ? [planned] : [], homeCell: null };
+  const folded = fold(events, facts, state.nowMs);
+  const shift = folded.shifts.findLast(({ end }) => end === null) ?? null;
+  const now = Math.floor(state.nowMs / 1000);
+  const day = dayBounds(productionDay(state.nowMs, rules), rules);
+  return {
+    isKnown: bench !== undefined || mine.length > 0,
+    shiftStart: shift?.start ?? null,
+    ...presentOf(state, worker, folded, shift),
+    activityEvent: shift && lastActivity(events, shift),
+    reports: shift ? folded.reports.filter(({ atMs }) => atMs >= shift.start * 1000) : [],
+    segments: folded.segments.filter(({ end }) => (end ?? now) > day.start),
+    today: sumWindow(folded.segments, day, now),
+    planned,
+    cautionsRead: shift ? cautionsRead(events, shift) : new Set(),
+    changes: bench?.changes ?? [],
+    looseEnds: bench?.looseEnds ?? [],
+    next: bench?.next ?? [],
+  };
+}
+
+type Present = Pick<BenchView, "doing" | "since" | "items" | "activity" | "resumes" | "previous">;
+
+/** What is done now, what lies on the bench, and what it would go back to. */
+function presentOf(
+  state: KioskState,
+  worker: string,
+  folded: Folded,
+  shift: Shift | null,
+): Present {
+  const segments = shift ? folded.segments.filter(({ start }) => start >= shift.start) : [];
+  const last = segments.at(-1);
+  const isBreak = last?.doing.kind === "meal" || last?.doing.kind === "rest";
+  const before = segments.findLast(({ doing }) => doing.kind !== "meal" && doing.kind !== "rest");
+  const resumes = isBreak ? (before?.doing ?? null) : null;
+  const lies = isBreak ? before?.doing : last?.doing;
+  const work = lies?.kind === "work" ? lies : null;
+  return {
+    doing: last?.doing ?? null,
+    since: last?.start ?? null,
+    items: work ? work.items.map((item) => itemView(state, worker, folded, work, item)) : [],
+    activity: work?.activity ?? null,
+    resumes,
+    previous: work ? null : previousWork(segments, folded.reports),
+  };
+}
+
+/** The last work of a shift without what was reported done since. */
+function previousWork(
+  segments: readonly Segment[],
+  reports: readonly CountedReport[],
+): BenchView["previous"] {
+  const last = segments.findLast(({ doing }) => doing.kind === "work");
+  if (last?.doing.kind !== "work") return null;
+  const items = last.doing.items.filter(
+    (item) =>
+      !reports.some(
+        (report) =>
+          report.stop &&
+          report.atMs >= last.start * 1000 &&
+          report.ticket === item.ticket &&
+          report.operation === item.operation,
+      ),
+  );
+  return items.length > 0 ? { activity: last.doing.activity, items } : null;
+}
+
+/** The latest work or other work that stands: what `reassign` moves. */
+function lastActivity(events: readonly LedgerEvent[], shift: Shift): string | null {
+  const gone = new Set(
+    events.flatMap(({ body }) =>
+      body.kind === "undo" || body.kind === "void" ? [body.event] : [],
+    ),
+  );
+  const stands = events
+    .filter(({ id, atMs }) => !gone.has(id) && atMs >= shift.start * 1000)
+    .filter(({ body }) => body.kind === "work" || body.kind === "indirect")
+    .toSorted((a, b) => a.atMs - b.atMs || a.seq - b.seq);
+  return stands.at(-1)?.id ?? null;
+}
+
+function cautionsRead(events: readonly LedgerEvent[], shift: Shift): Set<string> {
+  const read = events.filter(({ atMs }) => atMs >= shift.start * 1000);
+  return new Set(
+    read.flatMap(({ body }) =>
+      body.kind === "caution-read" ? [`${body.operation} ${body.version}`] : [],
+    ),
+  );
+}
+
+function rulesHere({ cell, device }: KioskState): SiteRules {
+  if (cell) return { fromMs: 0, ...cell.rules };
+  return { fromMs: 0, timeZone: device?.site.timeZone ?? "UTC", ...UNTOLD_RULES };
+}
+
+function plannedOf(bench: Bench | undefined): BenchView["planned"] {
+  const start = instantMs(bench?.planned?.start ?? "");
+  const end = instantMs(bench?.planned?.end ?? "");
+  return start !== null && end !== null ? { start: start / 1000, end: end / 1000 } : null;
+}
+
+function fromServer(event: Bench["events"][number]): LedgerEvent {
+  // safe because the server reads a body with the ledger's own schema before it sends it
+  return { ...event, body: event.body as EventBody };
+}
+
+function fromHere(state: KioskState, event: ClockEvent): LedgerEvent {
+  const items = "items" in event ? (event.items ?? []) : [];
+  return {
+    id: event.id,
+    atMs: instantMs(event.at) ?? state.nowMs,
+    seq: event.clock.seq,
+    kiosk: state.device?.deviceId ?? null,
+    session: event.session,
+    cell: state.cell?.cells[0] ?? state.device?.cell ?? null,
+    by: event.by ?? null,
+    receivedMs: null,
+    weights: weightsOf(state, items),
+    questions: [],
+    body: event,
+  };
+}
+
+function weightsOf(
+  state: KioskState,
+  items: readonly (ItemKey & { weight?: number | undefined })[],
+): number[] {
+  if (items.length === 0) return [];
+  const here = weightsHere(state, items);
+  return items.map(({ weight }, at) => weight ?? here[at] ?? 1);
 }

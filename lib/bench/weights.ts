@@ -14,7 +14,12 @@ export function weightsHere(state: KioskState, items: readonly ItemKey[]): numbe
       const { setupSeconds, runSeconds } = known ?? { setupSeconds: null, runSeconds: null };
       const standard = runSeconds === null ? null : { setupSeconds: setupSeconds ?? 0, runSeconds };
       const openPieces = known?.openQuantity ?? 0;
-      return { shareBy: "standard", standard, openPieces, setupEarned: known?.setupEarned ?? false };
+      return {
+        shareBy: "standard",
+        standard,
+        openPieces,
+        setupEarned: known?.setupEarned ?? false,
+      };
     }),
   );
 }
