@@ -43,6 +43,8 @@ export const iconPaths = {
   light: line("M10 4h12v5l-3 4v15h-6V13l-3-4z", "M10 9h12M16 17v3"),
   lead: line("M6 23h20l-3-4v-6a7 7 0 0 0-14 0v6zM13 27h6"),
   "rub-out": line("M11 6h18v20H11L3 16z", "M16 12l8 8M24 12l-8 8"),
+  sound: line("M4 12h5l8-7v22l-8-7H4z", "M22 11a7 7 0 0 1 0 10M25.5 7a12 12 0 0 1 0 18"),
+  "sound-off": line("M4 12h5l8-7v22l-8-7H4z", "M22 12l8 8M30 12l-8 8"),
 
   // what came of it
   good: line("M4 17l8 9L28 6"),

@@ -19,6 +19,8 @@ export function atDoor(state: KioskState, screen: At<"door">, tap: Tap): Step {
       return show(state, { ...screen, digits: digits.slice(0, -1), says: null });
     case "submit":
       return digits ? askPin(state, digits, { for: "enter" }) : still(state);
+    case "show-enrol":
+      return show(state, { at: "enrol", says: null, busy: false, isDone: false });
     case "language":
       return still({ ...state, language: tap.language });
     default:

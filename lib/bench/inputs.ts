@@ -33,6 +33,7 @@ export type Input =
   | Tap;
 
 export type Tap =
+  | { on: "show-enrol" }
   | { on: "enrol"; code: string }
   | { on: "digit"; digit: string }
   | { on: "rub-out" }

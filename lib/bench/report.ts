@@ -1,4 +1,5 @@
 import type { Step, Tap } from "@/lib/bench/inputs";
+import type { ItemView } from "@/lib/bench/item-view";
 import {
   isSameItem,
   keyOf,
@@ -18,7 +19,7 @@ import type {
   Purpose,
   Screen,
 } from "@/lib/bench/schema";
-import type { BenchView, ItemView } from "@/lib/bench/view";
+import type { BenchView } from "@/lib/bench/view";
 
 type At<K extends Screen["at"]> = Extract<Screen, { at: K }>;
 

@@ -93,7 +93,7 @@ export interface UndoOffer {
 
 export type Screen =
   | { at: "loading" }
-  | { at: "enrol"; says: "wrong" | "away" | "wait" | null; busy: boolean }
+  | { at: "enrol"; says: "wrong" | "away" | "wait" | null; busy: boolean; isDone: boolean }
   | { at: "door"; digits: string; says: "unread-badge" | "ticket-first" | null }
   | {
       at: "pin";

@@ -31,7 +31,7 @@ import { atDone, notRecorded, recorded, settled, undoLast } from "@/lib/bench/fi
 import type { Input, Step, Tap } from "@/lib/bench/inputs";
 import { type Look, refuse, show, still, toDoor } from "@/lib/bench/moves";
 import { atCause, atCount, atPickItem, atScrap } from "@/lib/bench/report";
-import type { KioskState, Link } from "@/lib/bench/schema";
+import type { Device, KioskState, Link } from "@/lib/bench/schema";
 import { stayOf } from "@/lib/bench/time-out";
 import { readCode } from "@/lib/codes/read-code";
 import type { KioskCell } from "@/lib/kiosks/schema";
@@ -79,9 +79,9 @@ export function step(before: KioskState, input: Input, nowMs: number, look: Look
     case "device":
       return still({ ...state, device: input.device });
     case "enrolled":
-      return toDoor({ ...state, device: input.device });
+      return enrolledAs(state, input.device);
     case "enrol-refused":
-      return refuse(state, { at: "enrol", says: input.says, busy: false });
+      return refuse(state, { at: "enrol", says: input.says, busy: false, isDone: false });
     case "signed-in":
       return signedIn(touched(state), input, look);
     case "sign-in-refused":
@@ -196,7 +196,7 @@ function started(state: KioskState, { known }: Extract<Input, { on: "started" }>
   const sessions = Object.fromEntries(known.sessions.map((each) => [each.worker, each]));
   const { device, cell, benches, pending } = known;
   const next: KioskState = { ...state, device, benches, pending, sessions };
-  if (!device) return show(next, { at: "enrol", says: null, busy: false });
+  if (!device) return show(next, { at: "enrol", says: null, busy: false, isDone: false });
   return toDoor(cell ? withCell(next, cell) : next);
 }
 
@@ -208,6 +208,12 @@ function withCell(state: KioskState, cell: KioskCell): KioskState {
 
 function withLink(state: KioskState, is: Link["is"]): KioskState {
   return state.link.is === is ? state : { ...state, link: { is, sinceMs: state.nowMs } };
+}
+
+/** This browser is a kiosk from now on, of this cell: the page begins anew with that. */
+function enrolledAs(state: KioskState, device: Device): Step {
+  const next: KioskState = { ...state, device, cell: null, tickets: {} };
+  return show(next, { at: "enrol", says: null, busy: false, isDone: true });
 }
 
 function withMuted(state: KioskState, muted: boolean): KioskState {

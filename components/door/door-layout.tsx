@@ -1,0 +1,94 @@
+"use client";
+
+import type { ReactNode } from "react";
+import { useLocale, useTimeZone, useTranslations } from "use-intl";
+import { type Seen, useClock } from "@/components/bench/seen";
+import { UndoBar } from "@/components/bench/undo-bar";
+import { LinkTag, SignOutSeam } from "@/components/shell/kiosk-frame";
+import { Mark } from "@/components/shell/mark";
+import { Icon } from "@/components/ui/icon";
+import { PageGrain } from "@/components/ui/page-grain";
+
+/** The door's two leaves: the site, its clock and the badge left, a number pad right. */
+export function DoorLayout({
+  state,
+  tap,
+  ask,
+  slots,
+  foot,
+  pad,
+}: Seen & { ask: ReactNode; slots: ReactNode; foot: ReactNode; pad: ReactNode }) {
+  const t = useTranslations("door");
+  return (
+    <div className="kiosk leaves" style={{ gridTemplateRows: "minmax(0, 1fr)" }}>
+      <PageGrain />
+      <SignOutSeam state={state} />
+      <Mark className="on-seam door-mark" />
+      <main className="door">
+        <p className="door-place">
+          <b className="block truncate text-k-2">{state.device?.site.name}</b>
+          <span className="block truncate text-ink-2">{state.device?.name}</span>
+        </p>
+        <div className="door-link">
+          <LinkTag state={state} />
+          <MuteButton state={state} tap={tap} />
+        </div>
+        <DoorClock state={state} />
+        <p className="door-badge">
+          <span className="ml-auto max-w-[300px]">{t("badge")}</span>
+          <Icon name="badge" />
+        </p>
+        <div className="door-ask">
+          <h1 aria-live="polite" className="text-k-4 font-bold leading-[1.08]">
+            {ask}
+          </h1>
+          {slots}
+        </div>
+        <div className="door-pad grid">{pad}</div>
+        <div className="door-foot">{foot}</div>
+      </main>
+      <div className="absolute inset-x-8 top-2 z-10 portrait:inset-x-6">
+        <UndoBar state={state} tap={tap} className="w-full" />
+      </div>
+    </div>
+  );
+}
+
+function DoorClock({ state }: Pick<Seen, "state">) {
+  const clock = useClock();
+  const language = useLocale();
+  const zone = useTimeZone() ?? "UTC";
+  const [hours, minutes] = clock(state.nowMs).split(":");
+  const day = new Intl.DateTimeFormat(language, {
+    timeZone: zone,
+    weekday: "long",
+    day: "numeric",
+    month: "long",
+  });
+  return (
+    <p className="door-time">
+      <b>
+        <span>{hours}</span>
+        <i>:</i>
+        <span>{minutes}</span>
+      </b>
+      <span>{day.format(state.nowMs)}</span>
+    </p>
+  );
+}
+
+function MuteButton({ state, tap }: Seen) {
+  const t = useTranslations("frame");
+  const muted = state.device?.muted ?? false;
+  return (
+    <button
+      type="button"
+      data-minor=""
+      aria-label={muted ? t("unmute") : t("mute")}
+      onClick={() => tap({ on: "mute", muted: !muted })}
+      className="-mt-5 -mr-5 grid size-touch-min flex-none place-items-center text-ink-2"
+    >
+      <Icon name={muted ? "sound-off" : "sound"} className="size-9" />
+    </button>
+  );
+}
