@@ -5,7 +5,7 @@ import { recordActs } from "@/kiosk/record";
 import { closeSessions, fetchBench, signIn } from "@/kiosk/sign-in";
 import { play } from "@/kiosk/sound";
 import type { World } from "@/kiosk/world";
-import type { Effect } from "@/lib/bench/inputs";
+import type { Effect } from "@/lib/taps/inputs";
 
 /** Does in the world what the reducer asks for; the answer comes back as an input. */
 export async function carryOut(world: World, effect: Effect): Promise<void> {

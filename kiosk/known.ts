@@ -3,8 +3,8 @@ import { findDevice } from "@/kiosk/device";
 import type { Settled } from "@/kiosk/outbox";
 import { listOpenSessions } from "@/kiosk/sessions";
 import type { World } from "@/kiosk/world";
-import type { Known } from "@/lib/bench/inputs";
 import type { Bench } from "@/lib/kiosks/schema";
+import type { Known } from "@/lib/taps/inputs";
 
 /** Reads all that this browser kept, for the start of the page. */
 export async function readKnown(world: World): Promise<Known> {

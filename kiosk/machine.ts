@@ -8,12 +8,12 @@ import { ask } from "@/kiosk/server";
 import { sealedSessions } from "@/kiosk/sessions";
 import { openStore } from "@/kiosk/store";
 import type { World } from "@/kiosk/world";
-import type { Input } from "@/lib/bench/inputs";
 import type { KioskState } from "@/lib/bench/schema";
-import { firstState, step } from "@/lib/bench/step";
 import { stayOf } from "@/lib/bench/time-out";
 import { benchView } from "@/lib/bench/view";
 import { eventResults } from "@/lib/kiosks/schema";
+import type { Input } from "@/lib/taps/inputs";
+import { firstState, step } from "@/lib/taps/step";
 
 /** The seams of a running kiosk: the browser's own, or a test's. */
 export interface MachineParts {

@@ -1,8 +1,8 @@
 import type { Draft } from "@/kiosk/outbox";
 import type { World } from "@/kiosk/world";
-import type { Effect } from "@/lib/bench/inputs";
 import { withWeights } from "@/lib/bench/weights";
 import type { EventBody } from "@/lib/ledger/schema";
+import type { Effect } from "@/lib/taps/inputs";
 
 /**
  * Writes acts down: all of them are on this tablet's disk, or none is and the screen says so. Only

@@ -3,9 +3,9 @@
 import { useCallback, useEffect, useState, useSyncExternalStore } from "react";
 import { v7 } from "uuid";
 import { type Machine, runKiosk } from "@/kiosk/machine";
-import type { Input } from "@/lib/bench/inputs";
 import type { KioskState } from "@/lib/bench/schema";
-import { firstState } from "@/lib/bench/step";
+import type { Input } from "@/lib/taps/inputs";
+import { firstState } from "@/lib/taps/step";
 
 /** Runs the kiosk for as long as the page is open, and draws the screen anew when it changes. */
 export function useKiosk(): { state: KioskState; send: (input: Input) => void } {

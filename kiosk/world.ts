@@ -1,8 +1,8 @@
 import type { KioskClock } from "@/kiosk/clock";
 import type { Outbox } from "@/kiosk/outbox";
 import type { Store } from "@/kiosk/store";
-import type { Input } from "@/lib/bench/inputs";
 import type { KioskState } from "@/lib/bench/schema";
+import type { Input } from "@/lib/taps/inputs";
 
 /** What the kiosk's parts share: its storage, its clock, the network, and the reducer's ear. */
 export interface World {

@@ -1,7 +1,7 @@
 import { useTimeZone } from "use-intl";
-import type { Tap } from "@/lib/bench/inputs";
 import type { KioskState } from "@/lib/bench/schema";
 import type { BenchView } from "@/lib/bench/view";
+import type { Tap } from "@/lib/taps/inputs";
 import { clockText } from "@/lib/time/format";
 
 /** What every screen of the kiosk is drawn from, and how it answers. */

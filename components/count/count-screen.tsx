@@ -11,9 +11,9 @@ import { KioskFrame } from "@/components/shell/kiosk-frame";
 import { Icon } from "@/components/ui/icon";
 import { Keypad } from "@/components/ui/keypad";
 import { Plate } from "@/components/ui/plate";
-import { isSameItem } from "@/lib/bench/moves";
 import type { Screen } from "@/lib/bench/schema";
 import { actualMinutes, standardMinutes } from "@/lib/seam/verdict";
+import { isSameItem } from "@/lib/taps/moves";
 
 type CountState = Extract<Screen, { at: "count" }>;
 

@@ -7,9 +7,9 @@ import { modelName } from "@/components/bench/words";
 import { Pages } from "@/components/choose/pages";
 import { KioskFrame } from "@/components/shell/kiosk-frame";
 import { Plate } from "@/components/ui/plate";
-import { keyOf } from "@/lib/bench/moves";
 import type { Screen } from "@/lib/bench/schema";
 import { showTicket } from "@/lib/codes/ticket-code";
+import { keyOf } from "@/lib/taps/moves";
 
 /** Of several tickets on the bench, which one? */
 export function PickItemScreen({

@@ -1,7 +1,7 @@
-import { isSameItem } from "@/lib/bench/moves";
 import { findOperation } from "@/lib/bench/offers";
 import type { ItemKey, KioskState } from "@/lib/bench/schema";
 import { sum } from "@/lib/sum";
+import { isSameItem } from "@/lib/taps/moves";
 import { instantMs } from "@/lib/time/instant";
 import { shareOf } from "@/lib/timeline/day-sums";
 import type { Doing, Folded, WorkItem } from "@/lib/timeline/schema";

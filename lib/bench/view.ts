@@ -1,3 +1,4 @@
+import { type Effective, effectiveEvents } from "@/lib/acts/effective";
 import { type ItemView, itemView } from "@/lib/bench/item-view";
 import type { ItemKey, KioskState } from "@/lib/bench/schema";
 import { weightsHere } from "@/lib/bench/weights";
@@ -15,6 +16,7 @@ import type {
   Segment,
   Shift,
   SiteRules,
+  Standing,
 } from "@/lib/timeline/schema";
 
 /** What a worker's bench shows: the server's last word and the records kept here, folded as one. */
@@ -71,48 +73,60 @@ export function benchView(state: KioskState, worker: string): BenchView {
   const planned = plannedOf(bench);
   const facts = { rules, planned: planned ? [planned] : [], homeCell: null };
   const folded = fold(events, facts, state.nowMs);
-  const shift = folded.shifts.findLast(({ end }) => end === null) ?? null;
+  const { standing } = folded;
+  const effective = effectiveEvents(events);
   const now = Math.floor(state.nowMs / 1000);
   const day = dayBounds(productionDay(state.nowMs, rules), rules);
   return {
     isKnown: bench !== undefined || mine.length > 0,
-    shiftStart: shift?.start ?? null,
-    ...presentOf(state, worker, folded, shift),
-    activityEvent: shift && lastActivity(events, shift),
-    reports: shift ? folded.reports.filter(({ atMs }) => atMs >= shift.start * 1000) : [],
+    ...(standing ? presentOf(state, worker, folded, standing) : NOT_IN),
+    activityEvent: standing && activityOf(effective, standing),
+    reports: standing
+      ? folded.reports.filter(({ atMs }) => atMs >= standing.shift.start * 1000)
+      : [],
     segments: folded.segments.filter(({ end }) => (end ?? now) > day.start),
     today: sumWindow(folded.segments, day, now),
     planned,
-    cautionsRead: shift ? cautionsRead(events, shift) : new Set(),
+    cautionsRead: standing ? cautionsRead(effective, standing.shift) : new Set(),
     changes: bench?.changes ?? [],
     looseEnds: bench?.looseEnds ?? [],
     next: bench?.next ?? [],
   };
 }
 
-type Present = Pick<BenchView, "doing" | "since" | "items" | "activity" | "resumes" | "previous">;
+type Present = Pick<
+  BenchView,
+  "shiftStart" | "doing" | "since" | "items" | "activity" | "resumes" | "previous"
+>;
+
+/** Outside a shift. */
+const NOT_IN: Present = {
+  shiftStart: null,
+  doing: null,
+  since: null,
+  items: [],
+  activity: null,
+  resumes: null,
+  previous: null,
+};
 
 /** What is done now, what lies on the bench, and what it would go back to. */
 function presentOf(
   state: KioskState,
   worker: string,
   folded: Folded,
-  shift: Shift | null,
+  { shift, doing, since, break: pause }: Standing,
 ): Present {
-  const segments = shift ? folded.segments.filter(({ start }) => start >= shift.start) : [];
-  const last = segments.at(-1);
-  const isBreak = last?.doing.kind === "meal" || last?.doing.kind === "rest";
-  const before = segments.findLast(({ doing }) => doing.kind !== "meal" && doing.kind !== "rest");
-  const resumes = isBreak ? (before?.doing ?? null) : null;
-  const lies = isBreak ? before?.doing : last?.doing;
-  const work = lies?.kind === "work" ? lies : null;
+  const work = doing.kind === "work" ? doing : null;
+  const inShift = folded.segments.filter(({ start }) => start >= shift.start);
   return {
-    doing: last?.doing ?? null,
-    since: last?.start ?? null,
+    shiftStart: shift.start,
+    doing: pause ? { kind: pause.kind } : doing,
+    since: pause?.since ?? since,
     items: work ? work.items.map((item) => itemView(state, worker, folded, work, item)) : [],
     activity: work?.activity ?? null,
-    resumes,
-    previous: work ? null : previousWork(segments, folded.reports),
+    resumes: pause ? doing : null,
+    previous: work ? null : previousWork(inShift, folded.reports),
   };
 }
 
@@ -136,22 +150,16 @@ function previousWork(
   return items.length > 0 ? { activity: last.doing.activity, items } : null;
 }
 
-/** The latest work or other work that stands: what `reassign` moves. */
-function lastActivity(events: readonly LedgerEvent[], shift: Shift): string | null {
-  const gone = new Set(
-    events.flatMap(({ body }) =>
-      body.kind === "undo" || body.kind === "void" ? [body.event] : [],
-    ),
-  );
-  const stands = events
-    .filter(({ id, atMs }) => !gone.has(id) && atMs >= shift.start * 1000)
-    .filter(({ body }) => body.kind === "work" || body.kind === "indirect")
-    .toSorted((a, b) => a.atMs - b.atMs || a.seq - b.seq);
-  return stands.at(-1)?.id ?? null;
+/** The present activity, or the last one of the shift: what `reassign` moves. */
+function activityOf({ acts }: Effective, { doing, event, shift }: Standing): string | null {
+  if (doing.kind !== "unassigned") return event;
+  const inShift = acts.filter(({ atMs }) => atMs >= shift.start * 1000);
+  const last = inShift.findLast(({ body }) => body.kind === "work" || body.kind === "indirect");
+  return last?.id ?? null;
 }
 
-function cautionsRead(events: readonly LedgerEvent[], shift: Shift): Set<string> {
-  const read = events.filter(({ atMs }) => atMs >= shift.start * 1000);
+function cautionsRead({ standing }: Effective, shift: Shift): Set<string> {
+  const read = standing.filter(({ atMs }) => atMs >= shift.start * 1000);
   return new Set(
     read.flatMap(({ body }) =>
       body.kind === "caution-read" ? [`${body.operation} ${body.version}`] : [],

@@ -1,5 +1,10 @@
 import { cautionVersion } from "@/lib/bench/cautions";
-import type { Input, Step, Tap } from "@/lib/bench/inputs";
+import { findOperation, mayGoAhead, offersOf, onlyWay, refusalOf } from "@/lib/bench/offers";
+import type { Choice, KioskState, Purpose, Screen } from "@/lib/bench/schema";
+import type { BenchView } from "@/lib/bench/view";
+import { nearestKnown } from "@/lib/codes/near-misses";
+import { readCode } from "@/lib/codes/read-code";
+import type { Input, Step, Tap } from "@/lib/taps/inputs";
 import {
   isSameItem,
   keyOf,
@@ -9,12 +14,7 @@ import {
   show,
   still,
   toBench,
-} from "@/lib/bench/moves";
-import { findOperation, mayGoAhead, offersOf, onlyWay, refusalOf } from "@/lib/bench/offers";
-import type { Choice, KioskState, Purpose, Screen } from "@/lib/bench/schema";
-import type { BenchView } from "@/lib/bench/view";
-import { nearestKnown } from "@/lib/codes/near-misses";
-import { readCode } from "@/lib/codes/read-code";
+} from "@/lib/taps/moves";
 
 type At<K extends Screen["at"]> = Extract<Screen, { at: K }>;
 

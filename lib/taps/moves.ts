@@ -1,7 +1,7 @@
-import type { Effect, Step } from "@/lib/bench/inputs";
 import type { Deed, ItemKey, KioskState, Screen } from "@/lib/bench/schema";
 import type { BenchView } from "@/lib/bench/view";
 import type { EventBody } from "@/lib/ledger/schema";
+import type { Effect, Step } from "@/lib/taps/inputs";
 
 /** How the reducer sees a worker's bench: `benchView`, or a plain value in a test. */
 export type Look = (state: KioskState, worker: string) => BenchView;

@@ -1,10 +1,10 @@
-import { askTicket } from "@/lib/bench/choose";
-import { askPin } from "@/lib/bench/enter";
-import type { Step, Tap } from "@/lib/bench/inputs";
-import { keyOf, type Look, record, show, still, toBench, toDoor } from "@/lib/bench/moves";
-import { askCount, reassignment } from "@/lib/bench/report";
 import type { ItemKey, KioskState, Screen } from "@/lib/bench/schema";
 import type { BenchView } from "@/lib/bench/view";
+import { askTicket } from "@/lib/taps/choose";
+import { askPin } from "@/lib/taps/enter";
+import type { Step, Tap } from "@/lib/taps/inputs";
+import { keyOf, type Look, record, show, still, toBench, toDoor } from "@/lib/taps/moves";
+import { askCount, reassignment } from "@/lib/taps/report";
 
 type At<K extends Screen["at"]> = Extract<Screen, { at: K }>;
 

@@ -1,6 +1,6 @@
-import type { Input, Step, Tap } from "@/lib/bench/inputs";
-import { type Look, record, refuse, show, still, toBench, toDoor } from "@/lib/bench/moves";
 import type { KioskState, PinReason, Screen } from "@/lib/bench/schema";
+import type { Input, Step, Tap } from "@/lib/taps/inputs";
+import { type Look, record, refuse, show, still, toBench, toDoor } from "@/lib/taps/moves";
 
 const NUMBER_DIGITS_MAX = 8;
 /** PINs are six digits (LEDGER.md 9): the sixth hands it in, which saves forty people a touch. */

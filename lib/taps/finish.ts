@@ -1,7 +1,7 @@
-import { askTicket } from "@/lib/bench/choose";
-import type { Effect, Input, Step, Tap } from "@/lib/bench/inputs";
-import { type Look, recordAs, show, still, toBench, toDoor } from "@/lib/bench/moves";
 import type { Deed, KioskState, Saving, Screen, UndoOffer } from "@/lib/bench/schema";
+import { askTicket } from "@/lib/taps/choose";
+import type { Effect, Input, Step, Tap } from "@/lib/taps/inputs";
+import { type Look, recordAs, show, still, toBench, toDoor } from "@/lib/taps/moves";
 
 type At<K extends Screen["at"]> = Extract<Screen, { at: K }>;
 

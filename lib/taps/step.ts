@@ -1,3 +1,7 @@
+import type { Device, KioskState, Link } from "@/lib/bench/schema";
+import { stayOf } from "@/lib/bench/time-out";
+import { readCode } from "@/lib/codes/read-code";
+import type { KioskCell } from "@/lib/kiosks/schema";
 import {
   askReassign,
   atBench,
@@ -6,7 +10,7 @@ import {
   atHours,
   atOtherWork,
   atPickReport,
-} from "@/lib/bench/acts";
+} from "@/lib/taps/acts";
 import {
   atCaution,
   atOffer,
@@ -16,7 +20,7 @@ import {
   readTicket,
   ticketFound,
   ticketMissing,
-} from "@/lib/bench/choose";
+} from "@/lib/taps/choose";
 import {
   askPin,
   atDoor,
@@ -26,15 +30,11 @@ import {
   showBadge,
   signedIn,
   signInRefused,
-} from "@/lib/bench/enter";
-import { atDone, notRecorded, recorded, settled, undoLast } from "@/lib/bench/finish";
-import type { Input, Step, Tap } from "@/lib/bench/inputs";
-import { type Look, refuse, show, still, toDoor } from "@/lib/bench/moves";
-import { atCause, atCount, atPickItem, atScrap } from "@/lib/bench/report";
-import type { Device, KioskState, Link } from "@/lib/bench/schema";
-import { stayOf } from "@/lib/bench/time-out";
-import { readCode } from "@/lib/codes/read-code";
-import type { KioskCell } from "@/lib/kiosks/schema";
+} from "@/lib/taps/enter";
+import { atDone, notRecorded, recorded, settled, undoLast } from "@/lib/taps/finish";
+import type { Input, Step, Tap } from "@/lib/taps/inputs";
+import { type Look, refuse, show, still, toDoor } from "@/lib/taps/moves";
+import { atCause, atCount, atPickItem, atScrap } from "@/lib/taps/report";
 
 /** A kiosk before it knows anything. */
 export const firstState: KioskState = {

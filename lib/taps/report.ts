@@ -1,15 +1,4 @@
-import type { Step, Tap } from "@/lib/bench/inputs";
 import type { ItemView } from "@/lib/bench/item-view";
-import {
-  isSameItem,
-  keyOf,
-  type Look,
-  record,
-  refuse,
-  show,
-  still,
-  toBench,
-} from "@/lib/bench/moves";
 import type {
   CountField,
   Counts,
@@ -20,6 +9,17 @@ import type {
   Screen,
 } from "@/lib/bench/schema";
 import type { BenchView } from "@/lib/bench/view";
+import type { Step, Tap } from "@/lib/taps/inputs";
+import {
+  isSameItem,
+  keyOf,
+  type Look,
+  record,
+  refuse,
+  show,
+  still,
+  toBench,
+} from "@/lib/taps/moves";
 
 type At<K extends Screen["at"]> = Extract<Screen, { at: K }>;
 
