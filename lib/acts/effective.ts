@@ -24,10 +24,14 @@ export interface Effective {
  * act back, and the last move and the last reassignment both hold, as one says when and one what.
  *
  * @param events of one worker, in any order; an id that comes twice counts once
+ * @param refused ids of reassignments that do not hold: they correct nothing
  */
-export function effectiveEvents(events: readonly LedgerEvent[]): Effective {
+export function effectiveEvents(
+  events: readonly LedgerEvent[],
+  refused: readonly string[] = [],
+): Effective {
   const ordered = inOrder([...new Map(events.map((event) => [event.id, event])).values()]);
-  const about = correctionsByTarget(ordered);
+  const about = correctionsByTarget(ordered.filter(({ id }) => !refused.includes(id)));
   const byId = new Map(ordered.map((event) => [event.id, event]));
   const stands = standingCheck(about, byId);
   const standing = ordered.filter(stands);

@@ -12,8 +12,10 @@ interface Change {
 /** What the reassignments of a worker come to. */
 export interface Reassigned {
   acts: readonly Act[];
-  /** Ids of those that cannot be carried out, or not with their counts: a lead must look. */
-  questions: readonly string[];
+  /** Ids of those that cannot be carried out: they change nothing. */
+  refused: readonly string[];
+  /** Ids of those whose counts could not follow. */
+  incomplete: readonly string[];
 }
 
 /**
@@ -26,7 +28,8 @@ export interface Reassigned {
  * @param shiftOf the shift in which each act lies, by the ids of the act and of the shift's start
  */
 export function reassigned(acts: readonly Act[], shiftOf: ReadonlyMap<string, string>): Reassigned {
-  const questions: string[] = [];
+  const refused: string[] = [];
+  const incomplete: string[] = [];
   let current = acts;
   for (const act of acts) {
     if (act.body.kind !== "reassign") continue;
@@ -35,7 +38,7 @@ export function reassigned(acts: readonly Act[], shiftOf: ReadonlyMap<string, st
     const until = current.findIndex(({ id }) => id === act.id);
     const change = isOpenTo(current, { target, until }, shiftOf) && changeOf(current[target]!, act);
     if (!change) {
-      questions.push(act.id);
+      refused.push(act.id);
       continue;
     }
     const { followers, isWhole } = follow(current.slice(target + 1, until), change);
@@ -47,9 +50,9 @@ export function reassigned(acts: readonly Act[], shiftOf: ReadonlyMap<string, st
       cell: act.cell ?? current[target]!.cell,
     };
     current = [...current.slice(0, target), moved, ...followers, ...current.slice(until)];
-    if (!isWhole) questions.push(act.id);
+    if (!isWhole) incomplete.push(act.id);
   }
-  return { acts: current, questions };
+  return { acts: current, refused, incomplete };
 }
 
 /** Says whether the target is the current activity of the same shift, or the last one before it. */

@@ -19,26 +19,43 @@ import { walk } from "@/lib/timeline/walk";
  * @returns segments, shifts and reports in order of time, loose ends by time and key
  */
 export function fold(events: readonly LedgerEvent[], facts: FoldFacts, asOfMs: number): Folded {
-  const { acts, standing, lateUndos } = effectiveEvents(events);
-  const settlements = settlementsOf(standing);
-  const way = { facts, settlements, asOfMs };
-  const told = withToldEnds(acts, settlements, facts);
-  const before = walk(told, way);
-  // Reassignments change what time is booked to, never when shifts begin and end.
-  const changed = reassigned(told, before.shiftOf);
-  const walked = changed.acts === told ? before : walk(changed.acts, way);
+  const { walked, acts, effective, settlements, unclear } = carryOut(events, facts, asOfMs);
+  const { standing, lateUndos } = effective;
   return {
     segments: walked.segments,
     shifts: walked.shifts,
-    reports: changed.acts.flatMap((act) => countedReport(act) ?? []),
-    looseEnds: gatherEnds({
-      found: walked.looseEnds,
-      standing,
-      lateUndos,
-      unclear: standing.filter(({ id }) => changed.questions.includes(id)),
-      settlements,
-    }),
+    reports: acts.flatMap((act) => countedReport(act) ?? []),
+    looseEnds: gatherEnds({ found: walked.looseEnds, standing, lateUndos, unclear, settlements }),
     standing: walked.standing,
+  };
+}
+
+/**
+ * Carries out the corrections and walks. Where a shift ends decides whether a reassignment holds,
+ * and none moves a shift's ends; so a first walk finds them. One that does not hold stands back and
+ * corrects nothing: what it would have overruled counts again.
+ */
+function carryOut(
+  events: readonly LedgerEvent[],
+  facts: FoldFacts,
+  asOfMs: number,
+  refused: readonly string[] = [],
+) {
+  const effective = effectiveEvents(events, refused);
+  const settlements = settlementsOf(effective.standing);
+  const way = { facts, settlements, asOfMs };
+  const told = withToldEnds(effective.acts, settlements, facts);
+  const before = walk(told, way);
+  const changed = reassigned(told, before.shiftOf);
+  if (changed.refused.length > 0)
+    return carryOut(events, facts, asOfMs, [...refused, ...changed.refused]);
+  const unclear = [...refused, ...changed.incomplete];
+  return {
+    walked: changed.acts === told ? before : walk(changed.acts, way),
+    acts: changed.acts,
+    effective,
+    settlements,
+    unclear: effective.standing.filter(({ id }) => unclear.includes(id)),
   };
 }
 

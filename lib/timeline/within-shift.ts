@@ -139,13 +139,13 @@ function isElsewhere(shift: OpenShift, act: Act, at: number): boolean {
   );
 }
 
-/** The items of an act, each once, with the weights that were booked with it. */
+/** The items of an act, each once, with the weights booked with it; equal where none were. */
 function workItems(items: readonly Item[], weights: readonly number[]): WorkItem[] {
   return items
     .map(({ ticket, operation, weight }, index) => ({
       ticket,
       operation,
-      weight: weights[index] ?? weight ?? 0,
+      weight: weights[index] ?? weight ?? 1,
     }))
     .filter((item, index, all) => all.findIndex((one) => isSameItem(one, item)) === index);
 }

@@ -1,5 +1,6 @@
 import type { Doing, Folded } from "@/lib/timeline/schema";
 import { timeText } from "./clock";
+import { letterOf } from "./tickets";
 
 /** Writes a fold in the notation of the scenario tables. */
 export function foldedRows(
@@ -40,7 +41,8 @@ function doingText(doing: Doing): string {
 }
 
 function itemText({ ticket, operation }: { ticket: string; operation: string }): string {
-  return operation === "120" ? ticket : `${ticket}/${operation}`;
+  const letter = letterOf(ticket);
+  return operation === "120" ? letter : `${letter}/${operation}`;
 }
 
 function weightText(weight: number): string {

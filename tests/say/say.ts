@@ -4,6 +4,7 @@ import type { Folded, FoldFacts, LedgerEvent, SiteRules } from "@/lib/timeline/s
 import { eventId, foldFacts, makeEvent, siteRules } from "../make/events";
 import { takeTime } from "./clock";
 import { foldedRows } from "./rows";
+import { ticketOf } from "./tickets";
 
 /** A scenario read from its table. */
 export interface Said {
@@ -208,7 +209,7 @@ function item(word: string): Item {
 
 function bare(word: string): { ticket: string; operation: string } {
   const [ticket, operation = "120"] = word.split("/");
-  return { ticket: ticket!, operation };
+  return { ticket: ticketOf(ticket!), operation };
 }
 
 function counts([name, good = "0", rework = "0", scrap = "0"]: string[]) {
