@@ -18,13 +18,17 @@ export function OfficeHead({
 }) {
   return (
     <header className="desk-head">
-      <p className="desk-site">{site}</p>
-      <OfficeNav label="Known beforehand" rooms={rooms.filter(({ leaf }) => leaf === "book")} />
+      <div className="desk-leaf">
+        <p className="desk-site">{site}</p>
+        <OfficeNav label="Known beforehand" rooms={rooms.filter(({ leaf }) => leaf === "book")} />
+      </div>
       <a href="/" className="desk-word">
-        <Wordmark className="mx-auto h-[23px]" />
+        <Wordmark className="h-[23px]" />
       </a>
-      <OfficeNav label="Happening" rooms={rooms.filter(({ leaf }) => leaf === "day")} />
-      {menu}
+      <div className="desk-leaf">
+        <OfficeNav label="Happening" rooms={rooms.filter(({ leaf }) => leaf === "day")} />
+        {menu}
+      </div>
     </header>
   );
 }

@@ -13,21 +13,22 @@ export function OfficeMenu({
   signOut: ReactNode;
 }) {
   return (
-    <details className="desk-menu">
-      <summary>
-        <span className="desk-who">
+    <div className="desk-menu">
+      <button type="button" popoverTarget="desk-menu" className="desk-who">
+        <span>
           {name}
           {roles && <span className="text-ink-2">, {roles}</span>}
         </span>
         <Icon name="down" />
-      </summary>
-      <div className="desk-menu-leaf">
+      </button>
+      <div id="desk-menu" popover="auto" className="desk-menu-leaf">
+        <p className="font-[650]">{name}</p>
         <ThemeSwitch />
         <a href="/account" className="button">
           Your password
         </a>
         {signOut}
       </div>
-    </details>
+    </div>
   );
 }
