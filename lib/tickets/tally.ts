@@ -1,0 +1,90 @@
+import { sum } from "@/lib/sum";
+import type { CountedReport } from "@/lib/timeline/schema";
+
+/** What the reports of one ticket operation come to. */
+export interface Tally {
+  /** Pieces that it has to do: the lot less what earlier operations lost. */
+  quantity: number;
+  /** Pieces still to be made good; rework is among them. */
+  openQuantity: number;
+  good: number;
+  /** Pieces ever reported as rework. */
+  rework: number;
+  scrap: number;
+  /** Whether the setup standard is earned: with the first good piece, or the first one inspected. */
+  setupEarned: boolean;
+  /** The instant of the report that brought the open pieces to none; epoch milliseconds. */
+  finishedMs: number | null;
+}
+
+/** What all reports of a ticket come to. */
+export interface TicketTally {
+  /** One per operation of the routing, in its order. */
+  operations: Tally[];
+  /** When the last piece of the lot was lost; null while there is one. */
+  scrappedMs: number | null;
+  /** Reports that count more than there is, each once: their events. */
+  overCounts: string[];
+}
+
+/**
+ * Counts a ticket's reports through its routing (LEDGER.md 5). Counts are deltas. An operation is
+ * finished at the report that brings its open pieces to none, be it its own or an earlier
+ * operation's scrap; what is counted beyond the lot is kept.
+ *
+ * @param routing codes of the operations, in order
+ * @param reports in order of time; those of operations that are not in the routing are left out
+ */
+export function tally(
+  { quantity: lot, routing }: { quantity: number; routing: readonly string[] },
+  reports: readonly CountedReport[],
+): TicketTally {
+  const operations = routing.map(() => emptyTally(lot));
+  const result: TicketTally = { operations, scrappedMs: null, overCounts: [] };
+  for (const report of reports) {
+    const counted = operations[routing.indexOf(report.operation)];
+    if (!counted) continue;
+    const before = sum(operations.map(excess));
+    add(counted, report);
+    flow(operations, lot, report.atMs);
+    if (sum(operations.map(excess)) > before) result.overCounts.push(report.event);
+    const lost = sum(operations.map(({ scrap }) => scrap));
+    if (lost >= lot) result.scrappedMs ??= report.atMs;
+  }
+  return result;
+}
+
+function emptyTally(lot: number): Tally {
+  return {
+    quantity: lot,
+    openQuantity: lot,
+    good: 0,
+    rework: 0,
+    scrap: 0,
+    setupEarned: false,
+    finishedMs: null,
+  };
+}
+
+function add(counted: Tally, { kind, good, rework, scrap }: CountedReport): void {
+  counted.good += good;
+  counted.rework += rework;
+  counted.scrap += scrap;
+  const seen = kind === "inspect" ? good + rework + scrap : good;
+  counted.setupEarned ||= seen > 0;
+}
+
+/** Lets what earlier operations lost flow down the routing, and finishes what has nothing left. */
+function flow(operations: Tally[], lot: number, atMs: number): void {
+  let quantity = lot;
+  for (const one of operations) {
+    one.quantity = quantity;
+    one.openQuantity = Math.max(0, quantity - one.good - one.scrap);
+    if (one.openQuantity === 0 && quantity > 0) one.finishedMs ??= atMs;
+    quantity = Math.max(0, quantity - one.scrap);
+  }
+}
+
+function excess({ quantity, good, scrap }: Tally): number {
+  return Math.max(0, good + scrap - quantity);
+}
