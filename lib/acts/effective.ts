@@ -4,7 +4,7 @@ import { instantMs } from "@/lib/time/instant";
 import type { LedgerEvent } from "@/lib/timeline/schema";
 
 /** How long after an act it may be undone (LEDGER.md 3). */
-export const UNDO_MS = 10_000;
+const UNDO_MS = 10_000;
 
 /** What is left of a ledger when its corrections are carried out. */
 export interface Effective {

@@ -11,7 +11,7 @@ export interface EarningReport {
 }
 
 /** What one report earned, in whole seconds. */
-export interface Earning {
+interface Earning {
   event: string;
   setupSeconds: number;
   runSeconds: number;

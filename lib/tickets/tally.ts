@@ -2,7 +2,7 @@ import { sum } from "@/lib/sum";
 import type { CountedReport } from "@/lib/timeline/schema";
 
 /** What the reports of one ticket operation come to. */
-export interface Tally {
+interface Tally {
   /** Pieces that it has to do: the lot less what earlier operations lost. */
   quantity: number;
   /** Pieces still to be made good; rework is among them. */

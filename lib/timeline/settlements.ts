@@ -6,7 +6,7 @@ import { ruleAt } from "@/lib/time/site-day";
 import type { FoldFacts, LedgerEvent } from "@/lib/timeline/schema";
 
 /** What a person answered to a loose end, and the event that says so. */
-export interface Settlement {
+interface Settlement {
   answer: string;
   event: LedgerEvent;
 }

@@ -1,7 +1,7 @@
 import type { EventBody, Item } from "@/lib/ledger/schema";
 import { fold } from "@/lib/timeline/fold";
 import type { Folded, FoldFacts, LedgerEvent, SiteRules } from "@/lib/timeline/schema";
-import { eventId, foldFacts, makeEvent, siteRules } from "../make/events";
+import { eventId, foldFacts, makeEvent, siteRules } from "@/tests/make/events";
 import { takeTime } from "./clock";
 import { foldedRows } from "./rows";
 import { ticketOf } from "./tickets";
@@ -102,10 +102,13 @@ class Scenario {
   /** Takes the words off the end of a row that say how, where and by whom. */
   private options(words: string[], id: string) {
     const other: Partial<LedgerEvent> = {};
-    let [since, isOffline] = [null as number | null, false];
+    let since: number | null = null;
+    let received = (atMs: number): number | null => atMs + 1000;
     const first = words.findIndex(
       (word, index) =>
-        index > 0 && /^(#\w+|@\w+|by|since|offline|asks)$/.test(word) && !isTarget(words, index),
+        index > 0 &&
+        /^(#\w+|@\w+|by|since|offline|waiting|asks)$/.test(word) &&
+        !isTarget(words, index),
     );
     const rest = first < 0 ? [] : words.splice(first);
     while (rest.length > 0) {
@@ -115,13 +118,13 @@ class Scenario {
       else if (word.startsWith("@"))
         Object.assign(other, { kiosk: word.slice(1), cell: word.slice(1) });
       else if (word === "by") other.by = rest.shift()!;
-      else if (word === "offline") isOffline = true;
+      else if (word === "offline") received = (atMs) => atMs + 3_600_000;
+      else if (word === "waiting") received = () => null;
       else if (word === "asks")
         other.questions = [rest.shift() as LedgerEvent["questions"][number]];
       else since = time(rest);
     }
-    const received = (atMs: number) => (isOffline ? { receivedMs: atMs + 3_600_000 } : {});
-    return { since, other: (atMs: number) => ({ ...other, ...received(atMs) }) };
+    return { since, other: (atMs: number) => ({ ...other, receivedMs: received(atMs) }) };
   }
 
   private body(kind: string, words: string[], sinceMs: number | null): EventBody {

@@ -8,7 +8,7 @@ import {
   takenOut,
 } from "@/lib/acts/act";
 import type { EventBody } from "@/lib/ledger/schema";
-import { eventId, makeEvent } from "../../make/events";
+import { eventId, makeEvent } from "@/tests/make/events";
 
 const item = { ticket: "26048176", operation: "120" };
 const count = { ...item, good: 1, rework: 0, scrap: 0 };

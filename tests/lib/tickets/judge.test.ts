@@ -1,7 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { judge } from "@/lib/tickets/judge";
-import { makeCount, makeTicket, makeWork } from "../../make/ticket";
+import { makeCount, makeTicket, makeWork } from "@/tests/make/ticket";
 
 const states = (ticket: ReturnType<typeof judge>) => ticket.operations.map(({ state }) => state);
 

@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { judge } from "@/lib/tickets/judge";
 import { obstacles } from "@/lib/tickets/obstacles";
-import { makeCount, makeTicket } from "../../make/ticket";
+import { makeCount, makeTicket } from "@/tests/make/ticket";
 
 const ask = (ticket: ReturnType<typeof judge>, place: number, cells = ["mill", "neck", "spray"]) =>
   obstacles(ticket.operations[place]!, { status: ticket.status, cells });

@@ -1,7 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { tally } from "@/lib/tickets/tally";
-import { makeCount } from "../../make/ticket";
+import { makeCount } from "@/tests/make/ticket";
 
 const routing = ["110", "120", "130"];
 const of = (quantity: number, ...reports: Parameters<typeof makeCount>[]) =>

@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
 import type { TicketFacts, TicketReport, TicketWork } from "@/lib/tickets/facts";
 import { judge } from "@/lib/tickets/judge";
-import { makeCount, makeTicket, makeWork } from "../../make/ticket";
+import { makeCount, makeTicket, makeWork } from "@/tests/make/ticket";
 
 /** Loose ends as "code subject minute", the ticket's number left out. */
 function ends(

@@ -5,9 +5,9 @@ import { sumWindow } from "@/lib/timeline/day-sums";
 import { fold } from "@/lib/timeline/fold";
 import type { Folded, FoldFacts, LedgerEvent, LooseEnd } from "@/lib/timeline/schema";
 import { endKey } from "@/lib/timeline/settlements";
-import { eventStream } from "../../make/event-streams";
-import { foldFacts, makeEvent } from "../../make/events";
-import { plays } from "../../say/plays";
+import { eventStream } from "@/tests/make/event-streams";
+import { foldFacts, makeEvent } from "@/tests/make/events";
+import { plays } from "@/tests/say/plays";
 
 const START_MS = Date.parse("2026-06-08T06:00:00Z");
 const HOUR_MS = 3_600_000;

@@ -1,5 +1,5 @@
 import { describe } from "vitest";
-import { plays } from "../../say/plays";
+import { plays } from "@/tests/say/plays";
 
 describe("gatherEnds", () => {
   plays({

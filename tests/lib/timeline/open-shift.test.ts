@@ -8,7 +8,7 @@ import {
   plannedEnd,
   segmentsOf,
 } from "@/lib/timeline/open-shift";
-import { foldFacts, makeEvent } from "../../make/events";
+import { foldFacts, makeEvent } from "@/tests/make/events";
 
 const HOUR = 3600;
 const start = makeEvent(1, 0, { kind: "shift-start" });

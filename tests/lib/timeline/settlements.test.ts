@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { endKey, settlementsOf } from "@/lib/timeline/settlements";
-import { eventId, makeEvent } from "../../make/events";
-import { plays } from "../../say/plays";
+import { eventId, makeEvent } from "@/tests/make/events";
+import { plays } from "@/tests/say/plays";
 
 describe("endKey", () => {
   test("is the code and what the loose end hangs on", () => {

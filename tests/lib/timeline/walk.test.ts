@@ -1,5 +1,5 @@
 import { describe } from "vitest";
-import { plays } from "../../say/plays";
+import { plays } from "@/tests/say/plays";
 
 describe("walk: shifts", () => {
   plays({
@@ -32,6 +32,12 @@ describe("walk: shifts", () => {
     "from a kiosk that was offline it asks nobody": `
       08:00 ana shift-start
       09:00 ana shift-start @west offline #again
+      16:00 ana shift-end
+      = ana 08:00 16:00 unassigned
+      ? ana already-in #again (settled)`,
+    "nor does one that still waits in the kiosk": `
+      08:00 ana shift-start
+      09:00 ana shift-start waiting #again
       16:00 ana shift-end
       = ana 08:00 16:00 unassigned
       ? ana already-in #again (settled)`,
@@ -273,6 +279,23 @@ describe("walk: shifts that are long, rests that are short", () => {
       = ana 21:30 22:30 run A
       ? ana no-shift-end #in
       ? ana shift-long #in`,
+    "past the limit a tap within the rest goes on, one after a full rest does not": `
+      08:00 ana shift-start #in
+      12:00 ana run A
+      22:59:59 ana run B
+      23:30 ana shift-end
+      Wed 08:00 ana shift-start #late
+      Wed 12:00 ana run A
+      Wed 23:00 ana run B #b
+      Wed 23:30 ana shift-end
+      = ana 08:00 12:00 unassigned
+      = ana 12:00 22:59:59 run A
+      = ana 22:59:59 23:30 run B
+      = ana Wed 08:00 Wed 12:00 unassigned
+      = ana Wed 23:00 Wed 23:30 run B
+      ? ana shift-long #in
+      ? ana no-shift-end #late
+      ? ana implied-start #b`,
     "no shift is longer than 36 hours": `
       08:00 ana shift-start #in
       17:00 ana run A
