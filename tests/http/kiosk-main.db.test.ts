@@ -11,7 +11,7 @@ import { addEnrolmentCode } from "@/db/kiosks/enrolment";
 import { bench, enrolled, eventResults, kioskTime, signedIn } from "@/lib/kiosks/schema";
 import { call } from "@/tests/make/call";
 import { type Factory, makeFactory, makeTicket } from "@/tests/make/factory";
-import { givePin } from "@/tests/make/kiosk";
+import { givePin, tap } from "@/tests/make/kiosk";
 import { ownDatabase } from "@/tests/setup/db";
 
 const own = ownDatabase();
@@ -68,20 +68,12 @@ describe("a kiosk from its first minute", () => {
     expect(empty).toMatchObject({ shift: null, work: null, events: [] });
 
     const now = Date.now();
-    let seq = 0;
-    const tap = (secondsAgo: number, event: object) => ({
-      id: uuid(),
-      v: 1,
-      session,
-      worker: "1042",
-      at: new Date(now - secondsAgo * 1000).toISOString(),
-      clock: { offsetMs: 0, uncertaintyMs: 5, boot: "b", monotonicMs: seq, seq: (seq += 1) },
-      ...event,
-    });
+    const kiosk = { kioskId: device.deviceId, cookie: asked.cookie, session };
+    const ago = (seconds: number) => new Date(now - seconds * 1000).toISOString();
     const item = { ticket: "26000017", operation: "010" };
     const events = [
-      tap(600, { kind: "shift-start" }),
-      tap(500, { kind: "work", activity: "run", items: [item] }),
+      tap(kiosk, ago(600), { kind: "shift-start" }),
+      tap(kiosk, ago(500), { kind: "work", activity: "run", items: [item] }),
       { kind: "unheard-of" },
     ];
     const sent = await call(sendEvents, {
