@@ -289,7 +289,7 @@ return (
     'productionDayStartsAtMinutes', r.production_day_starts_at_minutes,
     'shiftLimitSeconds', r.shift_limit_seconds, 'sinceLimitSeconds', r.since_limit_seconds,
     'restMaxSeconds', r.rest_max_seconds, 'mealMaxSeconds', r.meal_max_seconds,
-    'restBetweenShiftsSeconds', r.rest_between_shifts_seconds) order by r.effective_from), '[]')
+    'restBetweenShiftsSeconds', r.rest_between_shifts_seconds) order by r.effective_from, r.id), '[]')
   from site_rules r
   where r.site_id = p_site);
 --> statement-breakpoint
@@ -429,7 +429,9 @@ declare
   locked integer;
   added integer;
 begin
-  perform make_partition('clock_events', p_received);
+  if jsonb_array_length(p -> 'events') > 0 then
+    perform make_partition('clock_events', p_received);
+  end if;
   perform make_partition('segments', m.month)
   from (
     select distinct date_trunc('month', s.start_at, 'UTC') as month

@@ -1,8 +1,7 @@
 import type { Scope } from "@/db/client";
 import { book } from "@/db/ledger/commands";
 import { readContext } from "@/db/ledger/queries";
-import { listWorkerNumbers } from "@/db/people/queries";
-import { listOpenShifts } from "@/db/timeline/queries";
+import { listOpenShifts, listWorkerNumbers } from "@/db/timeline/queries";
 import { ruleAt } from "@/lib/time/site-day";
 import { type Derived, deriveWindow } from "@/lib/timeline/derive";
 import type { SiteRules } from "@/lib/timeline/schema";
@@ -70,7 +69,7 @@ async function deriveAgain(
     if (!window) return 0;
     const derived = deriveWindow(window, [], { rules, asOfMs });
     const changes = countChanges(derived);
-    if (changes === 0 && derived.asOfMs === window.asOfMs) return 0;
+    if (changes === 0) return 0;
     const timelines = [{ workerId: window.workerId, window, derived, isTouched: true }];
     const booking = { siteId: scope.siteId, kioskId: null, rows: [], timelines, sessions: [] };
     if (await book(scope, { ...booking, receivedMs: derived.asOfMs })) return changes;

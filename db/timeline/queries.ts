@@ -12,3 +12,13 @@ export async function listOpenShifts({ db, siteId }: Scope) {
     .where(and(eq(shifts.siteId, siteId), isNull(shifts.endAt)))
     .orderBy(asc(shifts.startAt));
 }
+
+/** Lists the numbers of all workers of a site, also of those who left. */
+export async function listWorkerNumbers({ db, siteId }: Scope): Promise<string[]> {
+  const rows = await db
+    .select({ number: workers.number })
+    .from(workers)
+    .where(eq(workers.siteId, siteId))
+    .orderBy(asc(workers.number));
+  return rows.map(({ number }) => number);
+}

@@ -2,6 +2,7 @@ import { eq } from "drizzle-orm";
 import { v7 as uuid } from "uuid";
 import { hashPassword } from "@/app/_server/password";
 import { hashSecret, newSecret } from "@/app/_server/secret";
+import { accountRoles, accounts, accountWorkers } from "@/db/access/tables";
 import { kioskCells, kioskSessions, kiosks } from "@/db/kiosks/tables";
 import { workers } from "@/db/people/tables";
 import type { ClockEvent, EventBody } from "@/lib/ledger/schema";
@@ -57,6 +58,32 @@ export async function makeWorker(
     pinHash: pin ? await hashPassword(pin) : null,
   });
   return id;
+}
+
+/** Makes a worker the lead of cells, and opens a session of theirs on a kiosk. */
+export async function makeLead(
+  { db, siteId, cellIds }: Factory,
+  kiosk: MadeKiosk,
+  lead: { workerId: string; cells: (keyof Factory["cellIds"])[] },
+): Promise<string> {
+  const [accountId, session] = [uuid(), uuid()];
+  const email = `${accountId}@example.test`;
+  await db.insert(accounts).values({ id: accountId, email, name: "Lead", passwordHash: "-" });
+  await db.insert(accountWorkers).values({ siteId, accountId, workerId: lead.workerId });
+  await db.insert(accountRoles).values(
+    lead.cells.map((cell) => ({
+      siteId,
+      id: uuid(),
+      accountId,
+      role: "lead",
+      cellId: cellIds[cell],
+    })),
+  );
+  const openedAt = new Date("2026-05-14T05:00:00Z");
+  await db
+    .insert(kioskSessions)
+    .values({ siteId, id: session, kioskId: kiosk.kioskId, workerId: lead.workerId, openedAt });
+  return session;
 }
 
 /** Gives the factory's worker 1042 a PIN. */
