@@ -1,4 +1,4 @@
-import { and, eq, gt, inArray, isNull, sql } from "drizzle-orm";
+import { and, eq, gt, inArray, isNull, like, lt, sql } from "drizzle-orm";
 import { v7 as uuidv7 } from "uuid";
 import { accountRoles, accounts, officeSessions, setupLinks, throttles } from "@/db/access/tables";
 import { recordAct } from "@/db/audit/commands";
@@ -116,3 +116,11 @@ export async function makeFirstAdmin(
 }
 
 const LINK_USED = "This link was used or is over. Ask for a new one where Bookmatch was started.";
+
+/** Forgets the hourly counts of tablets once they bear on nothing any more. */
+export async function clearOldTries(db: Db, now: Date): Promise<void> {
+  const before = new Date(now.getTime() - 2 * 86_400_000);
+  await db
+    .delete(throttles)
+    .where(and(like(throttles.key, "kiosk:%"), lt(throttles.lastFailedAt, before)));
+}

@@ -1,5 +1,6 @@
 import type { LedgerRow } from "@/lib/ledger/decide";
 import type { DerivedTimeline, NewSession } from "@/lib/ledger/decide-booking";
+import { ticketsAbout } from "@/lib/ledger/target";
 import { type Derived, ticketsTouched } from "@/lib/timeline/derive";
 
 /** What a row gains so that the database can take it: instants as text, names as its columns. */
@@ -50,12 +51,19 @@ export function payloadOf(booking: Booking): string {
       ),
       ...rows.flatMap((row) => keptEnd(row, booking)),
     ],
-    marks: [...new Set(timelines.flatMap(({ derived }) => ticketsTouched(derived)))].map((key) => ({
-      kind: "ticket",
-      key,
-    })),
+    marks: markedTickets(booking).map((key) => ({ kind: "ticket", key })),
     audit: rows.flatMap((row) => auditOf(row, kioskId)),
   });
+}
+
+/** Tickets whose time, counts or answers change: to be judged again. */
+function markedTickets({ timelines, rows }: Booking): string[] {
+  const events = new Map(
+    timelines.flatMap(({ window }) => window.events.map(({ id, body }) => [id, body] as const)),
+  );
+  const changed = timelines.flatMap(({ derived }) => ticketsTouched(derived));
+  const answered = rows.flatMap(({ targetId }) => ticketsAbout(targetId, events));
+  return [...new Set([...changed, ...answered])];
 }
 
 /** `startMs` is the column `start_at`, `cellId` the column `cell_id`. */

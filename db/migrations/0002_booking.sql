@@ -484,7 +484,7 @@ begin
   where r.site_id = p_site and r.id = g.id;
   delete from loose_ends l
   using jsonb_to_recordset(p -> 'gone' -> 'loose_ends') as g (code text, subject text)
-  where l.site_id = p_site and l.code = g.code and l.subject = g.subject;
+  where l.site_id = p_site and l.code = g.code and l.subject = g.subject and l.ticket is null;
 
   insert into segments
   select * from jsonb_populate_recordset(null::segments, p -> 'segments')
@@ -508,9 +508,8 @@ begin
       caused_by = excluded.caused_by, defects = excluded.defects, cell_id = excluded.cell_id;
   insert into loose_ends
   select * from jsonb_populate_recordset(null::loose_ends, p -> 'loose_ends')
-  on conflict (site_id, code, subject) do update
-    set worker_id = excluded.worker_id, ticket = excluded.ticket, at = excluded.at,
-      settled = excluded.settled;
+  on conflict (site_id, code, subject, ticket) do update
+    set worker_id = excluded.worker_id, at = excluded.at, settled = excluded.settled;
 
   insert into dirty_marks (site_id, kind, key)
   select p_site, m.kind, m.key
@@ -519,4 +518,124 @@ begin
   select p_site, a.actor, a.action, a.subject, a.detail
   from jsonb_to_recordset(p -> 'audit') as a
     (actor text, action text, subject text, detail jsonb);
+end $$;
+--> statement-breakpoint
+
+-- All that is booked to some tickets, known or not, and what was last made of it: what judging them
+-- and showing them both need. One entry a number, in their order.
+create function ticket_books(p_site uuid, p_numbers text[]) returns jsonb
+language plpgsql stable
+set search_path = public, pg_temp
+as $$
+begin
+  return (
+    select coalesce(jsonb_agg(jsonb_build_object(
+      'ticket', n.number,
+      'known', case when t.id is not null then jsonb_build_object(
+        'id', t.id, 'quantity', t.quantity, 'status', t.status, 'dueOn', t.due_on,
+        'finishedMs', epoch_ms(t.finished_at), 'model', m.name,
+        'options', (
+          select coalesce(jsonb_agg(x.name order by x.name), '[]')
+          from ticket_options c
+          join options x on x.site_id = p_site and x.id = c.option_id
+          where c.site_id = p_site and c.ticket_id = t.id)) end,
+      'operations', (
+        select coalesce(jsonb_agg(jsonb_build_object(
+          'id', p.id, 'operation', o.code, 'name', o.name, 'stage', o.stage, 'cellId', o.cell_id,
+          'cell', c.name, 'hazards', o.hazards, 'state', p.state, 'good', p.good,
+          'rework', p.rework, 'scrap', p.scrap, 'openQuantity', p.open_quantity,
+          'actualSeconds', p.actual_seconds, 'firstWorkMs', epoch_ms(p.first_work_at),
+          'finishedMs', epoch_ms(p.finished_at),
+          'standards', (
+            select coalesce(jsonb_agg(jsonb_build_object(
+              'seq', s.seq, 'effectiveFrom', s.effective_from, 'option', s.option_id,
+              'setupSeconds', s.setup_seconds, 'runSeconds', s.run_seconds)), '[]')
+            from standards s
+            where s.site_id = p_site and s.model_id = t.model_id and s.operation_id = o.id
+              and (s.option_id is null or s.option_id in (
+                select w.option_id from ticket_options w
+                where w.site_id = p_site and w.ticket_id = t.id)))) order by p.position), '[]')
+        from ticket_operations p
+        join operations o on o.site_id = p_site and o.id = p.operation_id
+        join cells c on c.site_id = p_site and c.id = o.cell_id
+        where p.site_id = p_site and p.ticket_id = t.id),
+      'reports', (
+        select coalesce(jsonb_agg(jsonb_build_object(
+          'event', r.id, 'kind', r.kind, 'worker', r.worker_id, 'atMs', epoch_ms(r.at),
+          'ticket', r.ticket, 'operation', r.operation, 'good', r.good, 'rework', r.rework,
+          'scrap', r.scrap, 'stop', r.stop, 'causedBy', r.caused_by, 'defects', r.defects,
+          'cell', r.cell_id)), '[]')
+        from reports r
+        where r.site_id = p_site and r.ticket = n.number),
+      'work', (
+        select coalesce(jsonb_agg(jsonb_build_object(
+          'worker', s.worker_id, 'number', w.number, 'name', w.name, 'operation', s.operation,
+          'activity', s.activity, 'startMs', epoch_ms(s.start_at), 'endMs', epoch_ms(s.end_at),
+          'seconds', s.seconds, 'item', s.item, 'cell', s.cell_id, 'event', s.event_id,
+          'weights', case when s.end_at is null then (
+            select jsonb_agg(i.weight order by i.item)
+            from segments i
+            where i.site_id = p_site and i.start_at = s.start_at and i.worker_id = s.worker_id)
+            end)), '[]')
+        from segments s
+        join workers w on w.site_id = p_site and w.id = s.worker_id
+        where s.site_id = p_site and s.ticket = n.number),
+      'looseEnds', (
+        select coalesce(jsonb_agg(jsonb_build_object(
+          'code', l.code, 'subject', l.subject, 'worker', l.worker_id, 'atMs', epoch_ms(l.at),
+          'settled', l.settled)), '[]')
+        from loose_ends l
+        where l.site_id = p_site and l.ticket = n.number and l.source = 'judge'),
+      -- an answer stands unless it was itself taken back
+      'settled', (
+        select coalesce(jsonb_agg(distinct e.body ->> 'end'), '[]')
+        from clock_events e
+        where e.site_id = p_site and e.kind = 'settle' and e.kept_for is null
+          and e.worker_id in (
+            select s.worker_id from segments s where s.site_id = p_site and s.ticket = n.number
+            union
+            select r.worker_id from reports r where r.site_id = p_site and r.ticket = n.number)
+          and e.target_id in (
+            select s.event_id from segments s where s.site_id = p_site and s.ticket = n.number
+            union
+            select r.id from reports r where r.site_id = p_site and r.ticket = n.number)
+          and not exists (
+            select from clock_events v
+            where v.site_id = p_site and v.worker_id = e.worker_id and v.kind = 'void'
+              and v.kept_for is null and v.target_id = e.id)))
+      order by n.place), '[]')
+    from unnest(p_numbers) with ordinality as n (number, place)
+    left join tickets t on t.site_id = p_site and t.number = n.number
+    left join models m on m.site_id = p_site and m.id = t.model_id
+  );
+end $$;
+--> statement-breakpoint
+
+-- Keeps what the judge made of some tickets: only what differs from what was kept.
+create function keep_judgement(p_site uuid, p jsonb) returns void
+language plpgsql
+set search_path = public, pg_temp
+as $$
+begin
+  update ticket_operations o
+  set state = n.state, good = n.good, rework = n.rework, scrap = n.scrap,
+    open_quantity = n.open_quantity, actual_seconds = n.actual_seconds,
+    first_work_at = n.first_work_at, finished_at = n.finished_at
+  from jsonb_to_recordset(p -> 'operations') as n (
+    id uuid, state text, good integer, rework integer, scrap integer, open_quantity integer,
+    actual_seconds integer, first_work_at timestamptz, finished_at timestamptz)
+  where o.site_id = p_site and o.id = n.id;
+  update tickets t
+  set status = n.status, finished_at = n.finished_at
+  from jsonb_to_recordset(p -> 'tickets') as n (id uuid, status text, finished_at timestamptz)
+  where t.site_id = p_site and t.id = n.id;
+  delete from loose_ends l
+  using jsonb_to_recordset(p -> 'gone') as g (code text, subject text, ticket text)
+  where l.site_id = p_site and l.code = g.code and l.subject = g.subject and l.ticket = g.ticket;
+  insert into loose_ends (site_id, code, subject, source, worker_id, ticket, at, settled)
+  select p_site, n.code, n.subject, 'judge', n.worker_id, n.ticket, n.at, n.settled
+  from jsonb_to_recordset(p -> 'loose_ends') as n
+    (code text, subject text, worker_id uuid, ticket text, at timestamptz, settled boolean)
+  on conflict (site_id, code, subject, ticket) do update
+    set worker_id = excluded.worker_id, at = excluded.at, settled = excluded.settled;
 end $$;

@@ -1,5 +1,5 @@
 import { asc, eq } from "drizzle-orm";
-import type { Scope } from "@/db/client";
+import type { Db, Scope } from "@/db/client";
 import { siteRules, sites } from "@/db/sites/tables";
 import type { SiteRules } from "@/lib/timeline/schema";
 
@@ -37,4 +37,9 @@ export async function findSite({ db, siteId }: Scope): Promise<Site | null> {
     return [{ fromMs: effectiveFrom.getTime(), ...rest }];
   });
   return { name: first.name, locale: first.locale, rules };
+}
+/** Lists the ids of all sites of the installation, the oldest first. */
+export async function listSiteIds(db: Db): Promise<string[]> {
+  const rows = await db.select({ id: sites.id }).from(sites).orderBy(asc(sites.createdAt));
+  return rows.map(({ id }) => id);
 }

@@ -9,6 +9,7 @@ import {
   primaryKey,
   smallint,
   text,
+  unique,
   uuid,
 } from "drizzle-orm/pg-core";
 import { id, instantAt, siteId } from "@/db/columns";
@@ -116,7 +117,7 @@ export const reports = pgTable(
   ],
 );
 
-/** Derived: what a person must settle. Key (code, subject), so re-deriving finds the same one. */
+/** Derived: what a person must settle. Code and subject find the same one again each time. */
 export const looseEnds = pgTable(
   "loose_ends",
   {
@@ -132,7 +133,8 @@ export const looseEnds = pgTable(
     settled: boolean().notNull().default(false),
   },
   (t) => [
-    primaryKey({ columns: [t.siteId, t.code, t.subject] }),
+    // two tickets of one act may ask the same; time without a ticket has none
+    unique("loose_ends_key").on(t.siteId, t.code, t.subject, t.ticket).nullsNotDistinct(),
     foreignKey({ columns: [t.siteId, t.workerId], foreignColumns: [workers.siteId, workers.id] }),
     index().on(t.siteId, t.workerId, t.at),
     index().on(t.siteId, t.settled, t.at),

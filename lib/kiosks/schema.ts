@@ -31,7 +31,10 @@ export type Enrolled = z.infer<typeof enrolled>;
 
 // GET /api/kiosk/time -----------------------------------------------------------------------------
 export const timeQuery = z.object({
-  build: z.string().max(64).optional(),
+  build: z
+    .string()
+    .regex(/^[\w.+-]{1,64}$/, "Give the id of a build.")
+    .optional(),
   queued: z.coerce.number().int().min(0).max(1_000_000).optional(),
   battery: z.coerce.number().min(0).max(100).optional(),
 });

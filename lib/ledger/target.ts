@@ -35,3 +35,20 @@ export function namedItems(body: EventBody): readonly Item[] {
   }
   return body.kind === "pause" ? body.items : sharedItems(body);
 }
+
+/**
+ * The tickets of the act that a correction is about in the end: an answer to a ticket's question, or
+ * the void of such an answer, lets that ticket be judged again. Empty where the act is not at hand.
+ *
+ * @param events those at hand, by id
+ */
+export function ticketsAbout(
+  target: string | null,
+  events: ReadonlyMap<string, EventBody>,
+  seen: ReadonlySet<string> = new Set(),
+): string[] {
+  const body = target === null || seen.has(target) ? undefined : events.get(target);
+  if (!body || target === null) return [];
+  const tickets = namedItems(body).map(({ ticket }) => ticket);
+  return [...tickets, ...ticketsAbout(targetOf(body), events, new Set([...seen, target]))];
+}

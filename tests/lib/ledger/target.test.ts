@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import type { ClockEvent, EventBody } from "@/lib/ledger/schema";
-import { actOf, namedItems, sharedItems, targetOf } from "@/lib/ledger/target";
+import { actOf, namedItems, sharedItems, targetOf, ticketsAbout } from "@/lib/ledger/target";
 
 const id = "01890a5d-ac96-774b-bcce-b302099a8057";
 const item = { ticket: "26000017", operation: "010" };
@@ -41,5 +41,28 @@ describe("namedItems and sharedItems", () => {
   ])("%j names %d and shares time among %d", (body, named, shared) => {
     expect(namedItems(body)).toHaveLength(named);
     expect(sharedItems(body)).toHaveLength(shared);
+  });
+});
+
+describe("ticketsAbout", () => {
+  const work: EventBody = { kind: "work", activity: "run", items: [item] };
+  const settle: EventBody = { kind: "settle", end: `past-finish:${id}`, answer: "leave" };
+  const other = "01890a5d-ac96-774b-bcce-b302099a8058";
+
+  test("follows an answer, and the void of one, to the tickets of the act", () => {
+    const events = new Map<string, EventBody>([
+      [id, work],
+      [other, settle],
+    ]);
+    expect(ticketsAbout(id, events)).toEqual(["26000017"]);
+    expect(ticketsAbout(other, events)).toEqual(["26000017"]);
+  });
+
+  test("ends where nothing is at hand, and where corrections go round in a circle", () => {
+    expect(ticketsAbout(null, new Map())).toEqual([]);
+    expect(ticketsAbout(id, new Map())).toEqual([]);
+    expect(
+      ticketsAbout(id, new Map<string, EventBody>([[id, { kind: "void", event: id }]])),
+    ).toEqual([]);
   });
 });

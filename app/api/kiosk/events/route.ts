@@ -1,3 +1,4 @@
+import { nudgeJudge } from "@/app/_jobs/tickets";
 import { database } from "@/app/_server/database";
 import { handle } from "@/app/_server/handle";
 import { renewedCookie } from "@/app/_server/kiosk-cookie";
@@ -34,6 +35,7 @@ export const POST = handle(
       withBench: !isRevoked,
     });
     if (!booked.ok) return booked;
+    nudgeJudge();
     const benches = isRevoked ? null : await listBenches(scope, booked.value, receivedAt);
     const answer: EventResults = {
       results: booked.value.results.map((result, place) => {
