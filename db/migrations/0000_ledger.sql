@@ -389,7 +389,7 @@ CREATE TABLE "loose_ends" (
 	"ticket" text,
 	"at" timestamp (3) with time zone NOT NULL,
 	"settled" boolean DEFAULT false NOT NULL,
-	CONSTRAINT "loose_ends_key" UNIQUE NULLS NOT DISTINCT("site_id","code","subject","ticket")
+	CONSTRAINT "loose_ends_site_id_code_subject_pk" PRIMARY KEY("site_id","code","subject")
 );
 --> statement-breakpoint
 CREATE TABLE "reports" (

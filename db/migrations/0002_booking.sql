@@ -484,7 +484,7 @@ begin
   where r.site_id = p_site and r.id = g.id;
   delete from loose_ends l
   using jsonb_to_recordset(p -> 'gone' -> 'loose_ends') as g (code text, subject text)
-  where l.site_id = p_site and l.code = g.code and l.subject = g.subject and l.ticket is null;
+  where l.site_id = p_site and l.code = g.code and l.subject = g.subject;
 
   insert into segments
   select * from jsonb_populate_recordset(null::segments, p -> 'segments')
@@ -508,8 +508,9 @@ begin
       caused_by = excluded.caused_by, defects = excluded.defects, cell_id = excluded.cell_id;
   insert into loose_ends
   select * from jsonb_populate_recordset(null::loose_ends, p -> 'loose_ends')
-  on conflict (site_id, code, subject, ticket) do update
-    set worker_id = excluded.worker_id, at = excluded.at, settled = excluded.settled;
+  on conflict (site_id, code, subject) do update
+    set worker_id = excluded.worker_id, ticket = excluded.ticket, at = excluded.at,
+      settled = excluded.settled;
 
   insert into dirty_marks (site_id, kind, key)
   select p_site, m.kind, m.key
@@ -630,12 +631,13 @@ begin
   from jsonb_to_recordset(p -> 'tickets') as n (id uuid, status text, finished_at timestamptz)
   where t.site_id = p_site and t.id = n.id;
   delete from loose_ends l
-  using jsonb_to_recordset(p -> 'gone') as g (code text, subject text, ticket text)
-  where l.site_id = p_site and l.code = g.code and l.subject = g.subject and l.ticket = g.ticket;
+  using jsonb_to_recordset(p -> 'gone') as g (code text, subject text)
+  where l.site_id = p_site and l.code = g.code and l.subject = g.subject;
   insert into loose_ends (site_id, code, subject, source, worker_id, ticket, at, settled)
   select p_site, n.code, n.subject, 'judge', n.worker_id, n.ticket, n.at, n.settled
   from jsonb_to_recordset(p -> 'loose_ends') as n
     (code text, subject text, worker_id uuid, ticket text, at timestamptz, settled boolean)
-  on conflict (site_id, code, subject, ticket) do update
-    set worker_id = excluded.worker_id, at = excluded.at, settled = excluded.settled;
+  on conflict (site_id, code, subject) do update
+    set worker_id = excluded.worker_id, ticket = excluded.ticket, at = excluded.at,
+      settled = excluded.settled;
 end $$;

@@ -109,8 +109,8 @@ function payloadOf(judged: readonly { ticket: string; judgement: Judgement }[]):
         ? { id: ticket.id, status: ticket.status, finished_at: instant(ticket.finishedMs) }
         : [],
     ),
-    gone: judged.flatMap(({ ticket, judgement }) =>
-      judgement.looseEnds.gone.map(({ code, subject }) => ({ code, subject, ticket })),
+    gone: judged.flatMap(({ judgement }) =>
+      judgement.looseEnds.gone.map(({ code, subject }) => ({ code, subject })),
     ),
     loose_ends: judged.flatMap(({ ticket, judgement }) =>
       judgement.looseEnds.changed.map(({ code, subject, worker, atMs, settled }) => {

@@ -9,7 +9,6 @@ import {
   primaryKey,
   smallint,
   text,
-  unique,
   uuid,
 } from "drizzle-orm/pg-core";
 import { id, instantAt, siteId } from "@/db/columns";
@@ -133,8 +132,7 @@ export const looseEnds = pgTable(
     settled: boolean().notNull().default(false),
   },
   (t) => [
-    // two tickets of one act may ask the same; time without a ticket has none
-    unique("loose_ends_key").on(t.siteId, t.code, t.subject, t.ticket).nullsNotDistinct(),
+    primaryKey({ columns: [t.siteId, t.code, t.subject] }),
     foreignKey({ columns: [t.siteId, t.workerId], foreignColumns: [workers.siteId, workers.id] }),
     index().on(t.siteId, t.workerId, t.at),
     index().on(t.siteId, t.settled, t.at),

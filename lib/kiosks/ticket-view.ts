@@ -1,7 +1,7 @@
 import type { KioskTicket, TicketOperation } from "@/lib/kiosks/schema";
 import { standardInForce } from "@/lib/standards/in-force";
 import { type BookedOperation, judgeBook, type TicketBook } from "@/lib/tickets/book";
-import type { JudgedTicket } from "@/lib/tickets/judge";
+import type { JudgedTicket } from "@/lib/tickets/facts";
 import { obstacles } from "@/lib/tickets/obstacles";
 import { type DayRule, productionDay } from "@/lib/time/site-day";
 

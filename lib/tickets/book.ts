@@ -1,6 +1,7 @@
 import type { Activity } from "@/lib/ledger/schema";
 import type { StandardRow } from "@/lib/standards/in-force";
-import { type JudgedTicket, judge, type TicketReport, type TicketWork } from "@/lib/tickets/judge";
+import type { JudgedTicket, TicketReport, TicketWork } from "@/lib/tickets/facts";
+import { judge } from "@/lib/tickets/judge";
 import { split } from "@/lib/timeline/split";
 
 /** An operation of a ticket, with what the judge last kept of it; instants in epoch milliseconds. */
@@ -70,6 +71,7 @@ export interface TicketBook {
 export function judgeBook(book: TicketBook, untilMs: number | null): JudgedTicket {
   const { known, operations, reports, settled } = book;
   const facts = {
+    ticket: book.ticket,
     quantity: known?.quantity ?? 1,
     isCancelled: known?.status === "cancelled",
     operations: operations.map(({ operation, cellId }) => ({ operation, cell: cellId })),
