@@ -1,3 +1,4 @@
+import type { z } from "zod";
 import { type EventBody, eventBodies } from "@/lib/ledger/schema";
 import { instantMs } from "@/lib/time/instant";
 import type { LedgerEvent } from "@/lib/timeline/schema";
@@ -71,7 +72,7 @@ export function insertedAct(body: EventBody): { atMs: number; body: EventBody } 
   const { event } = body;
   const kind = insertable.find((one) => one === event.kind);
   const atMs = typeof event.at === "string" ? instantMs(event.at) : null;
-  const read = kind && eventBodies[kind].strip().safeParse(event);
+  const read = kind && bodySchema(kind).safeParse(event);
   if (!kind || atMs === null || !read?.success) return null;
   // safe because the body was just read by the schema of that kind
   return { atMs, body: { kind, ...read.data } as EventBody };
@@ -93,3 +94,13 @@ const insertable = [
   "step-skip",
   "reading",
 ] as const;
+
+/** Making a schema takes a millisecond, and a fold may read it often: each is made once. */
+const bodySchemas = new Map<string, { safeParse: z.ZodObject["safeParse"] }>();
+
+/** A kind's body, what travels with every event left out. */
+function bodySchema(kind: (typeof insertable)[number]) {
+  const made = bodySchemas.get(kind) ?? eventBodies[kind].strip();
+  bodySchemas.set(kind, made);
+  return made;
+}

@@ -118,7 +118,7 @@ export function eventStream(
   { startMs, gapSeconds, firstNumber }: Spread,
   maxLength = 25,
 ): fc.Arbitrary<LedgerEvent[]> {
-  return fc.array(step, { minLength: 1, maxLength }).map((steps) => {
+  return fc.array(step, { minLength: 1, maxLength, size: "max" }).map((steps) => {
     const events: LedgerEvent[] = [];
     let atMs = startMs;
     steps.forEach(({ make, share, hurry, back, near, kiosk, weights, isLead }, index) => {

@@ -340,6 +340,17 @@ describe("walk: shifts that are long, rests that are short", () => {
       = ana 18:00 19:00 run A
       ? ana implied-start #a
       ? ana rest-short #a`,
+    "nor from an end that came before such a shift": `
+      rules shiftLimitSeconds 7200
+      08:00 ana shift-start
+      09:00 ana shift-end
+      09:30 ana shift-start #in
+      12:00 ana shift-start
+      13:00 ana shift-end
+      = ana 08:00 09:00 unassigned
+      = ana 12:00 13:00 unassigned
+      ? ana rest-short #in
+      ? ana no-shift-end #in`,
     "after an end that nobody tapped, no rest can be measured": `
       plan ana 08:00 21:00
       08:00 ana shift-start #in
