@@ -15,7 +15,6 @@ import { identityOf, isAlive } from "./ground/process-record.mjs";
 import { runScript } from "./ground/programs.mjs";
 import { stopRunning } from "./ground/run.mjs";
 import { main, Stop, say } from "./ground/say.mjs";
-import { secretsIn } from "./ground/secrets.mjs";
 import { serve } from "./ground/supervise.mjs";
 
 /** `npm start`: from a fresh clone to a served Bookmatch, and from there to the next Ctrl-C. */
@@ -28,11 +27,10 @@ await main(async () => {
   const leaving = personLeaves();
   await endLeftovers(before);
   const { host, port } = await chooseAddress();
-  const { action } = secretsIn(dataFolder());
-  sayPlan({ host, port, actionKey: action });
+  await sayPlan({ host, port });
   record.write({ supervisor: identityOf(process.pid), server: null, address: null });
   try {
-    await startAndStay({ host, port, action, record, leaving });
+    await startAndStay({ host, port, record, leaving });
   } catch (error) {
     if (!leaving.isOver) throw error; // what was interrupted on purpose needs no reason
   } finally {
@@ -42,14 +40,14 @@ await main(async () => {
   say("Bookmatch is stopped.");
 });
 
-async function startAndStay({ host, port, action, record, leaving }) {
+async function startAndStay({ host, port, record, leaving }) {
   if (!usesGivenServer && !findPrograms())
     await installPackages(
       ["postgresql"],
       "give the address of a PostgreSQL server in DATABASE_URL.",
     );
   await installModules();
-  await build(action);
+  await build();
   if (leaving.isOver) return;
   const installation = await openInstallation();
   const greeting = await prepare(installation.env, `http://${host}:${port}`);

@@ -6,13 +6,12 @@ import { findPrograms } from "./ground/cluster.mjs";
 import { runningRecord } from "./ground/installation.mjs";
 import { installModules } from "./ground/modules.mjs";
 import { installPackages } from "./ground/packages.mjs";
-import { dataFolder, root } from "./ground/place.mjs";
+import { root } from "./ground/place.mjs";
 import { checkNode } from "./ground/plan.mjs";
 import { runPlaywright } from "./ground/playwright.mjs";
 import { isAlive } from "./ground/process-record.mjs";
 import { runProgram } from "./ground/programs.mjs";
 import { main, Stop } from "./ground/say.mjs";
-import { secretsIn } from "./ground/secrets.mjs";
 import { newTally, report, stage } from "./ground/stages.mjs";
 import { startTestServer } from "./ground/test-data.mjs";
 import { runVitest } from "./ground/vitest.mjs";
@@ -56,10 +55,9 @@ async function install() {
 async function buildAndDrive(tally, server) {
   let seeded = "";
   const isReady = await stage(tally, "build, and demo data", async () => {
-    const { action } = secretsIn(dataFolder());
-    if (isAlive(runningRecord().read()?.supervisor) && !isBuildCurrent(action))
+    if (isAlive(runningRecord().read()?.supervisor) && !isBuildCurrent())
       throw new Stop("Bookmatch runs from this folder; a new build would break it: npm stop");
-    const [made] = await Promise.all([makeSeeded(), build(action)]);
+    const [made] = await Promise.all([makeSeeded(), build()]);
     seeded = made;
     return one;
   });

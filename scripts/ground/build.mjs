@@ -4,6 +4,7 @@ import path from "node:path";
 import { root } from "./place.mjs";
 import { run } from "./run.mjs";
 import { Stop, say } from "./say.mjs";
+import { actionKey } from "./secrets.mjs";
 
 const stamp = path.join(root, ".next/bookmatch-build");
 const folders = ["app", "components", "db", "kiosk", "lib", "public"];
@@ -11,7 +12,7 @@ const files =
   /^(package-lock\.json|tsconfig\.json|(next|postcss|tailwind)\.config\.\w+|proxy\.ts|instrumentation\.ts)$/;
 
 /** What a build depends on: every source file, the lock, this Node, the key of the actions. */
-function sourceDigest(actionKey) {
+function sourceDigest() {
   const walk = (folder) =>
     readdirSync(path.join(root, folder), { withFileTypes: true })
       .flatMap((entry) => {
@@ -21,28 +22,28 @@ function sourceDigest(actionKey) {
       .sort();
   const sources = folders.filter((folder) => existsSync(path.join(root, folder))).flatMap(walk);
   const configs = readdirSync(root).filter((name) => files.test(name));
-  const digest = createHash("sha256").update(process.version).update(actionKey);
+  const digest = createHash("sha256").update(process.version).update(actionKey());
   for (const name of [...sources, ...configs.sort()])
     digest.update(`\n${name}\n`).update(readFileSync(path.join(root, name)));
   return digest.digest("hex");
 }
 
 /** Tells whether the production build is that of the sources as they are. */
-export function isBuildCurrent(actionKey) {
-  return existsSync(stamp) && readFileSync(stamp, "utf8") === sourceDigest(actionKey);
+export function isBuildCurrent() {
+  return existsSync(stamp) && readFileSync(stamp, "utf8") === sourceDigest();
 }
 
 /** Makes the production build unless it is current; one that was interrupted is made again. */
-export async function build(actionKey) {
-  if (isBuildCurrent(actionKey)) return;
+export async function build() {
+  if (isBuildCurrent()) return;
   say("Building (about a minute) …");
   rmSync(stamp, { force: true });
-  const digest = sourceDigest(actionKey);
+  const digest = sourceDigest();
   const env = {
     ...process.env,
     NODE_ENV: "production",
     NEXT_TELEMETRY_DISABLED: "1",
-    NEXT_SERVER_ACTIONS_ENCRYPTION_KEY: actionKey,
+    NEXT_SERVER_ACTIONS_ENCRYPTION_KEY: actionKey(),
   };
   const next = path.join(root, "node_modules/next/dist/bin/next");
   const { code } = await run(process.execPath, [next, "build"], {

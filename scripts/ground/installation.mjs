@@ -15,6 +15,9 @@ const ELSEWHERE = "/var/lib";
 /** True where somebody else's database server is used instead of one of our own. */
 export const usesGivenServer = Boolean(process.env.DATABASE_URL);
 
+/** Where the installation's own cluster is, or is going to be. */
+export const findClusterFolder = () => clusterFolder(dataFolder(), ELSEWHERE);
+
 /** The record of who serves this installation, if anybody does. */
 export const runningRecord = () => recordIn(path.join(dataFolder(), "running.json"));
 
@@ -29,7 +32,7 @@ export async function openInstallation() {
   const secrets = secretsIn(folder);
   if (usesGivenServer)
     return { env: givenEnvironment(secrets), cluster: null, close: async () => undefined };
-  const cluster = clusterIn(await clusterFolder(folder, ELSEWHERE), { durable: true });
+  const cluster = clusterIn(await findClusterFolder(), { durable: true });
   const { port, password, wasUp } = await cluster.start();
   await makeDatabase({ port, password, ownerPassword: secrets.owner });
   const at = `127.0.0.1:${port}/${DATABASE}`;
@@ -42,14 +45,14 @@ export async function openInstallation() {
 /** Tells whether there is an installation to open: something was started here before. */
 export async function isInstalled() {
   if (usesGivenServer) return true;
-  const made = path.join(await clusterFolder(dataFolder(), ELSEWHERE), "cluster/PG_VERSION");
+  const made = path.join(await findClusterFolder(), "cluster/PG_VERSION");
   return existsSync(made);
 }
 
 /** Stops the installation's own cluster, if it has one. */
 export async function stopCluster() {
   if (usesGivenServer || !(await isInstalled())) return;
-  await clusterIn(await clusterFolder(dataFolder(), ELSEWHERE), { durable: true }).stop();
+  await clusterIn(await findClusterFolder(), { durable: true }).stop();
 }
 
 /** A server of one's own: with one login given, it is the owner and the app gets one of its own. */

@@ -32,9 +32,10 @@ export function makeFolder(folder) {
  */
 export async function clusterFolder(folder, elsewhere) {
   makeFolder(folder);
-  if (!isRoot || (await databaseUserMayEnter(folder))) return folder;
   const sum = createHash("sha256").update(folder).digest("hex").slice(0, 12);
   const other = path.join(elsewhere, `bookmatch-${sum}`);
+  const isMadeThere = existsSync(path.join(other, "cluster")); // it stays where it was made
+  if (!isRoot || (!isMadeThere && (await databaseUserMayEnter(folder)))) return folder;
   makeFolder(other);
   if (lstatSync(other).isSymbolicLink() || lstatSync(other).uid !== 0)
     throw new Error(`${other} belongs to somebody else. Remove it, or set BOOKMATCH_DATA.`);

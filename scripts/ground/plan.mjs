@@ -1,10 +1,9 @@
-import { existsSync } from "node:fs";
 import path from "node:path";
 import { isBuildCurrent } from "./build.mjs";
 import { findPrograms } from "./cluster.mjs";
-import { usesGivenServer } from "./installation.mjs";
+import { findClusterFolder, usesGivenServer } from "./installation.mjs";
 import { areModulesCurrent } from "./modules.mjs";
-import { dataFolder, root } from "./place.mjs";
+import { root } from "./place.mjs";
 import { isFree } from "./ports.mjs";
 import { Stop, say } from "./say.mjs";
 
@@ -38,18 +37,17 @@ may not be yours to use. Choose another with PORT, or stop that program.`);
 }
 
 /** Says what a start is about to do, before it does it. */
-export function sayPlan({ host, port, actionKey }) {
+export async function sayPlan({ host, port }) {
   const needsServer = !usesGivenServer && !findPrograms();
-  const isFirst = !usesGivenServer && !existsSync(path.join(dataFolder(), "cluster-port"));
+  const place = path.relative(root, await findClusterFolder());
   const modules = !areModulesCurrent();
-  const place = path.relative(root, dataFolder()) || dataFolder();
   const steps = [
     needsServer && "install PostgreSQL from Debian, which is missing",
     modules && "install the locked npm packages",
-    (modules || !isBuildCurrent(actionKey)) && "make the production build",
+    (modules || !isBuildCurrent()) && "make the production build",
     usesGivenServer
       ? "use the database server that DATABASE_URL names"
-      : `${isFirst ? "make" : "start"} a database server of its own in ${place}, for this machine only`,
+      : `start a database server of its own, for this machine only; its data: ${place}`,
     `serve on http://${host}:${port}`,
   ];
   say(

@@ -34,7 +34,9 @@ export function recordIn(file) {
   };
   return {
     read,
-    write: (more) => writeFileSync(file, JSON.stringify({ ...read(), ...more }, null, 2)),
+    // it holds sign-ins: for the one who started it alone
+    write: (more) =>
+      writeFileSync(file, JSON.stringify({ ...read(), ...more }, null, 2), { mode: 0o600 }),
     remove: () => rmSync(file, { force: true }),
   };
 }

@@ -1,9 +1,10 @@
 import { randomBytes } from "node:crypto";
 import { existsSync, readFileSync, renameSync, writeFileSync } from "node:fs";
 import path from "node:path";
-import { makeFolder } from "./place.mjs";
+import { makeFolder, root } from "./place.mjs";
 
-const make = {
+/** What an installation needs. */
+const ofInstallation = {
   /** Seals the office's cookies. */
   session: () => randomBytes(32).toString("base64url"),
   /** Of the login that owns the database, and of the one that the app uses. */
@@ -11,20 +12,32 @@ const make = {
   app: () => randomBytes(24).toString("base64url"),
   /** Ends the name of the app's login, so that two installations on one server have their own. */
   suffix: () => randomBytes(4).toString("hex"),
-  /** Next seals what a form's action closes over with it; fixed, so that open pages outlive a build. */
+};
+
+/** What a clone's builds need. */
+const ofBuild = {
+  /** Next seals with it what a form's action carries; fixed, so that open pages outlive a build. */
   action: () => randomBytes(32).toString("base64"),
 };
 
 /**
- * The secrets of an installation, made once and kept in its data folder, readable by their owner
- * alone. A missing one is added, so that a later version can ask for more.
+ * The secrets of an installation, made once and kept in its data folder.
  *
  * @param {string} folder
- * @returns {Record<keyof typeof make, string>}
+ * @returns {Record<keyof typeof ofInstallation, string>}
  */
 export function secretsIn(folder) {
-  makeFolder(folder);
-  const file = path.join(folder, "secrets.json");
+  return keptSecrets(path.join(folder, "secrets.json"), ofInstallation);
+}
+
+/** The key of the clone's builds: in the clone, wherever its installations keep their data. */
+export function actionKey() {
+  return keptSecrets(path.join(root, ".data/build-secrets.json"), ofBuild).action;
+}
+
+/** Readable by their owner alone. A missing one is added: a later version can ask for more. */
+function keptSecrets(file, make) {
+  makeFolder(path.dirname(file));
   const kept = existsSync(file) ? JSON.parse(readFileSync(file, "utf8")) : {};
   const missing = Object.keys(make).filter((name) => !kept[name]);
   if (missing.length === 0) return kept;
