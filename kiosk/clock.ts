@@ -55,7 +55,7 @@ export function makeClock(clocks: Clocks, boot: string): KioskClock {
       const held = guess();
       if (!held || fresh.uncertaintyMs <= held.uncertaintyMs) anchor = fresh;
     },
-    nowMs: () => guess()?.atMs ?? clocks.wallMs(),
+    nowMs: () => Math.round(guess()?.atMs ?? clocks.wallMs()),
     stamp() {
       const [wallMs, monotonicMs, held] = [clocks.wallMs(), clocks.monotonicMs(), guess()];
       const atMs = Math.round(held?.atMs ?? wallMs);

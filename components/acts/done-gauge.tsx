@@ -2,18 +2,15 @@
 
 import { useTranslations } from "use-intl";
 import { dayStretches } from "@/components/bench/day";
-import { useSeamWords } from "@/components/bench/words";
+import { Pair } from "@/components/bench/pair";
 import { DayStrip } from "@/components/seam/day-strip";
-import { SeamGauge } from "@/components/seam/gauge";
 import type { Deed, KioskState } from "@/lib/bench/schema";
 import type { BenchView } from "@/lib/bench/view";
-import { seamScale } from "@/lib/seam/scale";
-import { actualMinutes, standardMinutes } from "@/lib/seam/verdict";
 import { hoursAndMinutes } from "@/lib/time/format";
 
 /**
- * The picture of a deed: a count's time against setup and the good pieces, a shift's day. Other
- * acts need no picture.
+ * The picture of a deed: a count's time against setup and the good pieces, the pair of a ticket just
+ * begun, a shift's day. Other acts need no picture.
  */
 export function DoneGauge({
   state,
@@ -24,38 +21,22 @@ export function DoneGauge({
   view: BenchView | null;
   deed: Deed;
 }) {
-  if (deed.what === "finish" || deed.what === "count") return <CountedGauge deed={deed} />;
+  const t = useTranslations("done");
+  const bench = useTranslations("bench");
+  const [begun, ...more] = view?.items ?? [];
+  if (deed.what === "finish" || deed.what === "count") {
+    const standard = t("standard", { good: deed.counts.good });
+    const finished = deed.what === "finish";
+    return (
+      <Pair pair={deed.time} standard={standard} actual={bench("actual")} finished={finished} />
+    );
+  }
+  if ((deed.what === "work" || deed.what === "run") && begun && more.length === 0) {
+    const standard = begun.quantity > 1 ? bench("standardLot") : bench("standardOne");
+    return <Pair pair={begun} standard={standard} actual={bench("actual")} />;
+  }
   if (deed.what === "shift-end" && view) return <WholeDay state={state} view={view} />;
   return null;
-}
-
-function CountedGauge({ deed }: { deed: Extract<Deed, { what: "finish" | "count" }> }) {
-  const t = useTranslations("done");
-  const words = useSeamWords();
-  const scaleSeconds = seamScale([deed.time]);
-  const { standardSeconds, actualSeconds } = deed.time;
-  return (
-    <div className="grid gap-2">
-      <p className="mirror text-k-2 font-semibold">
-        <span className="pr-[26px] pl-8 text-standard-ink">
-          {standardSeconds !== null &&
-            `${standardMinutes(standardSeconds)} ${t("standard", { good: deed.counts.good })}`}
-        </span>
-        <span className="pr-8 pl-[26px] text-actual">
-          {actualMinutes(actualSeconds)} {t("actual")}
-        </span>
-      </p>
-      <SeamGauge
-        flush
-        size="bench"
-        state={deed.what === "finish" ? "finished" : "live"}
-        words={words}
-        standardSeconds={standardSeconds}
-        actualSeconds={actualSeconds}
-        scaleSeconds={scaleSeconds}
-      />
-    </div>
-  );
 }
 
 function WholeDay({ state, view }: { state: KioskState; view: BenchView }) {

@@ -20,7 +20,7 @@ export function HoursScreen(seen: SeenBench) {
         <Ask
           className="pt-2 text-k-5"
           book={t("title")}
-          day={hoursAndMinutes(view.today.attendanceSeconds)}
+          day={t("attendedDay", { time: hoursAndMinutes(view.today.attendanceSeconds) })}
         />
         <Leaves className="pt-5" book={<Sums {...seen} />} day={<Day {...seen} />} />
         <Foot

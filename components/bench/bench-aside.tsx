@@ -41,12 +41,7 @@ export function BenchAside({ doing, ...seen }: SeenBench & { doing: Aside }) {
             {doing.kind === "indirect" ? t("otherTitle") : then && t("resumes", { what: then })}
           </p>
         }
-        day={
-          <BigMinutes
-            seconds={Math.max(0, Math.floor(state.nowMs / 1000) - since)}
-            label={t("since", { time: clock(since * 1000) })}
-          />
-        }
+        day={<BigMinutes seconds={Math.max(0, Math.floor(state.nowMs / 1000) - since)} />}
       />
       <div className="bench-acts">
         <BenchActs {...seen} />

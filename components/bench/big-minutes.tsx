@@ -2,8 +2,8 @@
 
 import { useTranslations } from "use-intl";
 
-/** A key figure that hugs the seam from the day's side: whole minutes, and since when. */
-export function BigMinutes({ seconds, label }: { seconds: number; label: string }) {
+/** A key figure that hugs the seam from the day's side: whole minutes. */
+export function BigMinutes({ seconds, label }: { seconds: number; label?: string }) {
   const t = useTranslations("bench");
   return (
     <p className="flex items-baseline gap-4 text-indirect">
@@ -12,8 +12,7 @@ export function BigMinutes({ seconds, label }: { seconds: number; label: string 
       </b>
       <span className="text-k-2 font-semibold leading-tight">
         {t("minutes")}
-        <br />
-        {label}
+        {label && <span className="block">{label}</span>}
       </span>
     </p>
   );

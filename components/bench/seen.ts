@@ -18,5 +18,5 @@ export interface SeenBench extends Seen {
 /** Writes an instant (epoch milliseconds) as the site's clock shows it, "09:42". */
 export function useClock(): (atMs: number) => string {
   const zone = useTimeZone() ?? "UTC";
-  return (atMs) => clockText(atMs, zone);
+  return (atMs) => clockText(Math.floor(atMs), zone);
 }

@@ -1,7 +1,8 @@
 "use client";
 
 import { useTranslations } from "use-intl";
-import { Ask, Foot, Leaves } from "@/components/bench/ask";
+import { Ask, Foot } from "@/components/bench/ask";
+import { Pair } from "@/components/bench/pair";
 import type { SeenBench } from "@/components/bench/seen";
 import { itemName, modelName } from "@/components/bench/words";
 import { Pages } from "@/components/choose/pages";
@@ -10,6 +11,7 @@ import { AcrossPlate, Plate } from "@/components/ui/plate";
 import { findOperation, offersOf, onlyWay } from "@/lib/bench/offers";
 import type { Choice, KioskState, Screen } from "@/lib/bench/schema";
 import { showTicket } from "@/lib/codes/ticket-code";
+import type { TicketOperation } from "@/lib/kiosks/schema";
 import { standardMinutes } from "@/lib/seam/verdict";
 
 type OfferState = Extract<Screen, { at: "offer" }>;
@@ -28,7 +30,13 @@ export function OfferScreen({ state, view, tap, screen }: SeenBench & { screen: 
       <div className="grid min-h-0 grid-rows-[auto_minmax(0,1fr)_auto]">
         <Ask
           className="pt-1 pb-4 text-k-5"
-          book={<code className="text-k-4">{showTicket(screen.ticket)}</code>}
+          book={
+            only && more.length === 0 ? (
+              itemName(state, only).operation
+            ) : (
+              <code className="text-k-4">{showTicket(screen.ticket)}</code>
+            )
+          }
           day={more.length > 0 ? t("offer") : t("offerOne")}
         />
         {only && more.length === 0 ? (
@@ -57,7 +65,7 @@ export function OfferScreen({ state, view, tap, screen }: SeenBench & { screen: 
           }
           day={
             <p className="self-center text-k-2 font-semibold">
-              {ticket && modelName(ticket)}
+              <code>{showTicket(screen.ticket)}</code> {ticket && modelName(ticket)}
               <span className="block text-k-1 font-medium text-ink-2">
                 {ticket &&
                   (ticket.quantity > 1
@@ -72,20 +80,20 @@ export function OfferScreen({ state, view, tap, screen }: SeenBench & { screen: 
   );
 }
 
-/** One way on: one tap across the seam. */
+/** One way on: what it should take against what it took so far, and one tap across the seam. */
 function OneOffer({ state, choice, tap }: Pick<SeenBench, "state" | "tap"> & { choice: Choice }) {
   const t = useTranslations("pick");
+  const bench = useTranslations("bench");
+  const operation = findOperation(state, choice);
   return (
-    <div className="grid content-center gap-8">
-      <Leaves
-        className="items-baseline"
-        book={<p className="text-right text-k-5 font-bold">{itemName(state, choice).operation}</p>}
-        day={
-          <p className="text-k-3">
-            <OfferTime state={state} choice={choice} />
-          </p>
-        }
-      />
+    <div className="grid content-evenly">
+      {operation && (
+        <Pair
+          pair={pairOf(operation)}
+          standard={operation.quantity > 1 ? bench("standardLot") : bench("standardOne")}
+          actual={bench("actual")}
+        />
+      )}
       <div className="grid px-8 portrait:px-6">
         <AcrossPlate
           icon={choice.activity === "inspect" ? "find" : choice.activity}
@@ -98,6 +106,13 @@ function OneOffer({ state, choice, tap }: Pick<SeenBench, "state" | "tap"> & { c
       </div>
     </div>
   );
+}
+
+/** All of an operation: setup and every piece that is or will be good, against all time booked. */
+function pairOf({ setupSeconds, runSeconds, good, openQuantity, actualSeconds }: TicketOperation) {
+  const standardSeconds =
+    runSeconds === null ? null : (setupSeconds ?? 0) + runSeconds * (good + openQuantity);
+  return { standardSeconds, actualSeconds };
 }
 
 function OfferWords({ state, choice }: { state: KioskState; choice: Choice }) {

@@ -32,7 +32,7 @@ export function ScanScreen({
   const doubtAt = says && "doubtful" in says ? says.doubtful : null;
   return (
     <KioskFrame state={state}>
-      <div className="grid min-h-0 grid-rows-[64px_minmax(0,1fr)_auto] portrait:grid-rows-[88px_minmax(0,1fr)_auto]">
+      <div className="grid min-h-0 grid-rows-[58px_minmax(0,1fr)_auto] portrait:grid-rows-[88px_minmax(0,1fr)_auto]">
         <Ask
           book={says ? t("again") : <ScanAsk screen={screen} />}
           day={<ScanSays says={says} digits={digits} />}

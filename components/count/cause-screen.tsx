@@ -18,10 +18,9 @@ export function CauseScreen({ state, tap, screen }: Seen & { screen: CauseState 
   const t = useTranslations("cause");
   const words = useTranslations("common");
   const { counts, item } = screen;
-  const count = useTranslations("count");
   const bad = [
-    counts.rework > 0 && `${counts.rework} ${count("rework")}`,
-    counts.scrap > 0 && `${counts.scrap} ${count("scrap")}`,
+    counts.rework > 0 && t("rework", { count: counts.rework }),
+    counts.scrap > 0 && t("scrap", { count: counts.scrap }),
   ];
   return (
     <KioskFrame state={state}>

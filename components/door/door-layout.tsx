@@ -17,8 +17,15 @@ export function DoorLayout({
   slots,
   foot,
   pad,
-}: Seen & { ask: ReactNode; slots: ReactNode; foot: ReactNode; pad: ReactNode }) {
-  const t = useTranslations("door");
+  badge,
+}: Seen & {
+  ask: ReactNode;
+  slots: ReactNode;
+  foot: ReactNode;
+  pad: ReactNode;
+  /** what stands beside the picture of a badge */
+  badge: ReactNode;
+}) {
   return (
     <div className="kiosk leaves" style={{ gridTemplateRows: "minmax(0, 1fr)" }}>
       <PageGrain />
@@ -33,19 +40,23 @@ export function DoorLayout({
           <LinkTag state={state} />
           <MuteButton state={state} tap={tap} />
         </div>
-        <DoorClock state={state} />
-        <p className="door-badge">
-          <span className="ml-auto max-w-[300px]">{t("badge")}</span>
-          <Icon name="badge" />
-        </p>
-        <div className="door-ask">
-          <h1 aria-live="polite" className="text-k-4 font-bold leading-[1.08]">
-            {ask}
-          </h1>
-          {slots}
+        <div className="door-leaf">
+          <DoorClock state={state} />
+          <p className="door-badge">
+            <span className="max-w-[340px] [text-wrap:balance]">{badge}</span>
+            <Icon name="badge" />
+          </p>
+          <div className="door-foot">{foot}</div>
         </div>
-        <div className="door-pad grid">{pad}</div>
-        <div className="door-foot">{foot}</div>
+        <div className="door-leaf">
+          <div className="door-ask">
+            <h1 aria-live="polite" className="text-k-4 font-bold leading-[1.08]">
+              {ask}
+            </h1>
+            {slots}
+          </div>
+          <div className="door-pad">{pad}</div>
+        </div>
       </main>
       <div className="absolute inset-x-8 top-2 z-10 portrait:inset-x-6">
         <UndoBar state={state} tap={tap} className="w-full" />
@@ -59,7 +70,8 @@ function DoorClock({ state }: Pick<Seen, "state">) {
   const language = useLocale();
   const zone = useTimeZone() ?? "UTC";
   const [hours, minutes] = clock(state.nowMs).split(":");
-  const day = new Intl.DateTimeFormat(language, {
+  // English as the hall says it: the day before the month, without commas.
+  const day = new Intl.DateTimeFormat(language === "en" ? "en-GB" : language, {
     timeZone: zone,
     weekday: "long",
     day: "numeric",
@@ -72,7 +84,7 @@ function DoorClock({ state }: Pick<Seen, "state">) {
         <i>:</i>
         <span>{minutes}</span>
       </b>
-      <span>{day.format(state.nowMs)}</span>
+      <span>{day.format(state.nowMs).replace(",", "")}</span>
     </p>
   );
 }

@@ -32,6 +32,7 @@ export function DoorScreen({
     <DoorLayout
       state={state}
       tap={tap}
+      badge={t("badge")}
       ask={<span className={says ? "text-danger" : ""}>{says ? t(says) : t("number")}</span>}
       slots={
         <Slots

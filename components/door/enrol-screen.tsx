@@ -33,7 +33,7 @@ export function EnrolScreen({
         <p className="max-w-[460px] self-end pr-8 pl-10 text-k-2">{t("how")}</p>
         <label
           htmlFor="enrol-code"
-          className="self-center pr-10 pl-8 text-right text-k-4 font-bold"
+          className="h-touch self-start pr-10 pl-8 text-right text-k-4 font-bold leading-[112px]"
         >
           {t("code")}
         </label>

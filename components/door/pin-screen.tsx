@@ -24,6 +24,12 @@ export function PinScreen({ state, tap, screen }: Seen & { screen: PinScreenStat
       state={state}
       tap={tap}
       ask={<PinAsk state={state} screen={screen} />}
+      badge={
+        <>
+          <code className="block">{screen.worker}</code>
+          {nameOf(state, screen.worker)}
+        </>
+      }
       slots={
         <Slots
           hidden
@@ -61,7 +67,11 @@ function PinAsk({ state, screen }: { state: KioskState; screen: PinScreenState }
   if (says) return <span className="text-danger">{t(says)}</span>;
   if (reason.for === "end-shift") return t("askEnd");
   if (reason.for === "reassign") return t("askReassign");
-  const known =
-    state.sessions[worker]?.name ?? state.cell?.people.find((each) => each.worker === worker)?.name;
+  const known = nameOf(state, worker);
   return known ? t("askName", { name: known }) : t("ask");
+}
+
+/** The name behind a number where this tablet knows it; it tells nobody whether a number exists. */
+function nameOf({ sessions, cell }: KioskState, worker: string): string | undefined {
+  return sessions[worker]?.name ?? cell?.people.find((each) => each.worker === worker)?.name;
 }

@@ -133,12 +133,12 @@ export const en = {
     form: "that is no ticket number",
     badge: "that is a badge, not a ticket",
     carrier: "that is a carrier, not a ticket",
-    check: "a digit of {ticket} is not right",
+    check: "one digit is not right",
     "not-found": "no ticket {ticket}",
-    away: "{ticket} cannot be looked up now",
+    away: "it cannot be looked up now",
   },
   pick: {
-    tickets: "Tickets of {cell}",
+    tickets: "Tickets for {cell}",
     ticketsHow: "Tap the one in your hands",
     none: "No ticket waits here",
     noneHow: "Scan one, or ask your lead what is next.",
@@ -234,7 +234,8 @@ export const en = {
   cause: {
     ask: "Where did it come from?",
     here: "This operation",
-    before: "Before it",
+    rework: "{count, plural, other {# rework}}",
+    scrap: "{count, plural, other {# scrap}}",
   },
   scrap: {
     title: "{count, plural, one {# piece is scrap} other {# pieces are scrap}}",
@@ -268,6 +269,7 @@ export const en = {
   },
   hours: {
     title: "My hours today",
+    attendedDay: "{time} attended",
     note: "As tapped. What is paid follows the pay rules.",
     attended: "Attended",
     direct: "On tickets",
@@ -281,7 +283,7 @@ export const en = {
     wrongTicket: "Wrong ticket",
     wrongTicketHow: "move the last work",
     wrongCount: "Wrong count",
-    wrongCountHow: "your lead looks at it",
+    wrongCountHow: "for your lead",
     whichCount: "Which count is wrong?",
     countLine: "{good, number} good, {rework, number} rework, {scrap, number} scrap",
     at: "at {time}",

@@ -136,12 +136,12 @@ export const es: Messages = {
     form: "ese no es un número de orden",
     badge: "eso es una credencial, no una orden",
     carrier: "eso es un carro, no una orden",
-    check: "un dígito de {ticket} no es correcto",
+    check: "un dígito no es correcto",
     "not-found": "no hay orden {ticket}",
-    away: "no se puede buscar {ticket} ahora",
+    away: "ahora no se puede buscar",
   },
   pick: {
-    tickets: "Órdenes de {cell}",
+    tickets: "Órdenes para {cell}",
     ticketsHow: "Toque la que tiene en las manos",
     none: "Ninguna orden espera aquí",
     noneHow: "Lea una, o pregunte a su líder qué sigue.",
@@ -237,7 +237,8 @@ export const es: Messages = {
   cause: {
     ask: "¿De dónde vino?",
     here: "Esta operación",
-    before: "Antes de ella",
+    rework: "{count, plural, one {# por retrabajar} other {# por retrabajar}}",
+    scrap: "{count, plural, one {# de desecho} other {# de desecho}}",
   },
   scrap: {
     title: "{count, plural, one {# pieza es desecho} other {# piezas son desecho}}",
@@ -271,6 +272,7 @@ export const es: Messages = {
   },
   hours: {
     title: "Mis horas de hoy",
+    attendedDay: "{time} de asistencia",
     note: "Como se tocaron. Lo que se paga sigue las reglas de pago.",
     attended: "Asistencia",
     direct: "En órdenes",
@@ -284,7 +286,7 @@ export const es: Messages = {
     wrongTicket: "Orden equivocada",
     wrongTicketHow: "pasar el último trabajo",
     wrongCount: "Cuenta equivocada",
-    wrongCountHow: "su líder la revisa",
+    wrongCountHow: "para su líder",
     whichCount: "¿Qué cuenta está mal?",
     countLine: "{good, number} buenos, {rework, number} retrabajo, {scrap, number} desecho",
     at: "a las {time}",
