@@ -57,7 +57,8 @@ export function wallClock(atMs: number, zone: string): Temporal.PlainDateTime {
 
 /** The zone's offset from UTC at an instant, in milliseconds; east is positive. */
 export function offsetMs(atMs: number, zone: string): number {
-  return utcMs(wallClock(atMs, zone)) - atMs;
+  const instant = Temporal.Instant.fromEpochMilliseconds(atMs);
+  return instant.toZonedDateTimeISO(zoneAt(atMs, zone)).offsetNanoseconds / 1_000_000;
 }
 
 /** Reads local wall time as if it were UTC: the base on which offsets are taken. */
