@@ -44,13 +44,25 @@ export function check<T>(value: unknown, schema: z.ZodType<T>): Result<T> {
 
 /** Lists the fields of a Zod error as dotted paths, one entry per unknown field. */
 export function fieldErrors(error: z.ZodError): FieldError[] {
-  return error.issues.flatMap((issue) => {
-    const path = issue.path.map(String);
-    if (issue.code !== "unrecognized_keys")
-      return [{ path: path.join("."), message: issue.message }];
+  return error.issues.flatMap((issue) => errorsOf(issue, []));
+}
+
+function errorsOf(issue: z.core.$ZodIssue, before: PropertyKey[]): FieldError[] {
+  const path = [...before, ...issue.path];
+  if (issue.code === "unrecognized_keys") {
     return issue.keys.map((key) => ({
-      path: [...path, key].join("."),
+      path: [...path, key].map(String).join("."),
       message: "This field is not known here.",
     }));
-  });
+  }
+  const meant = issue.code === "invalid_union" ? meantForm(issue.errors) : undefined;
+  if (meant) return meant.flatMap((inner) => errorsOf(inner, path));
+  return [{ path: path.map(String).join("."), message: issue.message }];
+}
+
+/** Of the forms that a value may have, the one that it has but for some of its fields. */
+function meantForm(forms: z.core.$ZodIssue[][]): z.core.$ZodIssue[] | undefined {
+  const isOther = ({ code, path }: z.core.$ZodIssue) =>
+    path.length === 0 && (code === "invalid_type" || code === "invalid_value");
+  return forms.find((issues) => issues.length > 0 && !issues.some(isOther));
 }

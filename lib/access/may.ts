@@ -33,6 +33,7 @@ export const permissions = {
   "records.correct": { lead: "cells" },
   "standards.read": { planner: "site", lead: "site" },
   calculate: { planner: "site" },
+  "calculate.pay": { payroll: "site" },
 } as const satisfies Record<string, Partial<Record<Role, Reach>>>;
 
 export type Action = keyof typeof permissions;

@@ -7,6 +7,7 @@ import { ticketsQuery } from "@/lib/api/tickets";
 import { checkCodeRequest } from "@/lib/codes/schema";
 import { enrolRequest, signInRequest, timeQuery } from "@/lib/kiosks/schema";
 import { eventBatch } from "@/lib/ledger/schema";
+import { payRequest } from "@/lib/pay/request";
 
 /** A route of the contract: who may call it, what it takes and gives. */
 export interface ApiRoute {
@@ -148,6 +149,16 @@ const integrationRoutes: ApiRoute[] = [
     may: "calculate",
     body: checkCodeRequest,
     answer: "CodeReading",
+  },
+  {
+    method: "post",
+    path: "/api/v1/calculate/pay",
+    name: "pay",
+    summary: "What a worker's time comes to under a pay policy, with the reason for every second.",
+    actor: "key",
+    may: "calculate.pay",
+    body: payRequest,
+    answer: "PayAnswer",
   },
   {
     method: "get",

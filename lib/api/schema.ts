@@ -13,6 +13,7 @@ import {
   signedIn,
 } from "@/lib/kiosks/schema";
 import { instant } from "@/lib/ledger/schema";
+import { payAnswer } from "@/lib/pay/answer";
 
 /** RFC 9457, as every refusal is answered; `errors` names the fields of invalid input. */
 export const problem = z.object({
@@ -46,6 +47,7 @@ export const answers = {
   SegmentPage: segmentPage,
   Split: splitAnswer,
   CodeReading: codeReading,
+  PayAnswer: payAnswer,
   Enrolled: enrolled,
   KioskTime: kioskTime,
   KioskCell: kioskCell,
