@@ -108,8 +108,9 @@ function answerSchemas(): Json {
 
 function responsesOf(route: ApiRoute): Json {
   const refusals: Record<number, string> = {
-    ...(route.actor === "nobody" ? {} : { 401: "Who is calling is not known." }),
-    ...(route.actor === "key" || route.actor === "worker" ? { 403: "Not yours to do." } : {}),
+    ...(route.actor === "nobody"
+      ? {}
+      : { 401: "Who is calling is not known.", 403: "Not yours to do, or taken out of use." }),
     ...(route.body ? { 400: "Not JSON.", 413: "Over 1 MB." } : {}),
     ...(route.body || route.query || route.path.includes("{")
       ? { 422: "Something cannot be taken; `errors` names it by path." }

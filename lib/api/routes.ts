@@ -5,7 +5,7 @@ import { segmentsQuery } from "@/lib/api/segments";
 import { splitRequest } from "@/lib/api/split";
 import { ticketsQuery } from "@/lib/api/tickets";
 import { checkCodeRequest } from "@/lib/codes/schema";
-import { enrolRequest, signInRequest, timeQuery } from "@/lib/kiosks/schema";
+import { benchQuery, enrolRequest, signInRequest, timeQuery } from "@/lib/kiosks/schema";
 import { eventBatch } from "@/lib/ledger/schema";
 import { payRequest } from "@/lib/pay/request";
 
@@ -75,6 +75,7 @@ const kioskRoutes: ApiRoute[] = [
     name: "readBench",
     summary: "What the worker is on, today's seconds, and the events of the open window.",
     actor: "worker",
+    query: benchQuery,
     answer: "Bench",
   },
   {

@@ -102,6 +102,9 @@ export const kioskTicket = z.object({
 export type KioskTicket = z.infer<typeof kioskTicket>;
 
 // GET /api/kiosk/bench ----------------------------------------------------------------------------
+/** A lead may look at the bench of somebody of the own cells. */
+export const benchQuery = z.strictObject({ worker: workerNumber.optional() });
+
 /** A ticket operation someone is on, with what the bench must say of it. */
 export const benchItem = z.object({
   ticket: z.string(),

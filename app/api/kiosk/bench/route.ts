@@ -1,14 +1,10 @@
-import { z } from "zod";
 import { database } from "@/app/_server/database";
 import { handle } from "@/app/_server/handle";
 import { findBench } from "@/db/kiosks/bench";
 import { findWorkerToSignIn } from "@/db/people/sign-in";
 import { cellsOf, reachOf } from "@/lib/access/may";
-import { workerNumber } from "@/lib/ledger/schema";
+import { benchQuery } from "@/lib/kiosks/schema";
 import { no, ok } from "@/lib/result";
-
-/** A lead may look at the bench of somebody of the own cells. */
-const benchQuery = z.strictObject({ worker: workerNumber.optional() });
 
 /** What a worker's own screen shows now. */
 export const GET = handle(
