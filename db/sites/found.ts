@@ -26,9 +26,11 @@ export async function findFirstSite(db: Db) {
  * Founds an empty site, whose rules hold from the beginning of time: an event that reaches it late
  * is older than it.
  */
-export async function foundSite(db: Db, site: { name: string; timeZone: string }): Promise<string> {
-  const id = uuidv7();
-  const { name, timeZone } = site;
+export async function foundSite(
+  db: Db,
+  site: { id?: string; name: string; timeZone: string },
+): Promise<string> {
+  const { id = uuidv7(), name, timeZone } = site;
   await db.transaction(async (tx) => {
     await tx.insert(sites).values({ id, name });
     const effectiveFrom = new Date(0);

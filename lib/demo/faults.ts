@@ -31,11 +31,9 @@ const found: Record<string, readonly Fault[]> = {
     { causedBy: "450", defect: "cold-joint" },
     { causedBy: "430", defect: "out-of-phase" },
   ],
-  "570": [
+  "580": [
     { causedBy: "520", defect: "buzz" },
     { causedBy: "530", defect: "string-spacing" },
-  ],
-  "580": [
     { causedBy: "410", defect: "scratch" },
     { causedBy: "560", defect: "high-action" },
   ],

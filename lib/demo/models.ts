@@ -30,7 +30,7 @@ export const models: readonly DemoModel[] = [
     electric: false,
     effort: 1,
     share: 0.24,
-    lots: [6, 6, 8, 8, 12],
+    lots: [6, 8, 8, 12],
     options: ["Natural satin", "Sunburst gloss"],
   },
   {
@@ -40,7 +40,7 @@ export const models: readonly DemoModel[] = [
     electric: false,
     effort: 0.9,
     share: 0.17,
-    lots: [4, 6, 6, 8],
+    lots: [6, 6, 8],
     options: ["Cherry satin", "Natural gloss"],
   },
   {
@@ -70,7 +70,7 @@ export const models: readonly DemoModel[] = [
     electric: true,
     effort: 1,
     share: 0.2,
-    lots: [6, 8, 8, 12],
+    lots: [8, 8, 12],
     options: ["Spruce green", "Oxblood burst"],
   },
   {

@@ -51,8 +51,7 @@ const table: Record<string, { cell: CellName; rows: readonly Row[] }[]> = {
       rows: [
         ["010", "Select and match wood", "FAS", 0, 8, 0],
         ["020", "Plane and thickness plates", "FA", 8, 11, 0, "dust noise rollers"],
-        ["030", "Join top", "FA", 0, 9, 14],
-        ["040", "Join back", "FA", 0, 9, 14],
+        ["030", "Join top and back", "FA", 0, 18, 14],
         ["050", "Glue up body blank", "S", 6, 9, 14, "crush"],
         ["060", "Saw neck blank", "FAS", 6, 6, 0, "dust noise"],
       ],
@@ -75,8 +74,7 @@ const table: Record<string, { cell: CellName; rows: readonly Row[] }[]> = {
       cell: "Body",
       rows: [
         ["120", "Inlay rosette", "F", 0, 14, 4],
-        ["130", "Brace top", "FA", 0, 24, 12],
-        ["140", "Brace back", "F", 0, 15, 12],
+        ["130", "Brace top and back", "FA", 0, 36, 12],
         ["150", "Tune top", "FA", 0, 17, 0],
         ["160", "Bend sides", "FA", 10, 17, 12, "hot-surface"],
         ["170", "Block and line rim", "FA", 0, 26, 4],
@@ -100,10 +98,8 @@ const table: Record<string, { cell: CellName; rows: readonly Row[] }[]> = {
     {
       cell: "Neck",
       rows: [
-        ["240", "Fit truss rod", "FAS", 0, 9, 0],
-        ["250", "Glue fingerboard", "FAS", 0, 9, 14, "crush"],
-        ["260", "Inlay markers", "FAS", 0, 16, 0],
-        ["270", "Radius fingerboard", "FAS", 6, 9, 0, "dust"],
+        ["250", "Fit truss rod and glue fingerboard", "FAS", 0, 18, 14, "crush"],
+        ["260", "Radius and inlay fingerboard", "FAS", 6, 25, 0, "dust"],
         ["280", "Fret press and level", "FAS", 8, 18, 0, "crush"],
         ["290", "Trim and bevel frets", "FAS", 0, 10, 0],
         ["300", "Carve neck", "FAS", 0, 22, 0, "dust"],
@@ -138,8 +134,7 @@ const table: Record<string, { cell: CellName; rows: readonly Row[] }[]> = {
     {
       cell: "Pickups",
       rows: [
-        ["430", "Wind pickups", "ASe2", 6, 13, 0],
-        ["440", "Pot pickups", "ASe3", 5, 7, 2, "hot-surface fumes"],
+        ["430", "Wind and pot pickups", "ASe2", 8, 20, 2, "hot-surface fumes"],
         ["450", "Build harness", "FASe", 0, 14, 0, "hot-surface fumes"],
       ],
     },
@@ -162,18 +157,14 @@ const table: Record<string, { cell: CellName; rows: readonly Row[] }[]> = {
       cell: "Final set-up",
       rows: [
         ["520", "Level and crown frets", "FAS", 0, 18, 0],
-        ["530", "Cut nut", "FAS", 0, 12, 0],
-        ["540", "Fit saddle", "FA", 0, 10, 0],
+        ["530", "Cut nut and saddle", "FAS", 0, 18, 0],
         ["550", "String and tune", "FAS", 0, 10, 24],
         ["560", "Set action and intonation", "FAS", 0, 16, 0],
       ],
     },
     {
       cell: "Inspection",
-      rows: [
-        ["570", "Play test", "FASi", 0, 7, 0],
-        ["580", "Final inspection", "FASi", 0, 6, 0],
-      ],
+      rows: [["580", "Play test and final inspection", "FASi", 0, 12, 0]],
     },
     { cell: "Final set-up", rows: [["590", "Clean, case and label", "FAS", 0, 8, 0]] },
   ],

@@ -58,12 +58,16 @@ function isFree({ crew, toDo, toRework, operation }: Step): boolean {
   return crew.size === 1 && operation.together === 1 && toDo.length >= JOIN_PIECES;
 }
 
-/** What was left lying goes on first, then what must be put right, then one of the most urgent. */
+/**
+ * What was left lying goes on first, then what must be put right, then one of the most urgent that
+ * nobody is on; where there is none, a second person joins.
+ */
 function begin(waiting: readonly InHand[], person: CastMember, random: Random): Job {
+  const free = waiting.filter(({ step }) => step.crew.size === 0);
   const first =
     waiting.find(({ step }) => step.lastWorker === person.number) ??
     waiting.find(({ step }) => step.toDo.length === 0) ??
-    random.pick(waiting.slice(0, 3));
+    random.pick((free.length > 0 ? free : waiting).slice(0, 3));
   const { operation, toDo } = first.step;
   const activity = toDo.length === 0 ? "rework" : operation.activity;
   const inHand = activity === "run" ? withMore(first, waiting) : [first];

@@ -18,8 +18,8 @@ import { doJob, itemOf } from "@/lib/simulation/work";
 /** Chances in one shift or after one job. */
 const IS_LATE = 0.08;
 const CLEANS = 0.8;
-const DOES_OTHER_WORK = 0.14;
-const LEAD_DOES_OTHER_WORK = 0.6;
+const DOES_OTHER_WORK = 0.13;
+const LEAD_DOES_OTHER_WORK = 0.5;
 const FORGETS_TO_TAP = 0.03;
 
 const LEAD_WORK = ["meeting", "training", "jigs", "waiting-material", "prototype"];
@@ -104,7 +104,7 @@ function* oneThing(bench: Bench): Stretch {
     yield* tooSoon(bench);
   } else if (random.chance(person.leads.length > 0 ? LEAD_DOES_OTHER_WORK : DOES_OTHER_WORK)) {
     const code = person.leads.length > 0 ? random.pick(LEAD_WORK) : undefined;
-    yield* otherWork(bench, random.whole(9, person.leads.length > 0 ? 45 : 32), code);
+    yield* otherWork(bench, random.whole(14, 45), code);
   } else {
     yield* nextJob(bench);
   }
@@ -114,7 +114,7 @@ function* nextJob(bench: Bench): Stretch {
   const { hall, person } = bench;
   const job = takeJob(hall.open, person, bench.at, hall.random);
   if (job) yield* doJob(bench, job);
-  else yield* otherWork(bench, hall.random.whole(10, 25), hall.random.pick(WAITS));
+  else yield* otherWork(bench, hall.random.whole(15, 30), hall.random.pick(WAITS));
 }
 
 /** Takes up a ticket whose operation before is still in other hands, and is sent away again. */

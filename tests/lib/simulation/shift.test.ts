@@ -98,9 +98,9 @@ describe("shiftOf", () => {
     const hall = makeHall([ticket]);
     let once = 1;
     const events = play({ ...hall, troubles: { ...hall.troubles, isHasty: () => once-- === 1 } });
-    const item = { ticket: ticket.number, operation: "240" };
+    const item = { ticket: ticket.number, operation: "250" };
     expect(events.find(({ kind }) => kind === "work")).toMatchObject({ items: [item] });
     expect(events.find(({ kind }) => kind === "pause")).toMatchObject({ items: [item] });
-    expect(ticket.steps.find(({ operation }) => operation.code === "240")?.crew.size).toBe(0);
+    expect(ticket.steps.find(({ operation }) => operation.code === "250")?.crew.size).toBe(0);
   });
 });
