@@ -19,6 +19,8 @@ export interface IncomingBatch {
   isRevoked?: boolean;
   events: readonly unknown[];
   receivedAt: Date;
+  /** When each record came, epoch milliseconds: of a history, which is not handed in at once. */
+  arrivals?: readonly number[];
   /** What the tablet's own clock showed when it sent them; as received unless given. */
   deviceMs?: number;
   /** Sessions proved by what came along; those opened by a sign-in are known. */
@@ -40,10 +42,10 @@ const TRIES_MAX = 5;
  * not at all. Sent twice it books once. Two statements, where nobody books for the same workers.
  */
 export async function bookEvents(scope: Scope, batch: IncomingBatch): Promise<Result<BookedBatch>> {
-  const { kioskId, isRevoked = false, proved = [], withBench = false } = batch;
+  const { kioskId, isRevoked = false, proved = [], withBench = false, arrivals } = batch;
   const receivedMs = batch.receivedAt.getTime();
   const deviceMs = batch.deviceMs ?? receivedMs;
-  const records = receiveRecords(batch.events, { kioskId, receivedMs, deviceMs });
+  const records = receiveRecords(batch.events, { kioskId, receivedMs, deviceMs, arrivals });
   const benchAtMs = withBench ? receivedMs : null;
   const asked = askedBy(records, { kioskId, proved, benchAtMs });
   for (let tries = 0; tries < TRIES_MAX; tries += 1) {
@@ -51,7 +53,7 @@ export async function bookEvents(scope: Scope, batch: IncomingBatch): Promise<Re
     const decided = decideBooking(records, context, { kioskId, isRevoked, receivedMs, proved });
     const timelines = decided.timelines.filter(({ isTouched }) => isTouched);
     const isNew = decided.rows.length + decided.sessions.length > 0;
-    const booking = { ...decided, timelines, siteId: scope.siteId, kioskId, receivedMs };
+    const booking = { ...decided, timelines, siteId: scope.siteId, kioskId };
     if (!isNew || (await book(scope, booking))) return ok({ ...decided, context });
   }
   return no("unavailable", "Others are booking for the same people. Send it again in a moment.", {
@@ -64,11 +66,8 @@ export async function bookEvents(scope: Scope, batch: IncomingBatch): Promise<Re
  * meanwhile, and nothing was written: read and decide again.
  */
 export async function book(scope: Scope, booking: Booking): Promise<boolean> {
-  const receivedAt = new Date(booking.receivedMs).toISOString();
   try {
-    await scope.db.execute(
-      sql`select book(${booking.siteId}, ${receivedAt}::timestamptz, ${payloadOf(booking)}::jsonb)`,
-    );
+    await scope.db.execute(sql`select book(${booking.siteId}, ${payloadOf(booking)}::jsonb)`);
     return true;
   } catch (error) {
     if (isInterference(error)) return false;

@@ -9,7 +9,6 @@ type Fields = Record<string, unknown>;
 export interface Booking {
   siteId: string;
   kioskId: string | null;
-  receivedMs: number;
   rows: readonly LedgerRow[];
   timelines: readonly DerivedTimeline[];
   sessions: readonly NewSession[];
@@ -85,18 +84,17 @@ function instant(ms: number | null): string | null {
   return ms === null ? null : new Date(ms).toISOString();
 }
 
-function eventColumns(row: LedgerRow, { kioskId, receivedMs }: Booking): Fields {
+function eventColumns(row: LedgerRow, { kioskId }: Booking): Fields {
   const { uncertaintyMs, note, ...columns } = row;
   return {
     ...columnsOf(columns),
     uncertainty_ms: uncertaintyMs,
-    received_at: instant(receivedMs),
     kiosk_id: kioskId,
   };
 }
 
 /** A record that is kept and not counted hangs on its kiosk until a person settles it. */
-function keptEnd(row: LedgerRow, { siteId, kioskId, receivedMs }: Booking): Fields[] {
+function keptEnd(row: LedgerRow, { siteId, kioskId }: Booking): Fields[] {
   if (!row.keptFor) return [];
   return [
     {
@@ -106,7 +104,7 @@ function keptEnd(row: LedgerRow, { siteId, kioskId, receivedMs }: Booking): Fiel
       source: "receipt",
       worker_id: row.workerId,
       kiosk_id: kioskId,
-      at: instant(row.atMs ?? receivedMs),
+      at: instant(row.atMs ?? row.receivedMs),
       settled: false,
     },
   ];

@@ -421,7 +421,7 @@ end $$;
 -- Books what the rules in lib/ decided, all of it or nothing: locks the heads in the order of the
 -- workers, checks that nobody else derived them meanwhile (BM001: read again), adds to the ledger,
 -- and puts the derived rows of the windows right.
-create function book(p_site uuid, p_received timestamptz, p jsonb) returns void
+create function book(p_site uuid, p jsonb) returns void
 language plpgsql
 set search_path = public, pg_temp
 as $$
@@ -429,9 +429,11 @@ declare
   locked integer;
   added integer;
 begin
-  if jsonb_array_length(p -> 'events') > 0 then
-    perform make_partition('clock_events', p_received);
-  end if;
+  perform make_partition('clock_events', m.month)
+  from (
+    select distinct date_trunc('month', e.received_at, 'UTC') as month
+    from jsonb_to_recordset(p -> 'events') as e (received_at timestamptz)
+  ) m;
   perform make_partition('segments', m.month)
   from (
     select distinct date_trunc('month', s.start_at, 'UTC') as month
@@ -451,8 +453,9 @@ begin
   end if;
 
   insert into event_ids (site_id, id, received_at, body_hash)
-  select p_site, e.id, p_received, e.body_hash
-  from jsonb_to_recordset(p -> 'events') as e (id uuid, body_hash text)
+  select p_site, e.id, e.received_at, e.body_hash
+  from jsonb_to_recordset(p -> 'events') as e
+    (id uuid, received_at timestamptz, body_hash text)
   order by e.id
   on conflict do nothing;
   get diagnostics added = row_count;

@@ -27,10 +27,11 @@ export async function bookHistory(
       known = Math.max(booked, FIRST_LOOK);
     }
     const kioskId = idOf(kiosks, batch[0]!.cell);
-    const receivedAt = new Date(Math.max(...batch.map(({ receivedAtMs }) => receivedAtMs)));
+    const arrivals = batch.map(({ receivedAtMs }) => receivedAtMs);
     const answer = await bookEvents(scope, {
       kioskId,
-      receivedAt,
+      receivedAt: new Date(Math.max(...arrivals)),
+      arrivals,
       events: batch.map(({ event }) => event),
     });
     assert(answer.ok, "the demo's events are nobody else's");

@@ -72,7 +72,7 @@ async function deriveAgain(
     if (changes === 0) return 0;
     const timelines = [{ workerId: window.workerId, window, derived, isTouched: true }];
     const booking = { siteId: scope.siteId, kioskId: null, rows: [], timelines, sessions: [] };
-    if (await book(scope, { ...booking, receivedMs: derived.asOfMs })) return changes;
+    if (await book(scope, booking)) return changes;
   }
   throw new Error(`worker ${number}: the timeline changes faster than it can be derived`);
 }

@@ -68,7 +68,7 @@ export const models: readonly DemoModel[] = [
     kind: "Electric guitar",
     build: "solid",
     electric: true,
-    effort: 1,
+    effort: 0.96,
     share: 0.2,
     lots: [8, 8, 12],
     options: ["Spruce green", "Oxblood burst"],

@@ -16,6 +16,8 @@ export interface ReceivedRecord {
   hash: string;
   /** The record as it came, as text; all that there is of one that cannot be read. */
   text: string;
+  /** When the server had it. */
+  receivedMs: number;
   /** Null where it cannot be read or placed in time. */
   readable: { event: ClockEvent; placed: Placed } | null;
 }
@@ -23,6 +25,7 @@ export interface ReceivedRecord {
 /** A row of the ledger; instants are epoch milliseconds. */
 export interface LedgerRow {
   id: string;
+  receivedMs: number;
   kind: string;
   workerId: string | null;
   workerNumber: string | null;
@@ -128,7 +131,7 @@ function duplicate(
   };
 }
 
-function unreadable({ id, hash, text }: ReceivedRecord): Decided {
+function unreadable({ id, hash, text, receivedMs }: ReceivedRecord): Decided {
   const nothing = {
     workerId: null,
     workerNumber: null,
@@ -146,7 +149,7 @@ function unreadable({ id, hash, text }: ReceivedRecord): Decided {
     note: null,
   };
   const kept = { keptFor: "unreadable", kind: "unreadable" } as const;
-  const row = { ...nothing, ...kept, id, body: { raw: text }, bodyHash: hash };
+  const row = { ...nothing, ...kept, id, receivedMs, body: { raw: text }, bodyHash: hash };
   return {
     id,
     verdict: "looseEnd",
@@ -170,7 +173,7 @@ function knownAround(event: ClockEvent, placed: Placed, context: BookingContext,
 }
 
 function rowOf(
-  { id, hash, event, placed }: ReceivedRecord & { event: ClockEvent; placed: Placed },
+  { id, hash, event, placed, receivedMs }: ReceivedRecord & { event: ClockEvent; placed: Placed },
   decision: {
     context: BookingContext;
     around: ReturnType<typeof knownAround>;
@@ -185,6 +188,7 @@ function rowOf(
   const items = sharedItems(act);
   return {
     id,
+    receivedMs,
     kind: event.kind,
     workerId: around.worker?.id ?? null,
     workerNumber: event.worker,
@@ -220,13 +224,13 @@ function bodyOf(event: ClockEvent): EventBody {
 function ledgerEvent(row: LedgerRow, event: ClockEvent, batch: Batch): LedgerEvent {
   return {
     id: row.id,
-    atMs: row.atMs ?? batch.receivedMs,
+    atMs: row.atMs ?? row.receivedMs,
     seq: event.clock.seq,
     kiosk: batch.kioskId,
     session: event.session,
     cell: row.cellId,
     by: row.by,
-    receivedMs: batch.receivedMs,
+    receivedMs: row.receivedMs,
     weights: row.weights ?? [],
     questions: row.questions ?? [],
     body: bodyOf(event),
