@@ -5,7 +5,7 @@ import type { Asked } from "@/lib/ledger/asked";
 import type { BookingContext, ItemFacts, Window } from "@/lib/ledger/context";
 
 /** How far a gap is looked for at first: hardly anybody works for longer without one. */
-const REACH_DAYS = 12;
+const REACH_DAYS = 5;
 /** Further than the ledger goes back. */
 const FARTHEST_DAYS = 100_000;
 

@@ -7,11 +7,22 @@ language sql stable strict parallel safe
 return (extract(epoch from instant) * 1000)::bigint;
 --> statement-breakpoint
 
+create function segment_json(s segments) returns jsonb
+language sql stable
+return jsonb_build_object(
+  'startMs', epoch_ms(s.start_at), 'item', s.item, 'endMs', epoch_ms(s.end_at),
+  'activity', s.activity, 'ticket', s.ticket, 'operation', s.operation, 'code', s.code,
+  'weight', s.weight, 'seconds', s.seconds, 'cellId', s.cell_id, 'said', s.said,
+  'eventId', s.event_id);
+--> statement-breakpoint
+
 -- What the ledger and its derivation hold of some workers around the touched instants: from the last
 -- gap without any event longer than p_gap to the next one (LEDGER.md 4), extended to what a
 -- correction takes from elsewhere and to a shift that is still open. The worker's corrections come
 -- along, with what they are about, also from outside. `truncated`: no gap within p_reach, ask again.
 -- With p_now comes what only a bench shows: the day before the window, the judge's questions, notes.
+-- It goes step by step so that bounds are parameters, by which partitions are left out beforehand:
+-- nothing is received much before it happens, nor after the moment as of which it was derived.
 create function timeline_windows(
   p_site uuid,
   p_workers uuid[],
@@ -24,9 +35,28 @@ create function timeline_windows(
 ) returns jsonb
 language plpgsql stable
 set search_path = public, pg_temp
+set plan_cache_mode = force_generic_plan
+set jit = off
 as $$
+declare
+  workers_touched uuid[];
+  lows timestamptz[];
+  highs timestamptz[];
+  firsts timestamptz[];
+  lasts timestamptz[];
+  earliest timestamptz;
+  latest timestamptz;
+  received_from timestamptz;
+  received_to timestamptz;
+  corrections uuid[];
+  about uuid[];
 begin
-  return (
+  select max(h.as_of)
+  into received_to
+  from timeline_heads h
+  where h.site_id = p_site and h.worker_id = any (p_workers);
+
+  if cardinality(p_targets) > 0 then
     with recursive chain as (
       select e.worker_id, e.at, e.counts_at, e.target_id
       from clock_events e
@@ -35,91 +65,83 @@ begin
       select e.worker_id, e.at, e.counts_at, e.target_id
       from chain c
       join clock_events e on e.site_id = p_site and e.id = c.target_id and e.worker_id = c.worker_id
-    ),
-    touched as (
-      select t.worker_id, t.at
-      from unnest(p_workers, p_touched) as t (worker_id, at)
-      union all
-      select c.worker_id, unnest(array[c.at, c.counts_at])
-      from chain c
+    )
+    select p_workers || coalesce(array_agg(t.worker_id), '{}'),
+      p_touched || coalesce(array_agg(t.at), '{}')
+    into p_workers, p_touched
+    from (
+      select c.worker_id, unnest(array[c.at, c.counts_at]) as at
+      from chain c) t
+    where t.at is not null;
+  end if;
+
+  select array_agg(h.worker_id), array_agg(h.low), array_agg(h.high), min(h.low), max(h.high)
+  into workers_touched, lows, highs, earliest, latest
+  from (
+    select t.worker_id, min(t.at) as low, max(t.at) as high
+    from (
+      select u.worker_id, u.at
+      from unnest(p_workers, p_touched) as u (worker_id, at)
       union all
       -- a correction that came before what it corrects
       select e.worker_id, e.counts_at
       from clock_events e
       where e.site_id = p_site and e.worker_id = any (p_workers)
+        and e.received_at <= received_to and e.counts_at is not null
         and e.kind in ('void', 'move', 'insert', 'reassign', 'settle')
         and e.target_id = any (p_ids)
       union all
       select s.worker_id, s.start_at
       from shifts s
       where s.site_id = p_site and s.worker_id = any (p_workers) and s.end_at is null
-    ),
-    hull as materialized (
-      select t.worker_id, min(t.at) as low, max(t.at) as high
-      from touched t
-      where t.at is not null
-      group by t.worker_id
-    ),
-    -- nothing is received much before it happens: older partitions need no look
-    corrections as materialized (
-      select e.*
-      from hull h
-      join clock_events e on e.site_id = p_site and e.worker_id = h.worker_id
-        and e.received_at >= h.low - p_reach - interval '2 hours'
-        and e.kind in ('void', 'move', 'insert', 'reassign', 'settle')
-      where e.kept_for is null
-    ),
-    points as (
-      select h.worker_id, h.low, h.high, p.at
-      from hull h
+    ) t
+    group by t.worker_id
+  ) h;
+  received_from := earliest - p_reach - interval '2 hours';
+
+  select array_agg(e.id), array_agg(e.target_id)
+  into corrections, about
+  from clock_events e
+  where e.site_id = p_site and e.worker_id = any (workers_touched)
+    and e.received_at >= received_from and e.received_at <= received_to
+    and e.kind in ('void', 'move', 'insert', 'reassign', 'settle')
+    and e.kept_for is null;
+
+  select array_agg(b.first order by b.place), array_agg(b.last order by b.place),
+    min(b.first), max(b.last)
+  into firsts, lasts, earliest, latest
+  from (
+    select g.place,
+      max(g.at) filter (where g.at <= g.low and (g.before is null or g.before > p_gap)) as first,
+      min(g.at) filter (where g.at >= g.high and (g.after is null or g.after > p_gap)) as last
+    from (
+      select h.place, h.low, h.high, p.at, p.at - lag(p.at) over w as before,
+        lead(p.at) over w - p.at as after
+      from unnest(workers_touched, lows, highs) with ordinality as h (worker_id, low, high, place)
       cross join lateral (
         select e.at
         from clock_events e
         where e.site_id = p_site and e.worker_id = h.worker_id
-          and e.received_at >= h.low - p_reach - interval '2 hours'
+          and e.received_at >= received_from and e.received_at <= received_to
           and e.at >= h.low - p_reach and e.at <= h.high + p_reach
           and e.kept_for is null
         union all
-        select c.counts_at
-        from corrections c
-        where c.worker_id = h.worker_id
-          and c.counts_at >= h.low - p_reach and c.counts_at <= h.high + p_reach
+        select e.counts_at
+        from clock_events e
+        where cardinality(corrections) > 0
+          and e.site_id = p_site and e.id = any (corrections) and e.worker_id = h.worker_id
+          and e.received_at >= received_from and e.received_at <= received_to
+          and e.counts_at >= h.low - p_reach and e.counts_at <= h.high + p_reach
         union all
         values (h.low), (h.high)
       ) p
-    ),
-    gaps as (
-      select p.*, p.at - lag(p.at) over w as before, lead(p.at) over w - p.at as after
-      from points p
-      window w as (partition by p.worker_id order by p.at)
-    ),
-    bounds as materialized (
-      select g.worker_id, g.low, g.high,
-        max(g.at) filter (where g.at <= g.low and (g.before is null or g.before > p_gap)) as first,
-        min(g.at) filter (where g.at >= g.high and (g.after is null or g.after > p_gap)) as last
-      from gaps g
-      group by g.worker_id, g.low, g.high
-    ),
-    events as (
-      select e.*
-      from bounds b
-      join clock_events e on e.site_id = p_site and e.worker_id = b.worker_id
-        and e.received_at >= b.first - interval '2 hours'
-        and e.at >= b.first and e.at <= b.last
-      where e.kept_for is null
-      union all
-      select c.*
-      from corrections c
-      join bounds b on b.worker_id = c.worker_id
-      where c.at < b.first or c.at > b.last
-      union all
-      select e.*
-      from corrections c
-      join bounds b on b.worker_id = c.worker_id
-      join clock_events e on e.site_id = p_site and e.id = c.target_id
-        and e.worker_id = c.worker_id
-      where e.kept_for is null and (e.at < b.first or e.at > b.last)
-    )
+      window w as (partition by h.place order by p.at)
+    ) g
+    group by g.place
+  ) b;
+  received_from := earliest - interval '2 hours';
+
+  return (
     select jsonb_agg(jsonb_build_object(
       'workerId', b.worker_id,
       'firstMs', epoch_ms(b.first),
@@ -136,8 +158,22 @@ begin
           'questions', coalesce(e.questions, '{}'), 'body', e.body - 'v' - 'clock',
           'note', case when p_now is not null and e.by is not null then (
             select n.text from notes n where n.site_id = p_site and n.event_id = e.id) end))
-        from events e
-        where e.worker_id = b.worker_id),
+        from (
+          select e.*
+          from clock_events e
+          where e.site_id = p_site and e.worker_id = b.worker_id
+            and e.received_at >= received_from and e.received_at <= received_to
+            and e.at >= b.first and e.at <= b.last
+            and e.kept_for is null
+          union all
+          -- corrections from elsewhere, and what they are about, however old
+          select e.*
+          from clock_events e
+          where cardinality(corrections) > 0
+            and e.site_id = p_site and e.id = any (corrections || about)
+            and e.worker_id = b.worker_id and (e.at < b.first or e.at > b.last)
+            and e.received_at <= received_to and e.kept_for is null
+        ) e),
       'planned', (
         select jsonb_agg(jsonb_build_object(
           'startMs', epoch_ms(p.start_at), 'endMs', epoch_ms(p.end_at)) order by p.start_at)
@@ -149,13 +185,10 @@ begin
             and s.start_at <= b.last + interval '3 days'
           order by s.work_on, s.seq desc) p),
       'segments', (
-        select jsonb_agg(jsonb_build_object(
-          'startMs', epoch_ms(s.start_at), 'item', s.item, 'endMs', epoch_ms(s.end_at),
-          'activity', s.activity, 'ticket', s.ticket, 'operation', s.operation, 'code', s.code,
-          'weight', s.weight, 'seconds', s.seconds, 'cellId', s.cell_id, 'said', s.said,
-          'eventId', s.event_id))
+        select jsonb_agg(segment_json(s))
         from segments s
         where s.site_id = p_site and s.worker_id = b.worker_id
+          and s.start_at >= date_trunc('second', earliest) and s.start_at <= latest
           and s.start_at >= date_trunc('second', b.first) and s.start_at <= b.last),
       'shifts', (
         select jsonb_agg(jsonb_build_object(
@@ -186,15 +219,11 @@ begin
         where l.site_id = p_site and l.worker_id = b.worker_id and l.source = 'judge'
           and l.at >= date_trunc('second', b.first) and l.at <= b.last) end,
       'earlier', case when p_now is not null then (
-        select jsonb_agg(jsonb_build_object(
-          'startMs', epoch_ms(s.start_at), 'item', s.item, 'endMs', epoch_ms(s.end_at),
-          'activity', s.activity, 'ticket', s.ticket, 'operation', s.operation, 'code', s.code,
-          'weight', s.weight, 'seconds', s.seconds, 'cellId', s.cell_id, 'said', s.said,
-          'eventId', s.event_id))
+        select jsonb_agg(segment_json(s))
         from segments s
         where s.site_id = p_site and s.worker_id = b.worker_id
-          and s.start_at >= p_now - interval '2 days' and s.start_at < date_trunc('second', b.first)
-        ) end,
+          and s.start_at >= p_now - interval '2 days' and s.start_at <= latest
+          and s.start_at < date_trunc('second', b.first)) end,
       -- the sign-in before this one: what others changed until then was shown at it
       'seenMs', case when p_now is not null then (
         select epoch_ms(s.opened_at)
@@ -203,7 +232,7 @@ begin
         order by s.opened_at desc
         offset 1
         limit 1) end))
-    from bounds b
+    from unnest(workers_touched, lows, highs, firsts, lasts) as b (worker_id, low, high, first, last)
     join workers w on w.site_id = p_site and w.id = b.worker_id
     left join timeline_heads h on h.site_id = p_site and h.worker_id = b.worker_id
   );
@@ -216,6 +245,8 @@ end $$;
 create function ticket_facts(p_site uuid, p_tickets text[], p_operations text[]) returns jsonb
 language plpgsql stable
 set search_path = public, pg_temp
+set plan_cache_mode = force_generic_plan
+set jit = off
 as $$
 begin
   return (
@@ -298,6 +329,8 @@ return (
 create function next_work(p_site uuid, p_kiosk uuid, p_now timestamptz) returns jsonb
 language plpgsql stable
 set search_path = public, pg_temp
+set plan_cache_mode = force_generic_plan
+set jit = off
 as $$
 begin
   return (
@@ -346,11 +379,15 @@ create function booking_context(
 ) returns jsonb
 language plpgsql stable
 set search_path = public, pg_temp
+set plan_cache_mode = force_generic_plan
+set jit = off
 as $$
 declare
   touched_workers uuid[];
   touched timestamptz[];
   gap interval;
+  since timestamptz;
+  known jsonb;
 begin
   select array_agg(t.id), array_agg(t.at)
   into touched_workers, touched
@@ -368,11 +405,26 @@ begin
   ) t;
   -- a bench also shows what its worker is on already
   if p_now is not null then
+    select min(s.start_at)
+    into since
+    from shifts s
+    where s.site_id = p_site and s.worker_id = any (touched_workers) and s.end_at is null;
+  end if;
+  if since is not null then
     select p_tickets || array_agg(s.ticket), p_operations || array_agg(s.operation)
     into p_tickets, p_operations
     from segments s
     where s.site_id = p_site and s.worker_id = any (touched_workers) and s.end_at is null
-      and s.ticket is not null;
+      and s.start_at >= since and s.start_at <= p_now + interval '1 day' and s.ticket is not null;
+  end if;
+  -- hardly ever are any of them known, and then they are looked up one by one
+  if exists (select from event_ids i where i.site_id = p_site and i.id = any (p_ids)) then
+    select jsonb_agg(jsonb_build_object(
+      'id', i.id, 'bodyHash', i.body_hash, 'keptFor', e.kept_for, 'questions', e.questions))
+    into known
+    from event_ids i
+    join clock_events e on e.site_id = p_site and e.received_at = i.received_at and e.id = i.id
+    where i.site_id = p_site and i.id = any (p_ids);
   end if;
   select make_interval(secs => max(greatest(r.shift_limit_seconds, r.rest_between_shifts_seconds)))
   into gap
@@ -396,12 +448,7 @@ begin
         'endedMs', epoch_ms(s.ended_at))), '[]')
       from kiosk_sessions s
       where s.site_id = p_site and s.id = any (p_sessions) and s.kiosk_id = p_kiosk),
-    'known', (
-      select coalesce(jsonb_agg(jsonb_build_object(
-        'id', i.id, 'bodyHash', i.body_hash, 'keptFor', e.kept_for, 'questions', e.questions)), '[]')
-      from event_ids i
-      join clock_events e on e.site_id = p_site and e.received_at = i.received_at and e.id = i.id
-      where i.site_id = p_site and i.id = any (p_ids)),
+    'known', coalesce(known, '[]'),
     'served', (
       select coalesce(jsonb_agg(jsonb_build_object(
         'cellId', k.cell_id, 'fromMs', epoch_ms(k.effective_from), 'position', k.position)), '[]')
@@ -424,6 +471,8 @@ end $$;
 create function book(p_site uuid, p jsonb) returns void
 language plpgsql
 set search_path = public, pg_temp
+set plan_cache_mode = force_generic_plan
+set jit = off
 as $$
 declare
   locked integer;
@@ -530,6 +579,8 @@ end $$;
 create function ticket_books(p_site uuid, p_numbers text[]) returns jsonb
 language plpgsql stable
 set search_path = public, pg_temp
+set plan_cache_mode = force_generic_plan
+set jit = off
 as $$
 begin
   return (
@@ -619,6 +670,8 @@ end $$;
 create function keep_judgement(p_site uuid, p jsonb) returns void
 language plpgsql
 set search_path = public, pg_temp
+set plan_cache_mode = force_generic_plan
+set jit = off
 as $$
 begin
   update ticket_operations o
