@@ -62,9 +62,8 @@ function isOpenTo(
   shiftOf: ReadonlyMap<string, string>,
 ): boolean {
   const [activity, reassign] = [acts[target], acts[until]];
-  if (!activity || !reassign || target > until) return false;
+  if (!activity || !reassign) return false;
   const shift = shiftOf.get(reassign.id);
-  if (shift === undefined || shiftOf.get(activity.id) !== shift) return false;
   const latest = acts
     .slice(0, until)
     .filter((act) => isActivity(act) && shiftOf.get(act.id) === shift)

@@ -131,6 +131,23 @@ describe("effectiveEvents: void, move and insert", () => {
       Tue 08:00 ana move #a 10:00 by 7
       Tue 08:01 ana void #a by 7
       = ana 08:00 16:00 unassigned`,
+    "a move that is voided moves nothing": `
+      08:00 ana shift-start
+      09:00 ana run A #a
+      16:00 ana shift-end
+      Tue 08:00 ana move #a 10:00 by 7 #move
+      Tue 08:01 ana void #move by 7
+      = ana 08:00 09:00 unassigned
+      = ana 09:00 16:00 run A`,
+    "what brings a voided act back brings back no earlier move": `
+      08:00 ana shift-start
+      09:00 ana run A #a
+      10:00 ana move #a 09:30 by 7
+      10:01 ana void #a by 7
+      10:02 ana reassign #a run B
+      16:00 ana shift-end
+      = ana 08:00 09:00 unassigned
+      = ana 09:00 16:00 run B`,
     "a move after a void wins": `
       08:00 ana shift-start
       09:00 ana run A #a

@@ -195,6 +195,21 @@ describe("reassigned", () => {
       09:00:05 ana undo #slip
       10:00 ana shift-end
       = ana 08:00 10:00 run A`,
+    "of an act that was undone nothing is left to reassign, and nothing to ask": `
+      08:00 ana shift-start
+      08:00 ana run A #a
+      08:00:05 ana undo #a
+      09:00 ana reassign #a run B
+      10:00 ana shift-end
+      = ana 08:00 10:00 unassigned`,
+    "one that counts before its activity asks": `
+      08:00 ana shift-start
+      08:30 ana run A #a
+      08:20 ana reassign #a run B #early
+      10:00 ana shift-end
+      = ana 08:00 08:30 unassigned
+      = ana 08:30 10:00 run A
+      ? ana objection #early`,
     "a later void wins": `
       08:00 ana shift-start
       08:00 ana run A #a

@@ -73,6 +73,15 @@ describe("ticketEnds", () => {
   test("a count for work that another did asks nothing", () => {
     expect(ends(done, [makeWork("110", [0, 5], { worker: "ben" })])).toEqual([]);
   });
+  test("work ahead of its turn asks whoever worked, not whoever counted", () => {
+    const work = [makeWork("120", [1, 5], { worker: "ben" })];
+    expect(ends([makeCount("120", 5, [1])], work)).toEqual(["out-of-order 120:work-120-1 1"]);
+  });
+  test("time and count of one second belong together", () => {
+    expect(ends([makeCount("110", 5, [1])], [makeWork("110", [5, null])])).toEqual([
+      "past-finish 110:work-110-5 5",
+    ]);
+  });
   test("a count ahead of its turn that nobody worked for is out of order too", () => {
     expect(ends([makeCount("120", 5, [1])], [])).toEqual([
       "count-without-work count-120-5 5",

@@ -75,6 +75,12 @@ describe("dayBounds", () => {
     expect(long("2026-06-09", rules)).toBe(30);
     expect(long("2026-06-10", rules)).toBe(24);
   });
+  test("a row that begins with a day governs that day", () => {
+    const from = at("2026-06-10T06:00:00-04:00");
+    const rules = [...newYork, rule(from, "America/New_York", 360)];
+    expect(dayBounds("2026-06-10", rules).start * 1000).toBe(from);
+    expect(long("2026-06-09", rules)).toBe(30);
+  });
   test("a row that begins in the middle of a day waits for the next day", () => {
     const from = at("2026-06-10T12:00:00-04:00");
     const rules = [...newYork, rule(from, "America/New_York", 360)];

@@ -69,6 +69,15 @@ describe("plannedEnd", () => {
     {
       lastTap: 9,
       planned: [
+        { start: 6, end: 8 },
+        { start: 12, end: 18 },
+      ],
+      is: 18,
+      because: "one that is over by then is passed over for a later one",
+    },
+    {
+      lastTap: 9,
+      planned: [
         { start: 10, end: 18 },
         { start: 6, end: 14 },
       ],

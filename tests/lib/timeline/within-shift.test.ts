@@ -429,6 +429,13 @@ describe("takeEffect: two kiosks", () => {
       = ana 09:00 09:10 rest
       = ana 09:10 10:00 run A
       ? ana two-kiosks #end`,
+    "a break's end where no kiosk ended one asks nothing": `
+      08:00 ana shift-start @east
+      08:10 ana run A @east
+      09:00 ana break-end @west
+      10:00 ana shift-end @east
+      = ana 08:00 08:10 unassigned
+      = ana 08:10 10:00 run A`,
     "at one kiosk the same asks nothing": `
       08:00 ana shift-start @east
       08:10 ana run A @east
