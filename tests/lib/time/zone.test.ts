@@ -11,20 +11,23 @@ import { timeChecks } from "./checks";
 
 const MINUTE_MS = 60_000;
 const HOUR_MS = 60 * MINUTE_MS;
+const STEP_MS = 6 * HOUR_MS;
 
 type Transition = [at: string, before: number, after: number];
 const years = timeChecks<{ tz: string; year: number }, { transitions_utc: Transition[] }>("tz-");
 
-/** Looks at every hour of a year, then at every minute around a change. */
+/** Looks at every sixth hour of a year, then at every minute around a change. */
 function transitionsOf(zone: string, year: number): Transition[] {
   const found: Transition[] = [];
-  for (let at = Date.UTC(year, 0, 1); at < Date.UTC(year + 1, 0, 1); at += HOUR_MS) {
-    const [before, after] = [offsetMs(at - HOUR_MS, zone), offsetMs(at, zone)];
+  let before = offsetMs(Date.UTC(year, 0, 1) - STEP_MS, zone);
+  for (let at = Date.UTC(year, 0, 1); at < Date.UTC(year + 1, 0, 1); at += STEP_MS) {
+    const after = offsetMs(at, zone);
     if (before === after) continue;
     let change = at;
     while (offsetMs(change - MINUTE_MS, zone) === after) change -= MINUTE_MS;
     const stamp = new Date(change).toISOString().replace(".000Z", "Z");
     found.push([stamp, before / MINUTE_MS, after / MINUTE_MS]);
+    before = after;
   }
   return found;
 }
