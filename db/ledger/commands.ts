@@ -43,7 +43,8 @@ const TRIES_MAX = 5;
  */
 export async function bookEvents(scope: Scope, batch: IncomingBatch): Promise<Result<BookedBatch>> {
   const { kioskId, isRevoked = false, proved = [], withBench = false, arrivals } = batch;
-  const receivedMs = batch.receivedAt.getTime();
+  // a timeline is never derived as of a moment before the last of its records came
+  const receivedMs = Math.max(batch.receivedAt.getTime(), ...(arrivals ?? []));
   const deviceMs = batch.deviceMs ?? receivedMs;
   const records = receiveRecords(batch.events, { kioskId, receivedMs, deviceMs, arrivals });
   const benchAtMs = withBench ? receivedMs : null;
