@@ -1,7 +1,11 @@
-import { sql } from "drizzle-orm";
+import { eq, sql } from "drizzle-orm";
 import type { Scope } from "@/db/client";
+import { dirtyMarks } from "@/db/jobs/tables";
 import { bookEvents } from "@/db/ledger/commands";
 import { idOf } from "@/db/seed/factory";
+import { findSite } from "@/db/sites/queries";
+import { rebuildTickets } from "@/db/tickets/commands";
+import { closeOverdueShifts } from "@/db/timeline/commands";
 import { assert } from "@/lib/assert";
 import type { DemoEvent } from "@/lib/simulation/record";
 
@@ -40,6 +44,20 @@ export async function bookHistory(
     booked += batch.length;
     onBooked(booked / events.length);
   }
+}
+
+/**
+ * Does what the jobs in the background would find to do after the history: shifts that nobody ended,
+ * and every ticket once, with which the marks of its bookings are done.
+ */
+export async function settleHistory(scope: Scope, now: Date): Promise<void> {
+  const { db, siteId } = scope;
+  const site = await findSite(scope);
+  assert(site !== null, "the demo has a site");
+  await closeOverdueShifts(scope, site.rules, now);
+  await db.execute(sql`select refresh_statistics()`);
+  await rebuildTickets(scope);
+  await db.delete(dirtyMarks).where(eq(dirtyMarks.siteId, siteId));
 }
 
 /** Events in the order of the weeks in which they were tapped, by author and kiosk. */

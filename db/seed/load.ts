@@ -1,6 +1,6 @@
 import { recordAct } from "@/db/audit/commands";
 import type { Db, Scope } from "@/db/client";
-import { bookHistory } from "@/db/seed/events";
+import { bookHistory, settleHistory } from "@/db/seed/events";
 import { writeFactory } from "@/db/seed/factory";
 import { writeKiosks, writeSessions } from "@/db/seed/kiosks";
 import { type Hash, writeAccounts, writePlannedShifts, writeWorkers } from "@/db/seed/people";
@@ -41,24 +41,18 @@ export async function loadDemo(loading: Loading): Promise<Result<Loaded>> {
   }
   onProgress("Playing eight weeks at Larkmoor Stringworks", 0);
   const run = simulate({ nowMs: now.getTime(), ...slice });
+  const detail = { events: run.events.length, tickets: run.tickets.length };
   return db.transaction(async (tx) => {
-    const siteId = await foundSite(tx, {
-      id: DEMO_SITE_ID,
-      name: "Larkmoor Stringworks",
-      timeZone: TIME_ZONE,
-    });
-    const scope = { db: tx, siteId };
+    const site = { id: DEMO_SITE_ID, name: "Larkmoor Stringworks", timeZone: TIME_ZONE };
+    const scope = { db: tx, siteId: await foundSite(tx, site) };
     onProgress("Building the factory", 0);
     const kiosks = await writeHouse(scope, run, { hash, now });
     await bookHistory(scope, kiosks, run.events, (share) => onProgress("Booking its hours", share));
-    const detail = { events: run.events.length, tickets: run.tickets.length };
-    await recordAct(scope, {
-      by: "command:demo",
-      action: "demo.load",
-      subject: `site:${siteId}`,
-      detail,
-    });
-    return ok({ siteId, ...detail });
+    onProgress("Judging its tickets", 0);
+    await settleHistory(scope, now);
+    const subject = `site:${scope.siteId}`;
+    await recordAct(scope, { by: "command:demo", action: "demo.load", subject, detail });
+    return ok({ siteId: scope.siteId, ...detail });
   });
 }
 

@@ -11,7 +11,7 @@ import {
   tap,
 } from "@/lib/simulation/bench";
 import { breaksOf } from "@/lib/simulation/breaks";
-import { takeJob } from "@/lib/simulation/floor";
+import { type InHand, takeJob } from "@/lib/simulation/floor";
 import { currentStep } from "@/lib/simulation/traveller";
 import { doJob, itemOf } from "@/lib/simulation/work";
 
@@ -98,10 +98,11 @@ function* oneThing(bench: Bench): Stretch {
     random.chance(FORGETS_TO_TAP) ? random.whole(240, 900) : random.whole(15, 110),
   );
   if (bench.at >= bench.stopAt) return;
+  const early = findAhead(bench);
   if (troubles.isDown(person.cell, bench.at)) {
     yield* otherWork(bench, random.whole(20, 45), "machine-down");
-  } else if (troubles.isHasty(person.cell, bench.at)) {
-    yield* tooSoon(bench);
+  } else if (early && troubles.isHasty(person.cell, bench.at)) {
+    yield* tooSoon(bench, early);
   } else if (random.chance(person.leads.length > 0 ? LEAD_DOES_OTHER_WORK : DOES_OTHER_WORK)) {
     const code = person.leads.length > 0 ? random.pick(LEAD_WORK) : undefined;
     yield* otherWork(bench, random.whole(14, 45), code);
@@ -117,19 +118,22 @@ function* nextJob(bench: Bench): Stretch {
   else yield* otherWork(bench, hall.random.whole(15, 30), hall.random.pick(WAITS));
 }
 
-/** Takes up a ticket whose operation before is still in other hands, and is sent away again. */
-function* tooSoon(bench: Bench): Stretch {
-  const { open, random } = bench.hall;
-  const traveller = open.find((each) => {
-    const next = each.steps[each.current + 1];
-    return (currentStep(each)?.crew.size ?? 0) > 0 && next?.operation.cell === bench.person.cell;
-  });
-  const step = traveller?.steps[traveller.current + 1];
-  if (!traveller || !step) return;
-  bench.cell = step.operation.cell;
-  const items = [itemOf({ traveller, step })];
+/** A ticket whose next operation is of the own cell while the one before is in other hands. */
+function findAhead({ hall, person }: Bench): InHand | null {
+  for (const traveller of hall.open) {
+    const step = traveller.steps[traveller.current + 1];
+    const isInWork = (currentStep(traveller)?.crew.size ?? 0) > 0;
+    if (step?.operation.cell === person.cell && isInWork) return { traveller, step };
+  }
+  return null;
+}
+
+/** Takes up a ticket before its time, and is sent away again. */
+function* tooSoon(bench: Bench, early: InHand): Stretch {
+  bench.cell = early.step.operation.cell;
+  const items = [itemOf(early)];
   tap(bench, { kind: "work", activity: "run", items });
-  yield* spend(bench, random.whole(600, 1_500));
+  yield* spend(bench, bench.hall.random.whole(600, 1_500));
   tap(bench, { kind: "pause", items });
 }
 

@@ -1,4 +1,5 @@
-import type { DemoCalendar } from "@/lib/demo/calendar";
+import { assert } from "@/lib/assert";
+import type { DemoCalendar, DemoDay } from "@/lib/demo/calendar";
 import type { CellName } from "@/lib/demo/cells";
 import type { DemoOperation } from "@/lib/demo/operations";
 import type { DemoShift } from "@/lib/demo/shifts";
@@ -42,7 +43,7 @@ export function troublesOf(calendar: DemoCalendar, shifts: readonly DemoShift[])
   const forgotten = forgottenShifts(calendar, shifts);
   const early = new Set<string>();
   const loop = { ticket: "", times: 0 };
-  const hasty = new Set(HASTY.days.map((days) => calendar.today - days));
+  const hasty = new Set(HASTY.days.map((days) => weekdayBefore(calendar, days).index));
   const [downFrom, downTo] = [minuteOf(calendar, DOWN), minuteOf(calendar, DOWN, "toMinutes")];
   return {
     forgetsToEnd: (shift) => forgotten.has(shift),
@@ -89,13 +90,19 @@ function forgottenShifts(calendar: DemoCalendar, shifts: readonly DemoShift[]): 
   return new Set(found);
 }
 
-/** The epoch second of a minute of a day so many days before today; a weekend moves it to Friday. */
+/** The epoch second of a minute of a weekday. */
 function minuteOf(
   calendar: DemoCalendar,
   when: { days: number; fromMinutes: number; toMinutes: number },
   minutes: "fromMinutes" | "toMinutes" = "fromMinutes",
 ): number {
-  const index = calendar.today - when.days;
+  return weekdayBefore(calendar, when.days).at(when[minutes]);
+}
+
+/** The day so many days before today; a weekend moves it to the Friday before. */
+function weekdayBefore(calendar: DemoCalendar, days: number): DemoDay {
+  const index = calendar.today - days;
   const day = calendar.days.findLast((each) => each.index <= index && each.weekday <= 5);
-  return (day ?? calendar.days[0]!).at(when[minutes]);
+  assert(day !== undefined, "the calendar begins with weeks before the history");
+  return day;
 }

@@ -54,7 +54,7 @@ function* run(bench: Bench, job: Job): Stretch {
     }
     yield* betweenPieces(bench, job, done);
   }
-  yield* countAll(bench, job, done);
+  countAll(bench, job, done);
 }
 
 /** The work tap: now and then said to have begun earlier, or on a ticket that was not meant. */
@@ -124,16 +124,17 @@ function* betweenPieces(bench: Bench, job: Job, done: Map<InHand["step"], number
   }
 }
 
-function* countAll(bench: Bench, job: Job, done: Map<InHand["step"], number>): Stretch {
+/** Counts what was done of each ticket, and lays down what somebody else finished meanwhile. */
+function countAll(bench: Bench, job: Job, done: Map<InHand["step"], number>): void {
+  // an inspector lays a piece down before passing or failing it: the verdict itself ends no work
+  const isInspected = job.inHand.some(({ step }) => step.operation.activity === "inspect");
+  const isNothing = [...done.values()].every((pieces) => pieces === 0);
+  if (isInspected || (isNothing && bench.at < bench.stopAt)) {
+    tap(bench, { kind: "pause", items: job.inHand.map(itemOf) });
+  }
   for (const each of job.inHand) {
     const pieces = done.get(each.step)!;
     if (pieces > 0) report(bench, each, pieces, true);
-  }
-  // a passed or failed piece stays in the work, and so does what somebody else finished meanwhile
-  const isInspected = job.inHand.some(({ step }) => step.operation.activity === "inspect");
-  const isNothing = [...done.values()].every((pieces) => pieces === 0);
-  if ((isInspected || isNothing) && bench.at < bench.stopAt) {
-    tap(bench, { kind: "pause", items: job.inHand.map(itemOf) });
   }
 }
 

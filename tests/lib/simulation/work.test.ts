@@ -72,13 +72,13 @@ describe("doJob", () => {
     let fails = 1;
     const troubles = { ...hall.troubles, mustFail: () => fails-- > 0 };
     const { hall: played } = work([ticket], "Inspection", { ...hall, troubles });
-    const failed = eventsOf(played).at(-2);
+    const failed = eventsOf(played).at(-1);
     expect(failed).toMatchObject({ kind: "inspect", good: 1, rework: 1 });
     expect(failed).toHaveProperty("causedBy");
     expect(failed).toHaveProperty("defects");
     work([ticket], "Inspection", { ...hall, troubles }, 3_600);
     expect(eventsOf(played).at(-3)).toMatchObject({ kind: "work", activity: "rework" });
-    expect(eventsOf(played).at(-2)).toMatchObject({ kind: "inspect", good: 1, rework: 0 });
+    expect(eventsOf(played).at(-1)).toMatchObject({ kind: "inspect", good: 1, rework: 0 });
     expect(currentStep(ticket)?.operation.code).not.toBe("420");
   });
 
