@@ -26,14 +26,14 @@ export function WorkRow({
   const rework = work.people.every(({ activity }) => activity === "rework");
   return (
     <tr>
-      <td data-book="" title={work.options.join(", ") || undefined}>
+      <td data-book="" className="desk-cut" title={work.options.join(", ") || undefined}>
         <span className="font-[650]">{work.name}</span>{" "}
         <span className="text-ink-2">{work.model}</span>
       </td>
       <td data-book="">
         <TicketLink number={work.ticket} links={linksTickets} />
       </td>
-      <NumberCell data-book="" data-standard="">
+      <NumberCell data-book="" data-standard="" data-label="std min">
         {standardSeconds === null ? (
           <span className="font-medium text-ink-2">none</span>
         ) : (

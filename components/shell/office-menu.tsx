@@ -14,7 +14,12 @@ export function OfficeMenu({
 }) {
   return (
     <div className="desk-menu">
-      <button type="button" popoverTarget="desk-menu" className="desk-who">
+      <button
+        type="button"
+        popoverTarget="desk-menu"
+        className="desk-who"
+        aria-label={[name, roles, "menu"].filter(Boolean).join(", ")}
+      >
         <span>
           {name}
           {roles && <span className="text-ink-2">, {roles}</span>}

@@ -1,4 +1,4 @@
-import { and, asc, eq, gt, notInArray, type SQL, sql } from "drizzle-orm";
+import { and, asc, eq, gt, ilike, like, notInArray, or, type SQL, sql } from "drizzle-orm";
 import { cells } from "@/db/cells/tables";
 import type { Scope } from "@/db/client";
 import { orders } from "@/db/orders/tables";
@@ -8,6 +8,8 @@ import { ticketOperations, ticketOptions, tickets } from "@/db/tickets/tables";
 /** Which tickets a list wants; `after` is the last `seq` of the page before. */
 export interface TicketsWanted {
   number?: string | undefined;
+  /** Part of a ticket's or an order's number; spaces and hyphens are forgiven. */
+  text?: string | undefined;
   status?: "open" | "finished" | "scrapped" | "cancelled" | undefined;
   /** Name of the cell where the next operation is. */
   cell?: string | undefined;
@@ -57,9 +59,34 @@ export async function listTickets(scope: Scope, wanted: TicketsWanted) {
     .limit(wanted.limit);
 }
 
+/**
+ * The ids and models of the tickets that `listTickets` lists for the same wish: for what is read
+ * beside the list in the same wave.
+ */
+export function ticketsOnPage(scope: Scope, wanted: TicketsWanted) {
+  const next = nextOperation(scope);
+  return scope.db
+    .select({ id: tickets.id, modelId: tickets.modelId })
+    .from(tickets)
+    .innerJoin(models, and(eq(models.siteId, tickets.siteId), eq(models.id, tickets.modelId)))
+    .leftJoin(orders, and(eq(orders.siteId, tickets.siteId), eq(orders.id, tickets.orderId)))
+    .leftJoinLateral(next, sql`true`)
+    .where(
+      and(
+        ...conditions(scope.siteId, wanted),
+        wanted.cell === undefined ? undefined : eq(next.cell, wanted.cell),
+      ),
+    )
+    .orderBy(asc(tickets.seq))
+    .limit(wanted.limit)
+    .as("on_page");
+}
+
 function conditions(siteId: string, wanted: TicketsWanted): (SQL | undefined)[] {
+  const part = wanted.text?.replace(/[\s-]/g, "").replace(/[\\%_]/g, (sign) => `\\${sign}`);
   return [
     eq(tickets.siteId, siteId),
+    part ? or(like(tickets.number, `%${part}%`), ilike(orders.number, `%${part}%`)) : undefined,
     wanted.number === undefined ? undefined : eq(tickets.number, wanted.number),
     wanted.status && eq(tickets.status, wanted.status),
     // only an open ticket is waiting in a cell: the index on the status serves this filter too
