@@ -64,7 +64,7 @@ export function FloorHead({
 function OverrunList({ over, linksTickets }: { over: Overrun[]; linksTickets: boolean }) {
   const more = over.length - OVERRUNS_SHOWN;
   return (
-    <ul className="desk-aside">
+    <ul className="desk-aside" data-spare="">
       {over.slice(0, OVERRUNS_SHOWN).map(({ cell, ticket, operation, name, overMinutes }) => (
         <li key={`${operation} ${ticket}`}>
           <span className="text-ink-2">{cell}</span> {name}{" "}

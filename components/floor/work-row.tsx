@@ -53,7 +53,7 @@ export function WorkRow({
       <td data-day="">
         <VerdictTag pair={pair} finished={false} />
       </td>
-      <td data-day="">
+      <td data-day="" className="desk-tall">
         {work.people.map(({ worker, name, since, activity, weights }) => (
           <span key={worker} className="block">
             {name}
