@@ -1,4 +1,4 @@
-import { and, asc, eq, exists, gt, isNull, sql } from "drizzle-orm";
+import { and, asc, eq, exists, gt, isNull, type SQL, sql } from "drizzle-orm";
 import {
   accountRoles,
   accounts,
@@ -102,11 +102,28 @@ export interface Account {
 }
 
 /** Lists the accounts that hold a role at the site, by name; at most `limit`. */
-export async function listAccounts({ db, siteId }: Scope, limit: number): Promise<Account[]> {
+export async function listAccounts(scope: Scope, limit: number): Promise<Account[]> {
+  return accountsOf(scope, undefined, limit);
+}
+
+/** Finds an account that holds a role at the site; null for any other. */
+export async function findAccount(scope: Scope, accountId: string): Promise<Account | null> {
+  return (await accountsOf(scope, eq(accounts.id, accountId), 1))[0] ?? null;
+}
+
+async function accountsOf(
+  { db, siteId }: Scope,
+  which: SQL | undefined,
+  limit: number,
+): Promise<Account[]> {
   const roles = sql<{ role: string; cellId: string | null }[]>`(
     select json_agg(json_build_object('role', r.role, 'cellId', r.cell_id) order by r.created_at)
     from ${accountRoles} r
     where r.site_id = ${siteId} and r.account_id = ${accounts.id})`;
+  const isHere = db
+    .select({ one: sql`1` })
+    .from(accountRoles)
+    .where(and(eq(accountRoles.siteId, siteId), eq(accountRoles.accountId, accounts.id)));
   const rows = await db
     .select({
       id: accounts.id,
@@ -122,14 +139,7 @@ export async function listAccounts({ db, siteId }: Scope, limit: number): Promis
       and(eq(accountWorkers.siteId, siteId), eq(accountWorkers.accountId, accounts.id)),
     )
     .leftJoin(workers, and(eq(workers.siteId, siteId), eq(workers.id, accountWorkers.workerId)))
-    .where(
-      exists(
-        db
-          .select({ one: sql`1` })
-          .from(accountRoles)
-          .where(and(eq(accountRoles.siteId, siteId), eq(accountRoles.accountId, accounts.id))),
-      ),
-    )
+    .where(and(exists(isHere), which))
     .orderBy(asc(accounts.name), asc(accounts.id))
     .limit(limit);
   return rows.map(({ disabledAt, roles, ...account }) => ({
