@@ -43,6 +43,8 @@ export interface Bench {
   /** No new piece is begun from here on. */
   stopAt: number;
   breaks: PlannedBreak[];
+  /** Operations whose caution the person has answered in this shift. */
+  cautioned: Set<string>;
   /** The cell whose kiosk the person stands at. */
   cell: CellName;
 }

@@ -37,6 +37,7 @@ export function* shiftOf(hall: Hall, person: CastMember, shift: DemoShift): Stre
     at: arrival(hall, shift),
     stopAt: endsAt - cleansFor,
     breaks: breaksOf(shift, random),
+    cautioned: new Set(),
     cell: person.cell,
   };
   yield bench.at;

@@ -1,3 +1,4 @@
+import { cautionVersion } from "@/lib/bench/cautions";
 import { faultAt } from "@/lib/demo/faults";
 import type { Item } from "@/lib/ledger/schema";
 import { ask, type Bench, idle, otherWork, type Stretch, spend, tap } from "@/lib/simulation/bench";
@@ -22,12 +23,21 @@ const OBJECTS = 0.0008;
 /** Does a job from the first tap to the count, or as far as the shift lets it. */
 export function* doJob(bench: Bench, job: Job): Stretch {
   bench.cell = job.cell;
+  answerCaution(bench, job);
   const isReady = yield* setUp(bench, job);
   if (isReady) yield* run(bench, job);
   for (const { step } of job.inHand) {
     step.crew.delete(bench.person.number);
     step.lastWorker = step.toDo.length > 0 ? bench.person.number : null;
   }
+}
+
+/** What can hurt is answered once in a shift, before the first tap of the operation. */
+function answerCaution(bench: Bench, { inHand }: Job): void {
+  const { code: operation, hazards } = inHand[0]!.step.operation;
+  if (hazards.length === 0 || bench.cautioned.has(operation)) return;
+  bench.cautioned.add(operation);
+  tap(bench, { kind: "caution-read", operation, version: cautionVersion(hazards) });
 }
 
 /** Make-ready for those that need it; false if the shift ended over it. */

@@ -52,6 +52,7 @@ export function makeBench(hall: Hall, person: CastMember): Bench {
     at: shift.start + 3_600,
     stopAt: shift.end,
     breaks: [],
+    cautioned: new Set(),
     cell: person.cell,
   };
 }

@@ -1,4 +1,5 @@
 import { describe, expect, test } from "vitest";
+import { cautionVersion } from "@/lib/bench/cautions";
 import { randomFrom } from "@/lib/demo/random";
 import { takeJob } from "@/lib/simulation/floor";
 import { currentStep, openPieces, type Traveller } from "@/lib/simulation/traveller";
@@ -52,6 +53,21 @@ describe("doJob", () => {
     expect(run).toMatchObject({ activity: "run" });
   });
 
+  test("a caution is answered before the first tap, once in a shift", () => {
+    const open = ["1", "2"].map((number) => makeTraveller({ number, lot: 1, operation: "300" }));
+    const hall = luckyHall(open);
+    const bench = makeBench(hall, personOf("Neck"));
+    for (const _ of open) {
+      through(doJob(bench, takeJob(open, bench.person, bench.at, randomFrom("job"))!));
+    }
+    const kinds = kindsOf(hall).filter((kind) => kind === "caution-read" || kind === "work");
+    expect(kinds).toEqual(["caution-read", "work", "work"]);
+    expect(eventsOf(hall)[0]).toMatchObject({
+      operation: "300",
+      version: cautionVersion(["dust"]),
+    });
+  });
+
   test("the end of the shift counts what is done and leaves the rest for tomorrow", () => {
     const ticket = makeTraveller({ lot: 12 });
     const hall = luckyHall([ticket]);
@@ -85,7 +101,7 @@ describe("doJob", () => {
   test("tickets taken together share one tap and are each counted", () => {
     const open = ["1", "2"].map((number) => makeTraveller({ number, lot: 2, operation: "360" }));
     const { hall } = work(open, "Spray");
-    const [tap] = eventsOf(hall);
+    const tap = eventsOf(hall).find(({ kind }) => kind === "work");
     expect(tap).toMatchObject({ kind: "work", items: [{ ticket: "1" }, { ticket: "2" }] });
     expect(kindsOf(hall).filter((kind) => kind === "report")).toHaveLength(2);
   });
