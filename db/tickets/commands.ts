@@ -1,6 +1,5 @@
 import { sql } from "drizzle-orm";
 import type { Db, Scope } from "@/db/client";
-import { dirtyMarks } from "@/db/jobs/tables";
 import { listTicketBooks } from "@/db/tickets/books";
 import { countChanges, type Judgement, judgementOf } from "@/lib/tickets/judgement";
 
@@ -39,17 +38,6 @@ export async function judgeMarkedTickets(db: Db): Promise<number> {
     }
     return rows.length;
   });
-}
-
-/** Marks tickets to be judged: new ones, so that their first operation is ready. */
-export async function markTickets(
-  { db, siteId }: Scope,
-  numbers: readonly string[],
-): Promise<void> {
-  if (numbers.length === 0) return;
-  await db
-    .insert(dirtyMarks)
-    .values(numbers.map((key) => ({ siteId, kind: "ticket", key }) as const));
 }
 
 /**

@@ -6,7 +6,7 @@ import type { ClockEvent, keptCodes } from "@/lib/ledger/schema";
 export type KeptCode = (typeof keptCodes)[number];
 
 /** What booking knows of a worker whom an event names. */
-export interface KnownWorker {
+interface KnownWorker {
   id: string;
   number: string;
   homeCellId: string;

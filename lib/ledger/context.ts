@@ -57,7 +57,7 @@ export interface Window extends DerivedRows {
 }
 
 /** A ticket operation that a kiosk's cells could take up next. */
-export interface NextWork {
+interface NextWork {
   ticket: string;
   operation: string;
   name: string;
@@ -68,7 +68,7 @@ export interface NextWork {
   dueOn: string | null;
 }
 
-export interface ContextWorker {
+interface ContextWorker {
   id: string;
   number: string;
   homeCellId: string;
