@@ -1,0 +1,68 @@
+import { openPool, wrap } from "@/db/client";
+import { fire } from "@/tests/bench/drive";
+import { FOLDER, given, onClone, onServer, STATE } from "@/tests/bench/ground";
+import { reportOf } from "@/tests/bench/report";
+import { batches, empties, nextTap, signIns, singles } from "@/tests/bench/shots";
+import { makeState, type State } from "@/tests/bench/state";
+import { keepStatements, recordStatements, replay } from "@/tests/bench/statements";
+import { APP, ask, cloneDatabase, OWNER, urlFor } from "@/tests/setup/clone";
+import { makeTemplate } from "@/tests/setup/template";
+
+const server = given("BENCH_SERVER");
+const BATCHES = 200;
+const SIGN_INS = 400;
+/** People whose taps warm the server up; the others' are measured. */
+const WARM_UP = 200;
+
+const state = await stateOfMorning();
+const warm = state.workers.slice(0, WARM_UP);
+const people = state.workers.slice(WARM_UP);
+
+say("one event a request, beside an empty route");
+const { single, empty } = await onServer(async (url) => {
+  await fire(url, empties(1000), 404);
+  const floor = await fire(url, empties(6000), 404);
+  await fire(url, singles(state, warm));
+  return { empty: floor, single: await fire(url, singles(state, people)) };
+});
+say("batches");
+const batched = await onServer(async (url) => {
+  await fire(url, singles(state, warm));
+  return fire(url, batches(state, people, BATCHES));
+});
+say("sign-ins");
+const signedIn = await onServer(async (url) => {
+  await fire(url, signIns(warm.slice(0, 40)));
+  // spread over the tablets: one tablet alone would be slowed down
+  return fire(url, signIns(people.filter((_, at) => at % 9 === 0).slice(0, SIGN_INS)));
+});
+say("the same statements through pgbench");
+const replayed = await onClone(replayBookings);
+process.stdout.write(`\n${reportOf({ empty, single, batched, signedIn, replayed })}`);
+
+async function stateOfMorning(): Promise<State> {
+  await ask(server, `drop database if exists ${STATE} with (force)`);
+  await cloneDatabase(server, await makeTemplate(server), STATE);
+  const pool = openPool(urlFor(server, APP, STATE), fail);
+  say("booking a morning of 4,000 people");
+  return makeState(wrap(pool)).finally(() => pool.end());
+}
+
+async function replayBookings(name: string) {
+  const pool = openPool(urlFor(server, APP, name), fail);
+  const taps = people.map((worker, at) => ({ worker, event: nextTap(state, worker, at) }));
+  const recorded = await recordStatements(wrap(pool), state.siteId, taps);
+  await pool.end();
+  await keepStatements(urlFor(server, OWNER, name), recorded);
+  await ask(server, "checkpoint");
+  const programs = given("BENCH_PROGRAMS");
+  return replay(urlFor(server, APP, name), { recorded, programs, folder: FOLDER });
+}
+
+function say(text: string): void {
+  process.stderr.write(`── ${text}\n`);
+}
+
+function fail(error: Error): never {
+  throw error;
+}

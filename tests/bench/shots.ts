@@ -1,0 +1,50 @@
+import { v7 as uuid } from "uuid";
+import type { Shot } from "@/tests/bench/drive";
+import { type BenchWorker, byKiosk, PIN, type State, tapped, workOn } from "@/tests/bench/state";
+
+/** Events in a batch, as a tablet hands in what it kept. */
+export const BATCH = 100;
+
+/** The next tap of a worker: on to another ticket, now. */
+export function nextTap(state: State, worker: BenchWorker, at: number) {
+  return tapped(worker, Date.now(), workOn(state, at + 2));
+}
+
+/** Nothing to do for nobody: what is left is the framework's own cost. */
+export function empties(count: number): Shot[] {
+  return Array.from({ length: count }, () => ({ path: "/api/nothing-here", body: "{}" }));
+}
+
+/** One event of each of these people, each in a request of its own. */
+export function singles(state: State, people: readonly BenchWorker[]): Shot[] {
+  return people.map((worker, at) => handIn(worker, [nextTap(state, worker, at)]));
+}
+
+/** Batches of two taps, a minute apart, of each of the fifty people of a tablet. */
+export function batches(state: State, people: readonly BenchWorker[], count: number): Shot[] {
+  const groups = byKiosk(people).filter((group) => group.length * 2 >= BATCH);
+  return Array.from({ length: count }, (_, nth) => {
+    const group = groups[nth % groups.length]!;
+    const round = Math.floor(nth / groups.length);
+    const atMs = Date.now() - (10 - round * 2) * 60_000;
+    const taps = group.flatMap((worker, place) => [
+      tapped(worker, atMs, workOn(state, place + round * 2)),
+      tapped(worker, atMs + 60_000, workOn(state, place + round * 2 + 1)),
+    ]);
+    return handIn(group[0]!, taps.slice(0, BATCH));
+  });
+}
+
+/** A sign-in of each of these people, on their own tablet. */
+export function signIns(people: readonly BenchWorker[]): Shot[] {
+  return people.map(({ number, cookie }) => ({
+    path: "/api/kiosk/sign-in",
+    cookie,
+    body: JSON.stringify({ session: uuid(), worker: number, pin: PIN }),
+  }));
+}
+
+function handIn(worker: BenchWorker, events: readonly unknown[]): Shot {
+  const body = JSON.stringify({ events, deviceTime: new Date().toISOString() });
+  return { path: "/api/kiosk/events", cookie: worker.cookie, body };
+}
