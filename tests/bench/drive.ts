@@ -26,6 +26,7 @@ export async function fire(url: string, shots: readonly Shot[], status = 200): P
     url,
     connections: Math.min(CONNECTIONS, shots.length),
     amount: shots.length,
+    timeout: 120, // seconds: a slow answer is measured, not given up
     requests: [
       {
         method: "POST",

@@ -6,8 +6,8 @@ import { type BenchWorker, byKiosk, PIN, type State, tapped, workOn } from "@/te
 export const BATCH = 100;
 
 /** The next tap of a worker: on to another ticket, now. */
-export function nextTap(state: State, worker: BenchWorker, at: number) {
-  return tapped(worker, Date.now(), workOn(state, at + 2));
+export function nextTap(state: State, worker: BenchWorker) {
+  return tapped(worker, Date.now(), workOn(state, worker, 2));
 }
 
 /** Nothing to do for nobody: what is left is the framework's own cost. */
@@ -17,7 +17,7 @@ export function empties(count: number): Shot[] {
 
 /** One event of each of these people, each in a request of its own. */
 export function singles(state: State, people: readonly BenchWorker[]): Shot[] {
-  return people.map((worker, at) => handIn(worker, [nextTap(state, worker, at)]));
+  return people.map((worker) => handIn(worker, [nextTap(state, worker)]));
 }
 
 /** Batches of two taps, a minute apart, of each of the fifty people of a tablet. */
@@ -27,9 +27,9 @@ export function batches(state: State, people: readonly BenchWorker[], count: num
     const group = groups[nth % groups.length]!;
     const round = Math.floor(nth / groups.length);
     const atMs = Date.now() - (10 - round * 2) * 60_000;
-    const taps = group.flatMap((worker, place) => [
-      tapped(worker, atMs, workOn(state, place + round * 2)),
-      tapped(worker, atMs + 60_000, workOn(state, place + round * 2 + 1)),
+    const taps = group.flatMap((worker) => [
+      tapped(worker, atMs, workOn(state, worker, 2 + round * 2)),
+      tapped(worker, atMs + 60_000, workOn(state, worker, 3 + round * 2)),
     ]);
     return handIn(group[0]!, taps.slice(0, BATCH));
   });

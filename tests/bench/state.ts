@@ -12,7 +12,8 @@ import { type Factory, makeFactory, makeTicket } from "@/tests/make/factory";
 /** A site of 4,000 people at 80 tablets, of whom each has been at work since the morning. */
 const KIOSKS = 80;
 const WORKERS_A_KIOSK = 50;
-const TICKETS = 200;
+/** Three tickets for four people: now and then two are on the same one. */
+const TICKETS = 3000;
 /** Every worker's. One Argon2id hash serves all: making it is not what is measured. */
 export const PIN = "271828";
 const HOUR = 3_600_000;
@@ -42,9 +43,9 @@ export function tapped(worker: BenchWorker, atMs: number, body: EventBody): Cloc
   return { id: uuid(), v: 1, session, worker: number, at, clock, ...body } as ClockEvent;
 }
 
-/** Work on the factory's first operation of a ticket, another one for each number. */
-export function workOn({ tickets }: State, number: number): EventBody {
-  const ticket = tickets[number % tickets.length]!;
+/** Work on the factory's first operation of the worker's nth ticket. */
+export function workOn({ tickets }: State, worker: BenchWorker, nth: number): EventBody {
+  const ticket = tickets[(Number(worker.number) * 7 + nth) % tickets.length]!;
   return { kind: "work", activity: "run", items: [{ ticket, operation: "010" }] };
 }
 
@@ -104,7 +105,7 @@ async function makePeople(factory: Factory): Promise<BenchWorker[]> {
 async function bookMorning(db: Db, state: State, group: readonly BenchWorker[]): Promise<void> {
   const start = Date.now() - 3 * HOUR;
   const events = group.flatMap((worker, at) => {
-    const on = workOn(state, at);
+    const on = workOn(state, worker, 0);
     const [item] = (on as { items: { ticket: string; operation: string }[] }).items;
     const done = { kind: "report", ...item!, good: 1, rework: 0, scrap: 0, stop: false } as const;
     const acts: EventBody[] = [
@@ -113,7 +114,7 @@ async function bookMorning(db: Db, state: State, group: readonly BenchWorker[]):
       { kind: "break-start", break: "rest" },
       { kind: "break-end", break: "rest" },
       done,
-      workOn(state, at + 1),
+      workOn(state, worker, 1),
     ];
     return acts.map((act, nth) => tapped(worker, start + nth * 600_000 + at * 1000, act));
   });

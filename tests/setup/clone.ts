@@ -14,8 +14,13 @@ export function urlFor(server: string, who: { login: string; password: string },
 }
 
 /** Asks the server one thing as its superuser. */
-export async function ask(server: string, text: string, values: unknown[] = []) {
-  const client = new pg.Client({ connectionString: `${server}postgres` });
+export async function ask(
+  server: string,
+  text: string,
+  values: unknown[] = [],
+  database = "postgres",
+) {
+  const client = new pg.Client({ connectionString: `${server}${database}` });
   await client.connect();
   try {
     return await client.query<Record<string, unknown>>(text, values);

@@ -1,5 +1,5 @@
 import { openPool, wrap } from "@/db/client";
-import { foundSite } from "@/db/sites/found";
+import { loadWithProgress } from "@/scripts/ground/demo";
 import { startTestServer } from "@/scripts/ground/test-data.mjs";
 import { APP, ask, cloneDatabase, urlFor } from "@/tests/setup/clone";
 import { makeTemplate } from "@/tests/setup/template";
@@ -37,8 +37,7 @@ async function seed(name: string): Promise<string> {
   const pool = openPool(urlFor(server, APP, making), (error) => {
     throw error;
   });
-  await foundSite(wrap(pool), { name: "Larkmoor", timeZone: "America/Chicago" });
-  await pool.end();
+  await loadWithProgress(wrap(pool)).finally(() => pool.end());
   await ask(server, `alter database ${making} rename to ${name}`);
   return name;
 }

@@ -22,7 +22,7 @@ const DATES = [
   /\bdate_trunc\s*\(\s*'(day|week)/i,
   /\b(to_date|make_date)\s*\(/i,
   /\bto_char\s*\([^)]*DD/,
-  /(?<![\w.])date\s*\(\s*[a-z_]*_?at\b/i,
+  /(?<![\w.])date\s*\(\s*[a-z_]*_?at\b/,
 ];
 
 /** Lists where a text of SQL decides a day, line by line; a comment may speak of it. */
