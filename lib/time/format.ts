@@ -20,16 +20,38 @@ export interface DecimalHours {
  * @param parts integer seconds, 0 or more; may be empty
  */
 export function decimalHours(parts: readonly number[]): DecimalHours {
+  const total = roundedHundredths(sum(parts));
+  return { total: hoursText(total), parts: shareHundredths(total, parts).map(hoursText) };
+}
+
+/**
+ * Shares a total of hundredths of an hour among lengths, by their floors and largest fractions. The
+ * total is theirs rounded up or down, once, so that parts of parts add up as well.
+ *
+ * @param total whole hundredths: not less than the floors of `parts`
+ * @param parts integer seconds, 0 or more; may be empty
+ * @returns whole hundredths in the order of `parts`; they sum to `total`
+ */
+export function shareHundredths(total: number, parts: readonly number[]): number[] {
   assert(
     parts.every((part) => Number.isInteger(part) && part >= 0),
     "decimalHours: whole seconds, 0 or more",
   );
-  const total = hundredths(sum(parts));
   const shares = parts.map((part) => Math.floor(part / HUNDREDTH_SECONDS));
   const byFraction = parts.map((part, index) => ({ index, left: part % HUNDREDTH_SECONDS }));
   byFraction.sort((a, b) => b.left - a.left); // stable: ties keep the order of the parts
   for (const { index } of byFraction.slice(0, total - sum(shares))) shares[index]! += 1;
-  return { total: hoursText(total), parts: shares.map(hoursText) };
+  return shares;
+}
+
+/** A length in hundredths of an hour, half up on exact seconds. */
+export function roundedHundredths(seconds: number): number {
+  return Math.floor((seconds + HUNDREDTH_SECONDS / 2) / HUNDREDTH_SECONDS);
+}
+
+/** Hundredths of an hour as decimal hours: 175 is "1.75". */
+export function hoursText(hundredths: number): string {
+  return `${Math.floor(hundredths / 100)}.${String(hundredths % 100).padStart(2, "0")}`;
 }
 
 /** One length as decimal hours with two places, half up on exact seconds: 6300 is "1.75". */
@@ -54,6 +76,18 @@ export function clockText(atMs: number, zone: string): string {
   return wallClock(atMs, zone).toPlainTime().toString({ smallestUnit: "minute" });
 }
 
+/** Local time to the second on a 24-hour clock, "09:05:09". */
+export function clockSecondText(atMs: number, zone: string): string {
+  return wallClock(atMs, zone).toPlainTime().toString({ smallestUnit: "second" });
+}
+
+/** An exact length, "7:05:09": hours, minutes and seconds. */
+export function secondsText(seconds: number): string {
+  const pad = (part: number) => String(part).padStart(2, "0");
+  const minutes = Math.floor(seconds / 60);
+  return `${Math.floor(minutes / 60)}:${pad(minutes % 60)}:${pad(seconds % 60)}`;
+}
+
 /** A date as the desk writes it, "Thu 14 May", with the language's own words in that order. */
 export function dayText(date: string, language: string): string {
   const atMs = Temporal.PlainDate.from(date).toZonedDateTime("UTC").epochMilliseconds;
@@ -65,12 +99,4 @@ export function dayText(date: string, language: string): string {
   return parts
     .map((part) => new Intl.DateTimeFormat(language, { ...part, timeZone: "UTC" }).format(atMs))
     .join(" ");
-}
-
-function hundredths(seconds: number): number {
-  return Math.floor((seconds + HUNDREDTH_SECONDS / 2) / HUNDREDTH_SECONDS);
-}
-
-function hoursText(hundredths: number): string {
-  return `${Math.floor(hundredths / 100)}.${String(hundredths % 100).padStart(2, "0")}`;
 }

@@ -1,0 +1,61 @@
+import { Choice } from "@/components/shell/choice";
+import { SentenceForm } from "@/components/shell/sentence-form";
+import type { HoursFilter } from "@/lib/hours/filter";
+
+/** Whose hours the page shows and of which days, as a sentence; the file is of the same. */
+export function HoursFilterSentence({
+  filter,
+  cells,
+  exports,
+}: {
+  filter: HoursFilter;
+  /** Empty for someone who sees only their own. */
+  cells: readonly string[];
+  exports: boolean;
+}) {
+  const { from, to, cell } = filter;
+  return (
+    <SentenceForm
+      action="/hours"
+      book={
+        cells.length === 0 ? (
+          "Your hours"
+        ) : (
+          <>
+            {"Hours of "}
+            <Choice
+              name="cell"
+              label="Home cell"
+              value={cell}
+              options={[["", "all cells"], ...cells.map((name) => [name, name] as const)]}
+            />
+          </>
+        )
+      }
+      day={
+        <>
+          {"from "}
+          <input
+            key={`from ${from}`}
+            name="from"
+            type="date"
+            aria-label="First day"
+            defaultValue={from}
+          />
+          {" to "}
+          <input key={`to ${to}`} name="to" type="date" aria-label="Last day" defaultValue={to} />{" "}
+          <button type="submit">Show</button>
+          {exports && (
+            <a
+              className="hours-save"
+              href={`/hours/csv?${new URLSearchParams({ from, to, cell })}`}
+              download
+            >
+              Save as CSV
+            </a>
+          )}
+        </>
+      }
+    />
+  );
+}
