@@ -69,7 +69,7 @@ export function workweeks(rule: WorkweekRule, clock: ZoneClock): (atSecond: numb
   };
 }
 
-/** The workday of a workweek that an instant inside it belongs to. */
+/** The workday of a workweek that an instant belongs to; of an earlier instant the first. */
 export function workdayIn(week: Workweek, atSecond: number): Workday {
   return week.days.findLast(({ start }) => start <= atSecond) ?? week.days[0]!;
 }

@@ -44,6 +44,6 @@ export function dateOf(atSecond: number, startsAt: number, calendar: Calendar): 
 
 function dayOf(at: number, startsAt: number, week: Workweek, attribution: Attribution) {
   const isWhole = attribution === "shift-start";
-  const { date, end } = workdayIn(week, isWhole ? Math.max(startsAt, week.start) : at);
+  const { date, end } = workdayIn(week, isWhole ? startsAt : at);
   return { date, until: isWhole ? week.end : end };
 }
