@@ -8,6 +8,13 @@ const PAGE_MAX = 500;
 /** The schema of a `limit` parameter. */
 export const pageLimit = z.coerce.number().int().min(1).max(PAGE_MAX).default(PAGE_DEFAULT);
 
+/** The schema of a filter by name; a database knows no text with a NUL in it. */
+export const filterName = z
+  .string()
+  .min(1)
+  .max(200)
+  .refine((text) => !text.includes("\0"), "Give a name.");
+
 /** The schema of a page's answer; `nextCursor` is null on the last page. */
 export function page<T extends z.ZodType>(item: T) {
   return z.object({ items: z.array(item), nextCursor: z.string().nullable() });

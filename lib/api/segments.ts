@@ -1,22 +1,23 @@
 import { z } from "zod";
 import { cursor } from "@/lib/api/cursor";
-import { page, pageLimit } from "@/lib/api/page";
-import { instant, workerNumber } from "@/lib/ledger/schema";
+import { filterName, page, pageLimit } from "@/lib/api/page";
+import { ITEMS_MAX, instant, workerNumber } from "@/lib/ledger/schema";
+import { siteDate } from "@/lib/time/schema";
 
 /** Where a page of segments ended: days first, then one worker after the other (LEDGER.md 11). */
 export const segmentPosition = z.object({
   day: z.iso.date(),
   worker: z.uuid(),
-  start: z.number().int(),
-  item: z.number().int().min(0),
+  start: z.number().int().min(0).max(Date.UTC(2200, 0)),
+  item: z.number().int().min(0).max(ITEMS_MAX),
 });
 export type SegmentPosition = z.infer<typeof segmentPosition>;
 
 /** GET /api/v1/segments: production days of the site from `from` until before `to`. */
 export const segmentsQuery = z.strictObject({
-  from: z.iso.date().optional(),
-  to: z.iso.date().optional(),
-  cell: z.string().min(1).max(200).optional(),
+  from: siteDate.optional(),
+  to: siteDate.optional(),
+  cell: filterName.optional(),
   cursor: cursor(segmentPosition).optional(),
   limit: pageLimit,
 });

@@ -1,18 +1,17 @@
 import { z } from "zod";
 import { cursor } from "@/lib/api/cursor";
-import { page, pageLimit } from "@/lib/api/page";
+import { filterName, page, pageLimit } from "@/lib/api/page";
 import { bookedSegment } from "@/lib/api/segments";
 import { kioskTicket, ticketOperation } from "@/lib/kiosks/schema";
 import { instant } from "@/lib/ledger/schema";
 
-const name = z.string().min(1).max(200);
 const { ticket, model, options, quantity, status, dueOn } = kioskTicket.shape;
 
 /** GET /api/v1/tickets: all filters may be left out; `cell` is where the next operation is. */
 export const ticketsQuery = z.strictObject({
   status: status.optional(),
-  cell: name.optional(),
-  model: name.optional(),
+  cell: filterName.optional(),
+  model: filterName.optional(),
   cursor: cursor(z.number().int().min(0)).optional(),
   limit: pageLimit,
 });

@@ -3,25 +3,24 @@ import { instant } from "@/lib/ledger/schema";
 import { policyOf } from "@/lib/pay/presets";
 import { payPolicy, presetName } from "@/lib/pay/schema";
 import { instantMs } from "@/lib/time/instant";
+import { siteDate } from "@/lib/time/schema";
 import { addDays } from "@/lib/time/site-day";
 import { workweekStart } from "@/lib/time/workweek";
 import { isTimeZone } from "@/lib/time/zone";
 
 /** A year and a half: a range that needs more is several. */
 const DAYS_MAX = 550;
+const DAY_MS = 86_400_000;
 /** Longer than any shift; what is longer is a mistake in the data. */
-const SPAN_MAX_MS = 48 * 3_600_000;
+const SPAN_MAX_MS = 31 * DAY_MS;
+/** The longest range, and as much again for the weeks that averages look back at. */
+const TIME_MAX_MS = 2 * DAYS_MAX * DAY_MS;
 /** Six a day over the longest range, with room to spare. */
 const SPANS_MAX = 5000;
 
 const decimal = z
   .string()
   .regex(/^\d{1,9}(\.\d{1,6})?$/, 'Give a decimal as text, such as "14.25".');
-
-/** Years whose zone rules are known and whose weeks can be counted. */
-const date = z.iso
-  .date()
-  .refine((text) => text >= "1970-01-08" && text < "2200", "Give a date from 1970 to 2199.");
 
 const span = z.strictObject({
   start: instant,
@@ -33,15 +32,15 @@ const span = z.strictObject({
 
 const extra = z.strictObject({
   /** The date on which the workweek begins. */
-  workweek: date,
+  workweek: siteDate,
   amount: decimal,
   kind: z.enum(["ordinary", "flat-sum", "creditable", "excluded"]).default("ordinary"),
 });
 
 const fields = z.strictObject({
   timeZone: z.string().max(64).refine(isTimeZone, "Give an IANA time zone, such as Europe/Madrid."),
-  from: date,
-  to: date,
+  from: siteDate,
+  to: siteDate,
   policy: z.union([presetName, payPolicy], {
     error: `Give a policy, or one of: ${presetName.options.join(", ")}.`,
   }),
@@ -81,10 +80,14 @@ function checkSpans({ spans }: Fields, complain: Complain): void {
   for (const { index, startMs, endMs } of timed) {
     const isKnown = startMs >= 0 && endMs < Date.UTC(2200, 0);
     if (endMs <= startMs) complain(["spans", index], "A span ends after it starts.");
-    else if (endMs - startMs > SPAN_MAX_MS) complain(["spans", index], "A span of over 48 hours.");
+    else if (endMs - startMs > SPAN_MAX_MS)
+      complain(["spans", index], "Give spans of at most 31 days.");
     else if (!isKnown) complain(["spans", index], "Give instants from 1970 to 2199.");
   }
   const inOrder = timed.toSorted((a, b) => a.startMs - b.startMs);
+  const [first, last] = [inOrder[0], inOrder.at(-1)];
+  const isFar = first && last && last.startMs - first.startMs > TIME_MAX_MS;
+  if (isFar) complain(["spans", last.index], "Give the time of at most three years at once.");
   inOrder.forEach(({ index, startMs }, place) => {
     const before = inOrder[place - 1];
     if (!before || startMs >= before.endMs) return;

@@ -20,8 +20,12 @@ describe("segmentsQuery", () => {
   });
   test.each([
     [{ from: "2026-02-30" }, "from"],
+    [{ from: "9999-12-30" }, "from"],
+    [{ cell: "\0" }, "cell"],
     [{ to: "2026-03-02T00:00:00Z" }, "to"],
     [{ cursor: cursorOf({ ...position, worker: "1042" }) }, "cursor"],
+    [{ cursor: cursorOf({ ...position, start: 9e15 }) }, "cursor"],
+    [{ cursor: cursorOf({ ...position, item: 40_000 }) }, "cursor"],
     [{ cursor: cursorOf(7) }, "cursor"],
   ])("refuses %j at %s", (query, path) => {
     expect(segmentsQuery.safeParse(query).error?.issues[0]?.path).toEqual([path]);

@@ -15,6 +15,7 @@ describe("ticketsQuery", () => {
   test.each([
     [{ status: "late" }, "status"],
     [{ cell: "" }, "cell"],
+    [{ model: "Her\0on" }, "model"],
     [{ cursor: cursorOf(-1) }, "cursor"],
     [{ limit: "501" }, "limit"],
   ])("refuses %j at %s", (query, path) => {

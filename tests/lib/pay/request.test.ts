@@ -42,7 +42,11 @@ describe("payRequest", () => {
     [{ spans: [{ ...span, kind: "nap" }] }, "spans.0.kind: "],
     [{ spans: [{ ...span, start: "2026-06-09 08:00" }] }, "spans.0.start: Give an RFC 3339"],
     [{ spans: [{ ...span, end: span.start }] }, "spans.0: A span ends after it starts"],
-    [{ spans: [{ ...span, end: "2026-06-12T08:00:00Z" }] }, "spans.0: A span of over 48 hours"],
+    [{ spans: [{ ...span, end: "2026-07-11T08:00:00Z" }] }, "spans.0: Give spans of at most 31"],
+    [
+      { spans: [span, { ...span, start: "2023-06-03T08:00:00Z", end: "2023-06-03T09:00:00Z" }] },
+      "spans.0: Give the time of at most three years",
+    ],
     [{ spans: [{ ...span, rate: 14 }] }, "spans.0.rate: "],
     [{ spans: [{ ...span, rate: "-1" }] }, "spans.0.rate: Give a decimal as text"],
     [{ spans: [{ ...span, rate: "1e3" }] }, "spans.0.rate: Give a decimal as text"],
