@@ -76,8 +76,15 @@ function columnsOf(row: object): Fields {
   );
 }
 
+/** The names are few and each row asks for all of them. */
+const columnNames = new Map<string, string>();
+
 function snake(name: string): string {
-  return name.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`);
+  const known = columnNames.get(name);
+  if (known) return known;
+  const column = name.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`);
+  columnNames.set(name, column);
+  return column;
 }
 
 function instant(ms: number | null): string | null {

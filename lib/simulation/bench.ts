@@ -12,6 +12,8 @@ import type { Troubles } from "@/lib/simulation/trouble";
 /** What everyone on the floor shares. */
 export interface Hall {
   open: Traveller[];
+  /** Those of them that have just come to their end. */
+  ended: Traveller[];
   random: Random;
   tempo: Tempo;
   troubles: Troubles;

@@ -44,13 +44,13 @@ export function takeJob(
 
 /** The ticket operations of a cell that someone could take up or join, in order of their due dates. */
 export function waitingIn(open: readonly Traveller[], cell: CellName, at: number): InHand[] {
-  return open
-    .flatMap((traveller) => {
-      const step = currentStep(traveller);
-      const isHere = step?.operation.cell === cell && traveller.readyAt <= at;
-      return isHere && isFree(step) ? [{ traveller, step }] : [];
-    })
-    .sort((a, b) => (a.traveller.dueOn < b.traveller.dueOn ? -1 : 1));
+  const waiting: InHand[] = [];
+  for (const traveller of open) {
+    const step = currentStep(traveller);
+    if (step?.operation.cell !== cell || traveller.readyAt > at || !isFree(step)) continue;
+    waiting.push({ traveller, step });
+  }
+  return waiting.sort((a, b) => (a.traveller.dueOn < b.traveller.dueOn ? -1 : 1));
 }
 
 function isFree({ crew, toDo, toRework, operation }: Step): boolean {

@@ -46,6 +46,7 @@ export function simulate({ nowMs, weeks, people = cast, openTickets }: Scenario)
   const troubles = troublesOf(calendar, shifts);
   const hall: Hall = {
     open: ticketsOnTheFloor(calendar, releaser, openTickets ?? OPEN_TICKETS, random),
+    ended: [],
     random,
     tempo: tempoOf(random),
     troubles,
@@ -154,13 +155,10 @@ function insert(
   queue.splice(low, 0, entry);
 }
 
-function replaceEnded({ open, releaser }: Play, at: number): Traveller[] {
-  const released: Traveller[] = [];
-  for (const [index, { endedAt }] of open.entries()) {
-    if (endedAt === null) continue;
+function replaceEnded({ open, ended, releaser }: Play, at: number): Traveller[] {
+  return ended.splice(0).map((traveller) => {
     const next = releaser.release(at);
-    open[index] = next;
-    released.push(next);
-  }
-  return released;
+    open[open.indexOf(traveller)] = next;
+    return next;
+  });
 }

@@ -164,6 +164,7 @@ function report(bench: Bench, { traveller, step }: InHand, pieces: number, stop:
       : tap(bench, { kind: "report", ...counted, stop, ...fault });
   const restsSeconds = troubles.restsSeconds(traveller, operation, at);
   countPieces(traveller, step, { ...count, at: bench.at, restsSeconds });
+  if (traveller.endedAt !== null) bench.hall.ended.push(traveller);
   if (random.chance(OBJECTS))
     ask(bench, `objection:${tap(bench, { kind: "object", subject: id })}`);
 }

@@ -80,8 +80,18 @@ export function daysTouched(
   return listDays(first, addDays(last, 1)).map((date) => ({ date, ...dayBounds(date, rules) }));
 }
 
-/** The latest row of rules under which the day begins no earlier than the row itself. */
+/** Each record of a batch asks for the same few days, and wall time is slow to ask. */
+const known = new WeakMap<readonly DayRule[], Map<string, number>>();
+
 function dayStart(date: string, rules: readonly DayRule[]): number {
+  const starts = known.get(rules) ?? new Map<string, number>();
+  const start = starts.get(date) ?? askDayStart(date, rules);
+  known.set(rules, starts.set(date, start));
+  return start;
+}
+
+/** The latest row of rules under which the day begins no earlier than the row itself. */
+function askDayStart(date: string, rules: readonly DayRule[]): number {
   assert(rules.length > 0, "dayStart: a site has at least one row of rules");
   const starts = rules.map((rule) => ({ rule, startMs: startUnder(date, rule) }));
   const governed = starts.findLast(({ rule, startMs }) => rule.fromMs <= startMs) ?? starts[0]!;

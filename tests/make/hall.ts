@@ -21,6 +21,7 @@ export function makeHall(open: Traveller[] = [], seed = "hall"): Hall {
   const troubles = troublesOf(calendar, []);
   return {
     open,
+    ended: [],
     random,
     tempo: tempoOf(random),
     troubles: { ...troubles, mustFail: () => false, isHasty: () => false, isDown: () => false },
