@@ -16,11 +16,6 @@ export function listBenches(store: Store): Promise<KeptBench[]> {
   return store.getAll("benches");
 }
 
-/** Forgets a worker's bench when the shift is over. */
-export async function forgetBench(store: Store, worker: string): Promise<void> {
-  await store.delete("benches", worker);
-}
-
 /** Keeps the cell as the server told it, with its `ETag`. */
 export async function keepCell(
   store: Store,

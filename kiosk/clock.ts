@@ -15,7 +15,7 @@ export interface RoundTrip {
 }
 
 /** The instant of an act as the kiosk best knows it, and how it knows. */
-export interface Stamp {
+interface Stamp {
   atMs: number;
   clock: Omit<Clock, "seq">;
 }

@@ -25,7 +25,7 @@ export interface KeptCell {
   receivedMs: number;
 }
 
-export interface KioskSchema extends DBSchema {
+interface KioskSchema extends DBSchema {
   outbox: { key: number; value: Waiting; indexes: { id: string } };
   sessions: { key: string; value: BenchSession };
   benches: { key: string; value: KeptBench };

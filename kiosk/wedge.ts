@@ -1,5 +1,5 @@
 /** One key press as a wedge scanner types it. */
-export interface KeyPress {
+interface KeyPress {
   key: string;
   atMs: number;
 }

@@ -6,7 +6,7 @@ import { type FieldError, no, ok, type Result } from "@/lib/result";
 const BODY_MAX_BYTES = 1_000_000;
 
 /** Reads a request's body as text, and stops reading once it is too large. */
-export async function readText(request: Request): Promise<Result<string>> {
+async function readText(request: Request): Promise<Result<string>> {
   const tooLarge = no("tooLarge", "The body is over 1 MB. Send it in smaller parts.");
   if (Number(request.headers.get("content-length") ?? 0) > BODY_MAX_BYTES) return tooLarge;
   if (!request.body) return ok("");
@@ -43,7 +43,7 @@ export function check<T>(value: unknown, schema: z.ZodType<T>): Result<T> {
 }
 
 /** Lists the fields of a Zod error as dotted paths, one entry per unknown field. */
-export function fieldErrors(error: z.ZodError): FieldError[] {
+function fieldErrors(error: z.ZodError): FieldError[] {
   return error.issues.flatMap((issue) => errorsOf(issue, []));
 }
 

@@ -7,7 +7,7 @@ import { type FormAction, type Sent, useAnswer } from "@/components/shell/use-an
 import type { GivenPin } from "@/lib/people/schema";
 
 /** A worker as the form shows one: what is on file, or a new one's first values. */
-export interface WorkerOnFile {
+interface WorkerOnFile {
   id: string;
   number: string;
   name: string;

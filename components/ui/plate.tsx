@@ -3,14 +3,7 @@ import { Icon } from "@/components/ui/icon";
 import type { IconName } from "@/components/ui/icon-paths";
 
 /** Where a board is round: towards the rim of the page. Without one it is square all round. */
-export type Rim =
-  | "left"
-  | "right"
-  | "both"
-  | "top-left"
-  | "top-right"
-  | "bottom-left"
-  | "bottom-right";
+type Rim = "left" | "right" | "both" | "top-left" | "top-right" | "bottom-left" | "bottom-right";
 
 interface PlateProps extends ButtonHTMLAttributes<HTMLButtonElement> {
   children: ReactNode;

@@ -4,7 +4,7 @@ import type { Activity, HoursRow } from "@/lib/hours/sheet";
 import type { Tap } from "@/lib/hours/taps";
 
 /** A production day with its bounds, epoch seconds; `lib/time` decides where days begin. */
-export interface DayWindow {
+interface DayWindow {
   date: string;
   start: number;
   end: number;

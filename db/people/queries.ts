@@ -83,17 +83,6 @@ export async function findWorker(
   return worker ?? null;
 }
 
-/** Finds a worker by id, for someone's own pages; null for none of this site. */
-export async function findWorkerById({ db, siteId }: Scope, id: string) {
-  const [worker] = await db
-    .select(shown)
-    .from(workers)
-    .innerJoin(cells, homeCell)
-    .where(and(eq(workers.siteId, siteId), eq(workers.id, id)))
-    .limit(1);
-  return worker ?? null;
-}
-
 /** The number that the next new worker may have: one more than the highest, from 1001. */
 export async function findNextNumber({ db, siteId }: Scope): Promise<string> {
   const [highest] = await db

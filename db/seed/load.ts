@@ -12,7 +12,7 @@ import { no, ok, type Result } from "@/lib/result";
 import { type DemoRun, type Scenario, simulate } from "@/lib/simulation/simulate";
 
 /** How far the loading has come: what it is at, and how much of that is done, 0 to 1. */
-export type Progress = (step: string, share: number) => void;
+type Progress = (step: string, share: number) => void;
 
 export interface Loading extends Omit<Scenario, "nowMs"> {
   db: Db;

@@ -29,7 +29,6 @@ const shown = {
   workerNumber: workers.number,
   workerName: workers.name,
 };
-export type SegmentRow = Awaited<ReturnType<typeof listSegments>>[number];
 
 /** Lists segments one worker after the other, each worker's in the order of time. */
 export async function listSegments(scope: Scope, wanted: SegmentsWanted) {

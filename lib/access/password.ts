@@ -1,6 +1,6 @@
 /** Characters: the least where the password is the only factor, and the most that is taken. */
 export const PASSWORD_MIN = 15;
-export const PASSWORD_MAX = 128;
+const PASSWORD_MAX = 128;
 const DIFFERENT_MIN = 6;
 
 /** Openings of the long passwords that guessers try first; matched without spaces and case. */

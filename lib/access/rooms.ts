@@ -10,7 +10,7 @@ export interface Room {
 }
 
 /** The rooms of the office, in the order of the head. */
-export const rooms: readonly Room[] = [
+const rooms: readonly Room[] = [
   { name: "People", path: "/people", may: "people.see", leaf: "book" },
   { name: "Tickets", path: "/tickets", may: "tickets.see", leaf: "book" },
   { name: "Kiosks", path: "/kiosks", may: "kiosks.see", leaf: "book" },

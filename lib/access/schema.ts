@@ -4,12 +4,7 @@ import { chosen, formId, line } from "@/lib/forms";
 import { workerNumber } from "@/lib/ledger/schema";
 
 /** An e-mail as an account has it: small letters, no spaces around it. */
-export const email = z
-  .string()
-  .trim()
-  .toLowerCase()
-  .max(254)
-  .pipe(z.email("Give an e-mail address."));
+const email = z.string().trim().toLowerCase().max(254).pipe(z.email("Give an e-mail address."));
 
 const password = z.string().min(1, "Fill this in.").max(1000);
 

@@ -16,7 +16,7 @@ import { instant } from "@/lib/ledger/schema";
 import { payAnswer } from "@/lib/pay/answer";
 
 /** RFC 9457, as every refusal is answered; `errors` names the fields of invalid input. */
-export const problem = z.object({
+const problem = z.object({
   type: z.string(),
   title: z.string(),
   status: z.number().int(),

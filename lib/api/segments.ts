@@ -5,7 +5,7 @@ import { ITEMS_MAX, instant, workerNumber } from "@/lib/ledger/schema";
 import { siteDate } from "@/lib/time/schema";
 
 /** Where a page of segments ended: days first, then one worker after the other (LEDGER.md 11). */
-export const segmentPosition = z.object({
+const segmentPosition = z.object({
   day: z.iso.date(),
   worker: z.uuid(),
   start: z.number().int().min(0).max(Date.UTC(2200, 0)),
@@ -46,6 +46,6 @@ export const bookedSegment = z.object({
 export type BookedSegment = z.infer<typeof bookedSegment>;
 
 /** A segment in the list, with the production day on which it begins. */
-export const daySegment = bookedSegment.extend({ day: z.iso.date() });
+const daySegment = bookedSegment.extend({ day: z.iso.date() });
 
 export const segmentPage = page(daySegment);

@@ -1,5 +1,5 @@
 /** A safety sign: `w-` beware (yellow triangle), `m-` must (blue disc), `p-` must not. */
-export type SignName =
+type SignName =
   | "w-flame"
   | "w-ex"
   | "w-hot"
@@ -20,7 +20,7 @@ export interface Caution {
 }
 
 /** The keys of the words in `lib/messages`, section `caution`. */
-export type CautionWords =
+type CautionWords =
   | "lacquerBurns"
   | "vapourExplodes"
   | "vapourHarms"

@@ -123,13 +123,13 @@ export type Screen =
   | { at: "done"; deed: Deed; quick: boolean };
 
 /** A count keyed on the pad instead of stepped up and down. */
-export interface Keying {
+interface Keying {
   field: CountField;
   digits: string;
 }
 
 /** Who stands at the kiosk. */
-export interface Visit {
+interface Visit {
   worker: string;
   /** True where the worker said "I am already in" to a kiosk that knew of no shift. */
   saidIn: boolean;
@@ -169,7 +169,7 @@ export interface KioskState {
   undo: UndoOffer | null;
 }
 
-export interface KnownTicket {
+interface KnownTicket {
   ticket: KioskTicket;
   atMs: number;
 }

@@ -3,7 +3,7 @@ import { z } from "zod";
 /** POST /api/v1/calculate/check-code: any scanned or keyed text. */
 export const checkCodeRequest = z.strictObject({ text: z.string().max(200) });
 
-export const codeKind = z.enum(["ticket", "badge", "carrier"]);
+const codeKind = z.enum(["ticket", "badge", "carrier"]);
 export type CodeKind = z.infer<typeof codeKind>;
 
 /** What a scanned or keyed text turned out to be. */

@@ -5,7 +5,7 @@ import { boundaryMs } from "@/lib/time/wall-time";
 export const TIME_ZONE = "America/Chicago";
 
 /** Whole weeks of history before the week in which the scenario is loaded. */
-export const HISTORY_WEEKS = 8;
+const HISTORY_WEEKS = 8;
 /** The factory runs unrecorded for so long before, so that every cell has work on the first day. */
 const WARM_UP_DAYS = 21;
 /** Shifts are planned so far ahead. */

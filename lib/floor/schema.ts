@@ -6,20 +6,20 @@ const seconds = z.number().int().min(0);
 const second = z.number().int();
 
 /** Someone who is in, and since when they are on what they are on. */
-export const present = z.object({ worker: z.string(), name: z.string(), since: second });
+const present = z.object({ worker: z.string(), name: z.string(), since: second });
 
 /**
  * Someone on a ticket operation: their interval since `since` is shared by `weights`, and this
  * operation has the share at `share`.
  */
-export const presentOnWork = present.extend({
+const presentOnWork = present.extend({
   activity,
   weights: z.array(seconds),
   share: z.number().int().min(0),
 });
 
 /** A ticket operation that someone is on now, whoever and how many. */
-export const floorWork = z.object({
+const floorWork = z.object({
   ticket: z.string(),
   operation: z.string(),
   name: z.string(),
@@ -35,7 +35,7 @@ export const floorWork = z.object({
 export type FloorWork = z.infer<typeof floorWork>;
 
 /** Someone who is in but on no ticket. */
-export const presentElsewhere = present.extend({
+const presentElsewhere = present.extend({
   doing: z.enum(["indirect", "meal", "rest", "unassigned"]),
   /** The other-work code of indirect time. */
   code: z.string().nullable(),
@@ -43,9 +43,9 @@ export const presentElsewhere = present.extend({
 export type PresentElsewhere = z.infer<typeof presentElsewhere>;
 
 /** Someone planned to be in now who is not. */
-export const missing = z.object({ worker: z.string(), name: z.string(), plannedAt: second });
+const missing = z.object({ worker: z.string(), name: z.string(), plannedAt: second });
 
-export const floorCell = z.object({
+const floorCell = z.object({
   cell: z.string(),
   inCount: z.number().int(),
   work: z.array(floorWork),

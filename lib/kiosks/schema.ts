@@ -9,7 +9,7 @@ export type Language = z.infer<typeof language>;
 const seconds = z.number().int().min(0);
 
 /** The public half of the key with which a kiosk seals credentials (LEDGER.md 9). */
-export const sealKey = z.object({ kid: z.string(), key: z.string() });
+const sealKey = z.object({ kid: z.string(), key: z.string() });
 export type SealKey = z.infer<typeof sealKey>;
 
 // POST /api/kiosk/enrol ---------------------------------------------------------------------------
@@ -47,17 +47,16 @@ export const signInRequest = z.strictObject({
   worker: workerNumber,
   pin: z.string().regex(/^\d{1,12}$/, "Give the PIN, digits only."),
 });
-export const signedInWorker = z.object({
+const signedInWorker = z.object({
   worker: workerNumber,
   name: z.string(),
   language: z.string(),
   role,
 });
-export type SignedInWorker = z.infer<typeof signedInWorker>;
 
 // Tickets -----------------------------------------------------------------------------------------
 /** What stands in the way of an operation, in the order in which a person would want to hear it. */
-export const obstacle = z.enum(["wrong-cell", "finished", "predecessor-open", "ticket-closed"]);
+const obstacle = z.enum(["wrong-cell", "finished", "predecessor-open", "ticket-closed"]);
 export type Obstacle = z.infer<typeof obstacle>;
 
 export const ticketOperation = z.object({
@@ -106,7 +105,7 @@ export type KioskTicket = z.infer<typeof kioskTicket>;
 export const benchQuery = z.strictObject({ worker: workerNumber.optional() });
 
 /** A ticket operation someone is on, with what the bench must say of it. */
-export const benchItem = z.object({
+const benchItem = z.object({
   ticket: z.string(),
   operation: z.string(),
   weight: seconds,
@@ -125,7 +124,7 @@ export const benchItem = z.object({
 export type BenchItem = z.infer<typeof benchItem>;
 
 /** Today's seconds by what they were, for a production day that ends now. */
-export const daySums = z.object({
+const daySums = z.object({
   attendanceSeconds: seconds,
   directSeconds: seconds,
   indirectSeconds: seconds,
@@ -136,7 +135,7 @@ export const daySums = z.object({
 export type DaySums = z.infer<typeof daySums>;
 
 /** One event as the fold reads it, in the form in which it travels to the kiosk. */
-export const foldedEvent = z.object({
+const foldedEvent = z.object({
   id: z.uuid(),
   atMs: z.number(),
   seq: z.number(),
@@ -150,7 +149,7 @@ export const foldedEvent = z.object({
   body: z.object({ kind: z.string() }).loose(),
 });
 
-export const looseEndView = z.object({ code: looseEndCode, subject: z.string(), at: instant });
+const looseEndView = z.object({ code: looseEndCode, subject: z.string(), at: instant });
 
 export const bench = z.object({
   shift: z.object({ start: instant }).nullable(),
@@ -222,7 +221,7 @@ export const kioskCell = z.object({
 export type KioskCell = z.infer<typeof kioskCell>;
 
 // POST /api/kiosk/events --------------------------------------------------------------------------
-export const eventResult = z.object({
+const eventResult = z.object({
   id: z.string(),
   verdict,
   looseEnds: z.array(looseEndCode),

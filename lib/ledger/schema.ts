@@ -19,7 +19,7 @@ export const instant = z
 export const workerNumber = z.string().regex(/^\d{1,8}$/, "Give the worker's number, digits only.");
 
 /** A ticket number: spaces and hyphens are forgiven, digits are kept. */
-export const ticketNumber = z
+const ticketNumber = z
   .string()
   .max(24)
   .transform((text) => text.replace(/[\s-]/g, ""))
@@ -30,7 +30,7 @@ const code = z.string().min(1).max(64);
 const count = z.number().int().min(0).max(QUANTITY_MAX);
 
 /** One ticket operation someone is on; the weight is in whole seconds (CALCULATIONS.md 2). */
-export const item = z.strictObject({
+const item = z.strictObject({
   ticket: ticketNumber,
   operation: operationCode,
   weight: z.number().int().min(0).max(1_000_000_000).optional(),
@@ -93,14 +93,14 @@ export const eventBodies = {
   release: z.strictObject({ hold: z.string().min(1).max(200) }),
 } as const;
 
-export type EventKind = keyof typeof eventBodies;
+type EventKind = keyof typeof eventBodies;
 type Shape<K extends EventKind> = (typeof eventBodies)[K] extends z.ZodObject<infer S> ? S : never;
 export type EventBody = {
   [K in EventKind]: z.infer<z.ZodObject<{ kind: z.ZodLiteral<K> } & Shape<K>>>;
 }[EventKind];
 
 /** What the tablet knows of its own clock at the act: `offsetMs` is server − tablet (LEDGER.md 2). */
-export const clock = z.strictObject({
+const clock = z.strictObject({
   offsetMs: z.number().int().nullable(),
   uncertaintyMs: z.number().int().min(0).nullable(),
   boot: z.string().min(1).max(64),

@@ -3,7 +3,7 @@ import type { Workweek } from "@/lib/time/workweek";
 import type { Piece } from "@/lib/timesheet/attribution";
 
 /** Which rule put an hour into its bucket. */
-export type LiftRule = "regular" | "daily" | "seventh-day" | "weekly";
+type LiftRule = "regular" | "daily" | "seventh-day" | "weekly";
 
 /** Paid time that lies in one bucket; `overHours` is the tier that it passed, 0 for regular time. */
 export interface Lifted extends Piece {

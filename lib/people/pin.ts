@@ -1,5 +1,5 @@
 /** A PIN has six digits, made by the system at random (NIST SP 800-63B 5.1.1.1: six may be digits). */
-export const PIN_DIGITS = 6;
+const PIN_DIGITS = 6;
 
 const YEARS = /^(19|20)\d\d|(19|20)\d\d$/;
 /** Strokes on a number pad that a hand finds by itself: columns up and down, and the diagonals. */

@@ -1,12 +1,5 @@
 /** What a stretch of a day was: `loose` is time that a person must settle. */
-export type StretchKind =
-  | "work"
-  | "rework"
-  | "other-work"
-  | "rest"
-  | "meal"
-  | "unassigned"
-  | "loose";
+type StretchKind = "work" | "rework" | "other-work" | "rest" | "meal" | "unassigned" | "loose";
 
 /** A stretch of a day, `[start, end)` in epoch seconds. */
 export interface Stretch {

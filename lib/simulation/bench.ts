@@ -25,7 +25,7 @@ export interface Hall {
 }
 
 /** A loose end that waits for the lead of somebody's home cell, with the answer it will get. */
-export interface Question {
+interface Question {
   worker: string;
   cell: CellName;
   /** The key of the loose end. */

@@ -6,7 +6,7 @@ import { type Look, recordAs, show, still, toBench, toDoor } from "@/lib/taps/mo
 type At<K extends Screen["at"]> = Extract<Screen, { at: K }>;
 
 /** An act may be taken back for 10 s (LEDGER.md 3). */
-export const UNDO_MS = 10_000;
+const UNDO_MS = 10_000;
 /** The start window: the queue at the tablet before and after a planned start. */
 const WINDOW_BEFORE_SECONDS = 30 * 60;
 const WINDOW_AFTER_SECONDS = 15 * 60;

@@ -51,7 +51,7 @@ export function localAddress(host, port) {
 }
 
 /** Asks the server whether it can work; false when it cannot or does not answer. */
-export async function isHealthy(address) {
+async function isHealthy(address) {
   try {
     const answer = await fetch(`${address}/api/health`, { signal: AbortSignal.timeout(5_000) });
     await answer.arrayBuffer();

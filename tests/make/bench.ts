@@ -7,7 +7,7 @@ import type { Effect, Input } from "@/lib/taps/inputs";
 import { firstState, step } from "@/lib/taps/step";
 
 /** 14 May 2026, 06:52 in Chicago: shortly before the early shift. */
-export const MORNING_MS = Date.UTC(2026, 4, 14, 11, 52);
+const MORNING_MS = Date.UTC(2026, 4, 14, 11, 52);
 export const NIA = "1042";
 
 const id = (n: number) => `018f7000-0000-7000-8000-${String(n).padStart(12, "0")}`;
@@ -81,7 +81,7 @@ const sprayed = operationOf({
 const single = { quantity: 1, openQuantity: 1 };
 
 /** The tickets that the neck cell's kiosk knows. */
-export const tickets: KioskTicket[] = [
+const tickets: KioskTicket[] = [
   ticketOf(HERON, [milled, operationOf(), sprayed]),
   ticketOf(WREN, [operationOf({ ...single, setupEarned: false })]),
   ticketOf(AVOCET, [operationOf({ ...single, hazards: ["spray"] })]),

@@ -12,7 +12,7 @@ import { freshStep, type Traveller } from "@/lib/simulation/traveller";
 import { troublesOf } from "@/lib/simulation/trouble";
 
 /** A Thursday at 11:20 in Larkmoor. */
-export const NOW_MS = Date.parse("2026-05-14T16:20:00Z");
+const NOW_MS = Date.parse("2026-05-14T16:20:00Z");
 export const calendar = calendarAt(NOW_MS);
 
 /** A hall with these tickets in it, where nothing goes wrong on purpose. */
