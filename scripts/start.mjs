@@ -15,7 +15,12 @@ import { identityOf, isAlive } from "./ground/process-record.mjs";
 import { runScript } from "./ground/programs.mjs";
 import { stopRunning } from "./ground/run.mjs";
 import { main, Stop, say } from "./ground/say.mjs";
+import { localAddress } from "./ground/server.mjs";
 import { serve } from "./ground/supervise.mjs";
+
+const REACHABLE =
+  "Others on the network can reach it, by plain http: put TLS in front (README), and do not leave\n" +
+  "the demo sign-ins open to people who should not have them.";
 
 /** `npm start`: from a fresh clone to a served Bookmatch, and from there to the next Ctrl-C. */
 await main(async () => {
@@ -50,11 +55,12 @@ async function startAndStay({ host, port, record, leaving }) {
   await build();
   if (leaving.isOver) return;
   const installation = await openInstallation();
-  const greeting = await prepare(installation.env, `http://${host}:${port}`);
+  const greeting = await prepare(installation.env, localAddress(host, port));
   if (leaving.isOver) return;
   const server = await serve({ installation, host, port, record, leaving: leaving.promise });
   record.write({ address: server.address, greeting });
   if (!leaving.isOver) say(`\nBookmatch is running: ${server.address}\n${greeting}`);
+  if (!leaving.isOver && !/^(127\.|::1$|localhost$)/.test(host)) say(REACHABLE);
   if (!leaving.isOver) say("Stop it with Ctrl-C or npm stop.");
   await server.watch().finally(() => server.stop());
 }
