@@ -51,7 +51,7 @@ export default async function WorkerPage({ params }: WorkerProps) {
             Badge
           </Link>
           {may("hours.see") && (
-            <Link href={`/hours/${number}`} className="button">
+            <Link href={`/hours?worker=${number}`} className="button">
               Hours
             </Link>
           )}
