@@ -9,10 +9,15 @@ test("payroll opens a worker to days and a day to its taps", async ({ page, sign
   await enterOffice(page, signIns, "payroll");
   await page.goto("/hours");
   await expectAccessible(page);
-  const openers = page.locator("a.desk-opener");
-  await openers.first().click();
+  await page
+    .getByRole("link", { name: /^Days of/ })
+    .first()
+    .click();
   await expect(page).toHaveURL(/worker=/);
-  await openers.nth(1).click();
+  await page
+    .getByRole("link", { name: /^Taps of/ })
+    .first()
+    .click();
   await expect(page).toHaveURL(/day=/);
   await expect(page.getByText(/\d\d:\d\d/).first()).toBeVisible();
   await expectAccessible(page);
