@@ -47,6 +47,13 @@ describe("plannedShifts", () => {
     expect(new Set(planned).size).toBe(2);
   });
 
+  test("of a crew of two nobody is ever away", () => {
+    const two = cast.filter(({ pattern }) => pattern === "weekend-night").slice(0, 2);
+    const nights = plannedShifts(calendar, two);
+    expect(nights.length).toBeGreaterThan(40);
+    expect(nights.filter(({ attends }) => !attends)).toEqual([]);
+  });
+
   test("are the same each time", () => {
     expect(plannedShifts(calendar, cast)).toEqual(shifts);
   });
