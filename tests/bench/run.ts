@@ -1,5 +1,5 @@
 import { openPool, wrap } from "@/db/client";
-import { fire } from "@/tests/bench/drive";
+import { fire, type Run } from "@/tests/bench/drive";
 import { FOLDER, given, onClone, onServer, STATE } from "@/tests/bench/ground";
 import { reportOf } from "@/tests/bench/report";
 import { batches, empties, nextTap, signIns, singles } from "@/tests/bench/shots";
@@ -25,20 +25,29 @@ const { single, empty } = await onServer(async (url) => {
   await fire(url, singles(state, warm));
   return { empty: floor, single: await fire(url, singles(state, people)) };
 });
+tell(single);
 say("batches");
 const batched = await onServer(async (url) => {
   await fire(url, singles(state, warm));
   return fire(url, batches(state, people, BATCHES));
 });
+tell(batched);
 say("sign-ins");
 const signedIn = await onServer(async (url) => {
-  await fire(url, signIns(warm.slice(0, 40)));
-  // spread over the tablets: one tablet alone would be slowed down
-  return fire(url, signIns(people.filter((_, at) => at % 9 === 0).slice(0, SIGN_INS)));
+  // spread over the tablets: many at once on a single one would be slowed down as guesses
+  const [first = [], ...others] = turns(people, 50);
+  await fire(url, signIns(first));
+  return fire(url, signIns(others.flat().slice(0, SIGN_INS)));
 });
+tell(signedIn);
 say("the same statements through pgbench");
 const replayed = await onClone(replayBookings);
 process.stdout.write(`\n${reportOf({ empty, single, batched, signedIn, replayed })}`);
+
+/** Deals people out so that neighbours come from different tablets: `step` people share one. */
+function turns<T>(all: readonly T[], step: number): T[][] {
+  return Array.from({ length: step }, (_, turn) => all.filter((_each, at) => at % step === turn));
+}
 
 async function stateOfMorning(): Promise<State> {
   await ask(server, `drop database if exists ${STATE} with (force)`);
@@ -60,6 +69,10 @@ async function replayBookings(name: string) {
   await ask(server, "checkpoint");
   const programs = given("BENCH_PROGRAMS");
   return replay(urlFor(server, APP, name), { recorded, programs, folder: FOLDER });
+}
+
+function tell({ perSecond }: Run): void {
+  say(`   ${perSecond.toFixed(1)} requests/s`);
 }
 
 function say(text: string): void {
