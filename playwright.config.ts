@@ -9,7 +9,7 @@ export default defineConfig({
   forbidOnly: true,
   timeout: 120_000,
   expect: { timeout: 10_000 },
-  reporter: [["list"], ["json"]],
+  reporter: process.env.PLAYWRIGHT_JSON_OUTPUT_FILE ? [["list"], ["json"]] : [["list"]],
   use: {
     ...devices["Desktop Chrome"],
     trace: "retain-on-failure",
