@@ -1,5 +1,6 @@
 "use client";
 
+import type { ReactNode } from "react";
 import { useTranslations } from "use-intl";
 import { Ask } from "@/components/bench/ask";
 import { useClock } from "@/components/bench/seen";
@@ -8,7 +9,7 @@ import type { Deed, ItemKey, KioskState } from "@/lib/bench/schema";
 
 interface Line {
   /** What it was, on the book's leaf. */
-  book: string;
+  book: ReactNode;
   /** What became of it, on the day's. */
   day: string;
   how: string;
@@ -71,11 +72,15 @@ function useDeedLine(state: KioskState, deed: Deed): Line {
   }
 }
 
-/** The ticket operations of a deed: the latest by its name, the others by their number. */
-function names(state: KioskState, items: readonly ItemKey[]): string {
+/** The ticket operations of a deed: the latest by number and name, how many beside it. */
+function names(state: KioskState, items: readonly ItemKey[]): ReactNode {
   const last = items.at(-1);
   if (!last) return "";
-  const name = itemName(state, last);
-  const more = items.length > 1 ? ` + ${items.length - 1}` : "";
-  return `${name.number} ${name.operation}${more}`;
+  const { number, operation } = itemName(state, last);
+  return (
+    <>
+      <code>{number}</code> {operation}
+      {items.length > 1 && ` + ${items.length - 1}`}
+    </>
+  );
 }

@@ -8,6 +8,7 @@ import { DayStrip } from "@/components/seam/day-strip";
 import { KioskFrame } from "@/components/shell/kiosk-frame";
 import { Plate } from "@/components/ui/plate";
 import { hoursAndMinutes } from "@/lib/time/format";
+import { split } from "@/lib/timeline/split";
 
 /** A worker's own hours of today, as tapped, and what can be put right about them. */
 export function HoursScreen(seen: SeenBench) {
@@ -51,18 +52,18 @@ export function HoursScreen(seen: SeenBench) {
   );
 }
 
-/** The parts of the day; they add up to what was attended. */
+/** The parts of the day, in whole minutes that add up to what was attended. */
 function Sums({ view }: SeenBench) {
   const t = useTranslations("hours");
-  const { today } = view;
+  const { directSeconds, indirectSeconds, restSeconds, unassignedSeconds, ...rest } = view.today;
+  const parts = [directSeconds, indirectSeconds, restSeconds, unassignedSeconds];
+  const minutes = split(Math.floor(rest.attendanceSeconds / 60), parts);
+  const terms = [t("direct"), t("indirect"), t("rest"), t("unassigned")];
   const lines = [
-    [t("direct"), today.directSeconds],
-    [t("indirect"), today.indirectSeconds],
-    [t("rest"), today.restSeconds],
-    [t("unassigned"), today.unassignedSeconds],
-    [t("attended"), today.attendanceSeconds],
-    [t("meal"), today.mealSeconds],
-  ] as const;
+    ...terms.map((term, at) => [term, (minutes[at] ?? 0) * 60] as const),
+    [t("attended"), rest.attendanceSeconds] as const,
+    [t("meal"), rest.mealSeconds] as const,
+  ];
   return (
     <dl className="hours-sums">
       {lines.map(([term, seconds]) => (

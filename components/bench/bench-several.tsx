@@ -61,18 +61,18 @@ function ItemRow({ item, scaleSeconds }: { item: ItemView; scaleSeconds: number 
   const actual = actualMinutes(actualSeconds);
   return (
     <li className="grid gap-1">
-      <p className="mirror text-k-2">
-        <span className="truncate pr-[26px] pl-8">
+      <p className="mirror items-end text-k-2">
+        <span className="pr-[26px] pl-8 portrait:pl-6 landscape:truncate">
           <code>{showTicket(item.ticket)}</code> <b>{item.name}</b>
         </span>
-        <span className="truncate pr-8 pl-[26px]">
+        <span className="pr-8 pl-[26px] portrait:pr-6">
           <b className="text-actual">
             {standardSeconds === null
               ? t("actualOnly", { actual })
               : t("actualOf", { actual, standard: standardMinutes(standardSeconds) })}
           </b>
-          <span className="text-ink-2">
-            {", "}
+          <span className="text-ink-2 portrait:block">
+            <span className="portrait:hidden">, </span>
             {t("share", { percent: Math.round(item.share * 100) })}
           </span>
         </span>

@@ -33,9 +33,9 @@ export function BenchWork({ item, ...seen }: SeenBench & { item: ItemView }) {
         standardSeconds={standardSeconds}
         actualSeconds={actualSeconds}
         scaleSeconds={scaleSeconds}
-        className="portrait:[--h:168px]"
+        className="portrait:[--h:152px]"
       />
-      <SeamAxis scaleSeconds={scaleSeconds} className="text-k-1 text-ink-2" />
+      <SeamAxis unitShown scaleSeconds={scaleSeconds} className="text-k-1 text-ink-2" />
       <div className="bench-acts">
         <BenchActs {...seen} />
         <DoneBar {...seen} />

@@ -16,7 +16,7 @@ export function UndoBar({ state, tap, className = "" }: Seen & { className?: str
       onClick={() => tap({ on: "undo" })}
       className={`plate undo-bar ${className}`}
       data-rim="both"
-      data-plain-across=""
+      data-minor=""
     >
       <i aria-hidden key={undo.event} />
       <span>

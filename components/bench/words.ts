@@ -53,6 +53,11 @@ export function itemName(state: KioskState, { ticket, operation }: ItemKey): Ite
   };
 }
 
+/** The name behind a number where this tablet knows it; it tells nobody whether a number exists. */
+export function personName({ sessions, cell }: KioskState, worker: string): string | undefined {
+  return sessions[worker]?.name ?? cell?.people.find((each) => each.worker === worker)?.name;
+}
+
 /** Model and options as one line. */
 export function modelName(named: { model: string; options: readonly string[] }): string {
   return [named.model, ...named.options].filter(Boolean).join(", ");

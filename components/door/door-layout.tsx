@@ -32,14 +32,22 @@ export function DoorLayout({
       <SignOutSeam state={state} />
       <Mark className="on-seam door-mark" />
       <main className="door">
-        <p className="door-place">
-          <b className="block truncate text-k-2">{state.device?.site.name}</b>
-          <span className="block truncate text-ink-2">{state.device?.name}</span>
-        </p>
-        <div className="door-link">
-          <LinkTag state={state} />
-          <MuteButton state={state} tap={tap} />
-        </div>
+        {state.undo ? (
+          <div className="door-undo">
+            <UndoBar state={state} tap={tap} className="w-full" />
+          </div>
+        ) : (
+          <>
+            <p className="door-place">
+              <b className="block truncate text-k-2">{state.device?.site.name}</b>
+              <span className="block truncate text-ink-2">{state.device?.name}</span>
+            </p>
+            <div className="door-link">
+              <LinkTag state={state} />
+              <MuteButton state={state} tap={tap} />
+            </div>
+          </>
+        )}
         <div className="door-leaf">
           <DoorClock state={state} />
           <p className="door-badge">
@@ -58,9 +66,6 @@ export function DoorLayout({
           <div className="door-pad">{pad}</div>
         </div>
       </main>
-      <div className="absolute inset-x-8 top-2 z-10 portrait:inset-x-6">
-        <UndoBar state={state} tap={tap} className="w-full" />
-      </div>
     </div>
   );
 }

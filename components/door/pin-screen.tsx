@@ -2,6 +2,7 @@
 
 import { useTranslations } from "use-intl";
 import type { Seen } from "@/components/bench/seen";
+import { personName } from "@/components/bench/words";
 import { DoorLayout } from "@/components/door/door-layout";
 import { Keypad } from "@/components/ui/keypad";
 import { Plate } from "@/components/ui/plate";
@@ -27,7 +28,7 @@ export function PinScreen({ state, tap, screen }: Seen & { screen: PinScreenStat
       badge={
         <>
           <code className="block">{screen.worker}</code>
-          {nameOf(state, screen.worker)}
+          {personName(state, screen.worker)}
         </>
       }
       slots={
@@ -67,11 +68,6 @@ function PinAsk({ state, screen }: { state: KioskState; screen: PinScreenState }
   if (says) return <span className="text-danger">{t(says)}</span>;
   if (reason.for === "end-shift") return t("askEnd");
   if (reason.for === "reassign") return t("askReassign");
-  const known = nameOf(state, worker);
+  const known = personName(state, worker);
   return known ? t("askName", { name: known }) : t("ask");
-}
-
-/** The name behind a number where this tablet knows it; it tells nobody whether a number exists. */
-function nameOf({ sessions, cell }: KioskState, worker: string): string | undefined {
-  return sessions[worker]?.name ?? cell?.people.find((each) => each.worker === worker)?.name;
 }

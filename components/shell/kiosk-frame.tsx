@@ -3,6 +3,7 @@
 import type { ReactNode } from "react";
 import { useTranslations } from "use-intl";
 import { type Seen, useClock } from "@/components/bench/seen";
+import { personName } from "@/components/bench/words";
 import { SmallMark } from "@/components/shell/mark";
 import { Icon } from "@/components/ui/icon";
 import { Purfling } from "@/components/ui/purfling";
@@ -17,13 +18,12 @@ export function KioskFrame({ state, children }: Pick<Seen, "state"> & { children
   const t = useTranslations("frame");
   const clock = useClock();
   const worker = state.visit?.worker ?? "";
-  const name = state.sessions[worker]?.name;
   return (
     <div className="kiosk leaves">
       <SignOutSeam state={state} />
       <header className="mirror relative z-3 h-[68px] items-center px-8 portrait:h-[84px]">
         <div className="flex items-baseline gap-4 pr-10 text-left portrait:block">
-          <b className="truncate text-k-2">{name}</b>
+          <b className="truncate text-k-2">{personName(state, worker)}</b>
           {worker && (
             <span className="truncate text-ink-2 portrait:block">
               {t("who", { worker, kiosk: state.device?.name ?? "" })}
