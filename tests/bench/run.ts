@@ -25,6 +25,7 @@ const { single, empty } = await onServer(async (url) => {
   await fire(url, singles(state, warm));
   return { empty: floor, single: await fire(url, singles(state, people)) };
 });
+tell(empty);
 tell(single);
 say("batches");
 const batched = await onServer(async (url) => {
@@ -52,7 +53,7 @@ function turns<T>(all: readonly T[], step: number): T[][] {
 async function stateOfMorning(): Promise<State> {
   await ask(server, `drop database if exists ${STATE} with (force)`);
   await cloneDatabase(server, await makeTemplate(server), STATE);
-  const pool = openPool(urlFor(server, APP, STATE), fail);
+  const pool = openPool(urlFor(server, APP, STATE), hear);
   say("booking a morning of 4,000 people");
   const made = await makeState(wrap(pool)).finally(() => pool.end());
   // what autovacuum would have done in the course of the morning
@@ -61,7 +62,7 @@ async function stateOfMorning(): Promise<State> {
 }
 
 async function replayBookings(name: string) {
-  const pool = openPool(urlFor(server, APP, name), fail);
+  const pool = openPool(urlFor(server, APP, name), hear);
   const taps = people.map((worker) => ({ worker, event: nextTap(state, worker) }));
   const recorded = await recordStatements(wrap(pool), state.siteId, taps);
   await pool.end();
@@ -79,6 +80,7 @@ function say(text: string): void {
   process.stderr.write(`── ${text}\n`);
 }
 
-function fail(error: Error): never {
-  throw error;
+/** An idle connection that breaks spoils no measurement; a query on it would fail by itself. */
+function hear(error: Error): void {
+  say(error.message);
 }

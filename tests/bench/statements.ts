@@ -58,7 +58,7 @@ export async function recordStatements(
 /** Types of the values of both statements, as the server learns them from its functions. */
 const READ =
   "uuid, uuid, text[], uuid[], uuid[], text[], timestamptz[], uuid[], text[], text[], int, timestamptz";
-const WRITE = "uuid, timestamptz, jsonb";
+const WRITE = "uuid, jsonb";
 
 /** Keeps what was recorded in a table of the database, one row an event, for pgbench to replay. */
 export async function keepStatements(
@@ -67,25 +67,27 @@ export async function keepStatements(
 ): Promise<void> {
   const client = new pg.Client({ connectionString: ownerUrl });
   await client.connect();
-  const columns = [...typed("r", READ), ...typed("w", WRITE)];
-  await client.query(
-    `create table bench_calls (n int primary key, token_hash text, ${columns.map((c) => c.made).join(", ")})`,
-  );
-  await client.query("grant select on bench_calls to bookmatch_app");
-  for (const [n, { tokenHash, read, write }] of recorded.entries()) {
-    const values = [n, tokenHash, ...read.values, ...write.values];
-    const places = values.map((_, at) => `$${at + 1}`).join(", ");
-    await client.query(`insert into bench_calls values (${places})`, values);
+  try {
+    await client.query(tableOf([...typed("r", READ), ...typed("w", WRITE)]));
+    await client.query("grant select on bench_calls to bookmatch_app");
+    for (const [n, { tokenHash, read, write }] of recorded.entries()) {
+      const values = [n, tokenHash, ...read.values, ...write.values];
+      const places = values.map((_, at) => `$${at + 1}`).join(", ");
+      await client.query(`insert into bench_calls values (${places})`, values);
+    }
+    await client.query("analyze bench_calls");
+  } finally {
+    await client.end();
   }
-  await client.query("analyze bench_calls");
-  await client.end();
 }
 
-function typed(prefix: string, types: string) {
-  return types.split(", ").map((type, at) => {
-    const name = `${prefix}${at + 1}`;
-    return { name, made: `${name} ${type}` };
-  });
+function tableOf(columns: readonly string[]): string {
+  return `create table bench_calls (n int primary key, token_hash text, ${columns.join(", ")})`;
+}
+
+/** Names a statement's values as columns, in their order: `r1 uuid`, `r2 uuid` and so on. */
+function typed(prefix: string, types: string): string[] {
+  return types.split(", ").map((type, at) => `${prefix}${at + 1} ${type}`);
 }
 
 /** Replays each recorded booking once through pgbench, as many at a time as tablets hand in. */
