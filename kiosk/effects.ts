@@ -5,10 +5,38 @@ import { recordActs } from "@/kiosk/record";
 import { closeSessions, fetchBench, signIn } from "@/kiosk/sign-in";
 import { play } from "@/kiosk/sound";
 import type { World } from "@/kiosk/world";
-import type { Effect } from "@/lib/taps/inputs";
+import type { Effect, Input } from "@/lib/taps/inputs";
 
-/** Does in the world what the reducer asks for; the answer comes back as an input. */
+/**
+ * Does in the world what the reducer asks for; the answer comes back as an input. Where the tablet
+ * itself breaks on the way, a person who waits is told that it cannot be done now.
+ */
 export async function carryOut(world: World, effect: Effect): Promise<void> {
+  try {
+    await run(world, effect);
+  } catch {
+    const answer = brokenOff(effect);
+    if (answer) world.send(answer);
+  }
+}
+
+/** What a person hears who waits for an effect that broke; null where nobody does. */
+function brokenOff(effect: Effect): Input | null {
+  switch (effect.do) {
+    case "record":
+      return { on: "not-recorded" };
+    case "sign-in":
+      return { on: "sign-in-refused", worker: effect.worker, says: "away", waitSeconds: null };
+    case "find-ticket":
+      return { on: "no-ticket", code: effect.code, away: true };
+    case "enrol":
+      return { on: "enrol-refused", says: "away" };
+    default:
+      return null;
+  }
+}
+
+async function run(world: World, effect: Effect): Promise<void> {
   switch (effect.do) {
     case "record":
       return recordActs(world, effect);

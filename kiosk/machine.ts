@@ -85,7 +85,11 @@ export async function runKiosk(parts: MachineParts): Promise<Machine> {
     nowMs: clock.nowMs,
     wait: waitOr,
     random: parts.random,
-    onSettled: (settled) => void keepSettled(world, settled).then(() => refreshCell(world)),
+    // What could not be kept or read here is read anew at the next beat.
+    onSettled: (settled) =>
+      void keepSettled(world, settled)
+        .then(() => refreshCell(world))
+        .catch(() => undefined),
     onLink: (is) => send({ on: "link", is }),
   });
   send({ on: "started", known: await readKnown(world) });

@@ -81,7 +81,7 @@ const sprayed = operationOf({
 const single = { quantity: 1, openQuantity: 1 };
 
 /** The tickets that the neck cell's kiosk knows. */
-const tickets: KioskTicket[] = [
+export const tickets: KioskTicket[] = [
   ticketOf(HERON, [milled, operationOf(), sprayed]),
   ticketOf(WREN, [operationOf({ ...single, setupEarned: false })]),
   ticketOf(AVOCET, [operationOf({ ...single, hazards: ["spray"] })]),
