@@ -2,6 +2,7 @@ import type { z } from "zod";
 import { bookedSegmentOf, type SegmentRow, workerOf } from "@/lib/api/booked-segment";
 import { type ListedTicket, ticketSummaryOf } from "@/lib/api/ticket-summary";
 import type { BirthRecord, recordedOperation, recordedReport } from "@/lib/api/tickets";
+import { decidingDay } from "@/lib/standards/deciding-day";
 import { type StandardRow, standardInForce } from "@/lib/standards/in-force";
 import { sum } from "@/lib/sum";
 import { type DayRule, productionDay } from "@/lib/time/site-day";
@@ -48,8 +49,10 @@ export function birthRecordOf(life: TicketLife, facts: RecordFacts): BirthRecord
 function operationOf(row: OperationRow, life: TicketLife, facts: RecordFacts): Operation {
   const booked = life.segments.filter(({ operation }) => operation === row.operation);
   const first = booked.find(({ activity }) => activity !== "rework")?.startAt ?? null;
-  const counted = life.reports.find(({ operation }) => operation === row.operation)?.at;
-  const day = productionDay((first ?? counted)?.getTime() ?? facts.nowMs, facts.rules);
+  const counted = life.reports.find(({ operation }) => operation === row.operation)?.at ?? null;
+  const begun = { workMs: first?.getTime() ?? null, countMs: counted?.getTime() ?? null };
+  // before any work the one that would hold today
+  const day = decidingDay(begun, facts.rules) ?? productionDay(facts.nowMs, facts.rules);
   const standards = life.standards.filter(({ operation }) => operation === row.operation);
   const standard = standardInForce(standards, day, life.ticket.options);
   const quantity = row.good + row.scrap + row.openQuantity;

@@ -1,4 +1,5 @@
 import type { Activity } from "@/lib/ledger/schema";
+import type { Rework } from "@/lib/tickets/reworks";
 import type { CountedReport, LooseEnd } from "@/lib/timeline/schema";
 
 /** What is known of a ticket beforehand. */
@@ -46,12 +47,17 @@ export interface JudgedOperation {
   rework: number;
   scrap: number;
   setupEarned: boolean;
-  /** All time booked to it, by anybody; rework is part of it. */
+  /** All time booked to it, by anybody; rework is part of it, its rework operations are not. */
   actualSeconds: number;
   reworkSeconds: number;
   /** Its first setup, run or inspect second decides its standard; epoch milliseconds. */
   firstWorkMs: number | null;
   finishedMs: number | null;
+}
+
+/** A rework operation with the time that was booked while it was open. */
+export interface JudgedRework extends Rework {
+  actualSeconds: number;
 }
 
 /** A loose end of a ticket, with whose record it hangs on. */
@@ -66,5 +72,7 @@ export interface JudgedTicket {
   endedMs: number | null;
   /** In the order of the routing. */
   operations: JudgedOperation[];
+  /** Pieces that failed after their operation was finished, in the order in which they failed. */
+  reworks: JudgedRework[];
   looseEnds: JudgeEnd[];
 }

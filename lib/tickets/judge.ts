@@ -6,6 +6,7 @@ import type {
   TicketReport,
   TicketWork,
 } from "@/lib/tickets/facts";
+import { reworkAt } from "@/lib/tickets/reworks";
 import { type TicketTally, tally } from "@/lib/tickets/tally";
 import { ticketEnds } from "@/lib/tickets/ticket-ends";
 
@@ -28,9 +29,10 @@ export function judge(
   const time = [...work].sort((a, b) => a.start - b.start || (a.event < b.event ? -1 : 1));
   const routing = facts.operations.map(({ operation }) => operation);
   const tallied = tally({ quantity: facts.quantity, routing }, counts);
+  const redone = new Map(time.map((one) => [one, reworkOn(one, tallied)]));
   const status = statusOf(facts, tallied);
   const operations = facts.operations.map(({ operation, cell }, place) => {
-    const booked = time.filter((one) => one.operation === operation);
+    const booked = time.filter((one) => one.operation === operation && !redone.get(one));
     const counted = tallied.operations[place]!;
     const predecessorOpen = tallied.operations
       .slice(0, place)
@@ -48,21 +50,40 @@ export function judge(
     status,
     endedMs: endOf(status, tallied),
     operations,
+    reworks: tallied.reworks.map((rework) => {
+      const own = time.filter((one) => redone.get(one) === rework);
+      return { ...rework, actualSeconds: sum(own.map(({ seconds }) => seconds)) };
+    }),
     looseEnds: ticketEnds({ facts, tallied, counts, time, settled }),
   };
 }
 
-function statusOf({ isCancelled }: TicketFacts, { operations, scrappedMs }: TicketTally) {
+/** The rework operation that time belongs to, if any. */
+function reworkOn({ operation, start }: TicketWork, { reworks }: TicketTally) {
+  return reworkAt(reworks, { operation, startMs: start * 1000 });
+}
+
+function statusOf({ isCancelled }: TicketFacts, { operations, reworks, scrappedMs }: TicketTally) {
   if (isCancelled) return "cancelled";
   if (scrappedMs !== null) return "scrapped";
-  const isFinished = operations.length > 0 && operations.every((one) => one.finishedMs !== null);
+  const isFinished =
+    operations.length > 0 &&
+    operations.every((one) => one.finishedMs !== null) &&
+    reworks.every((one) => one.closedMs !== null);
   return isFinished ? "finished" : "open";
 }
 
-function endOf(status: JudgedTicket["status"], { operations, scrappedMs }: TicketTally) {
+function endOf(
+  status: JudgedTicket["status"],
+  { operations, reworks, scrappedMs }: TicketTally,
+): number | null {
   if (status === "scrapped") return scrappedMs;
   if (status !== "finished") return null;
-  return Math.max(...operations.map(({ finishedMs }) => finishedMs ?? 0));
+  const ends = [
+    ...operations.map(({ finishedMs }) => finishedMs),
+    ...reworks.map(({ closedMs }) => closedMs),
+  ];
+  return Math.max(...ends.map((ms) => ms ?? 0));
 }
 
 function stateOf(now: {

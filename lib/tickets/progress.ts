@@ -1,7 +1,8 @@
 import type { SeamPair } from "@/lib/seam/verdict";
+import { decidingDay } from "@/lib/standards/deciding-day";
 import { type StandardRow, standardInForce } from "@/lib/standards/in-force";
 import { sum } from "@/lib/sum";
-import { type DayRule, productionDay } from "@/lib/time/site-day";
+import type { DayRule } from "@/lib/time/site-day";
 
 /** An operation of a ticket as the judge left it. */
 export interface ProgressRow {
@@ -45,10 +46,10 @@ export function progressOf(
   const finished = rows
     .filter(({ state }) => state === "finished")
     .map((row) => {
-      const at = row.firstWorkAt ?? row.finishedAt;
-      const day = productionDay(at?.getTime() ?? 0, rules);
+      const first = { workMs: instantOf(row.firstWorkAt), countMs: instantOf(row.finishedAt) };
+      const day = decidingDay(first, rules);
       const own = standards.filter(({ operation }) => operation === row.operation);
-      const standard = standardInForce(own, day, options);
+      const standard = day === null ? null : standardInForce(own, day, options);
       const standardSeconds = standard && standard.setupSeconds + standard.runSeconds * row.good;
       return { actualSeconds: row.actualSeconds, standardSeconds };
     });
@@ -65,4 +66,8 @@ export function progressOf(
     },
     noStandardSeconds: sum(untimed.map(({ actualSeconds }) => actualSeconds)),
   };
+}
+
+function instantOf(at: Date | null): number | null {
+  return at?.getTime() ?? null;
 }

@@ -1,4 +1,5 @@
 import { sum } from "@/lib/sum";
+import { openRework, type Rework, reworkOf } from "@/lib/tickets/reworks";
 import type { CountedReport } from "@/lib/timeline/schema";
 
 /** What the reports of one ticket operation come to. */
@@ -21,6 +22,8 @@ interface Tally {
 export interface TicketTally {
   /** One per operation of the routing, in its order. */
   operations: Tally[];
+  /** In the order in which they were opened. */
+  reworks: Rework[];
   /** When the last piece of the lot was lost; null while there is one. */
   scrappedMs: number | null;
   /** Reports that count more than there is, each once: their events. */
@@ -30,7 +33,8 @@ export interface TicketTally {
 /**
  * Counts a ticket's reports through its routing (LEDGER.md 5). Counts are deltas. An operation is
  * finished at the report that brings its open pieces to none, be it its own or an earlier
- * operation's scrap; what is counted beyond the lot is kept.
+ * operation's scrap; what is counted beyond the lot is kept. What is counted on a finished operation while pieces
+ * of it are reworked is counted there.
  *
  * @param routing codes of the operations, in order
  * @param reports in order of time; those of operations that are not in the routing are left out
@@ -40,13 +44,22 @@ export function tally(
   reports: readonly CountedReport[],
 ): TicketTally {
   const operations = routing.map(() => emptyTally(lot));
-  const result: TicketTally = { operations, scrappedMs: null, overCounts: [] };
+  const reworks: Rework[] = [];
+  const result: TicketTally = { operations, reworks, scrappedMs: null, overCounts: [] };
+  const of = (code: string) => operations[routing.indexOf(code)];
   for (const report of reports) {
-    const counted = operations[routing.indexOf(report.operation)];
+    const counted = of(report.operation);
     if (!counted) continue;
     const before = sum(operations.map(excess));
-    add(counted, report);
+    const redone = openRework(reworks, report.operation);
+    const opened = redone
+      ? null
+      : reworkOf(report, (code) => typeof of(code)?.finishedMs === "number");
+    if (redone) addRework(redone, counted, report);
+    else add(counted, report);
+    if (opened) reworks.push(opened);
     flow(operations, lot, report.atMs);
+    closeReworks(reworks, of, report.atMs);
     if (sum(operations.map(excess)) > before) result.overCounts.push(report.event);
     const lost = sum(operations.map(({ scrap }) => scrap));
     if (lost >= lot) result.scrappedMs ??= report.atMs;
@@ -72,6 +85,28 @@ function add(counted: Tally, { kind, good, rework, scrap }: CountedReport): void
   counted.scrap += scrap;
   const seen = kind === "inspect" ? good + rework + scrap : good;
   counted.setupEarned ||= seen > 0;
+}
+
+/** A piece that is lost in its rework was good before; what is good again was counted already. */
+function addRework(redone: Rework, counted: Tally, { event, good, scrap }: CountedReport): void {
+  const room = redone.pieces - redone.done;
+  const lost = Math.min(scrap, room, counted.good);
+  counted.good += Math.max(0, good + scrap - room) - lost;
+  counted.scrap += lost;
+  redone.done += Math.min(room, good + scrap);
+  redone.counts.push(event);
+}
+
+/** Closes what is done, and what the operation that found it has passed since. */
+function closeReworks(
+  reworks: readonly Rework[],
+  of: (code: string) => Tally | undefined,
+  atMs: number,
+): void {
+  for (const one of reworks) {
+    const hasPassed = one.foundBy !== one.operation && of(one.foundBy)?.openQuantity === 0;
+    if (one.done >= one.pieces || hasPassed) one.closedMs ??= atMs;
+  }
 }
 
 /** Lets what earlier operations lost flow down the routing, and finishes what has nothing left. */

@@ -1,5 +1,6 @@
 import type { LooseEndCode } from "@/lib/ledger/schema";
 import type { JudgeEnd, TicketFacts, TicketReport, TicketWork } from "@/lib/tickets/facts";
+import { reworkAt } from "@/lib/tickets/reworks";
 import type { TicketTally } from "@/lib/tickets/tally";
 import { endKey } from "@/lib/timeline/settlements";
 
@@ -61,7 +62,7 @@ function oddTime(one: TicketWork, { facts, tallied }: Records): Odd[] {
   const { finishedMs } = tallied.operations[place]!;
   if (runsPast(scrappedMs)) {
     odd.push({ code: "ticket-scrapped", at: Math.max(start, second(scrappedMs)) });
-  } else if (runsPast(finishedMs)) {
+  } else if (runsPast(finishedMs) && !isRedone(one, tallied)) {
     odd.push({ code: "past-finish", at: Math.max(start, second(finishedMs)) });
   }
   return odd;
@@ -88,6 +89,11 @@ function isAhead({ operations }: TicketTally, place: number, at: number): boolea
   return operations
     .slice(0, place)
     .some(({ finishedMs }) => finishedMs === null || second(finishedMs) > at);
+}
+
+/** Time on a rework operation is past the finish of the first, and in order. */
+function isRedone({ operation, start }: TicketWork, { reworks }: TicketTally): boolean {
+  return reworkAt(reworks, { operation, startMs: start * 1000 }) !== undefined;
 }
 
 function second(ms: number): number {
