@@ -1,5 +1,6 @@
 import { sql } from "drizzle-orm";
 import type { Scope } from "@/db/client";
+import { listAuthors } from "@/db/ledger/authors";
 import type { BookedBatch } from "@/db/ledger/commands";
 import { readContext } from "@/db/ledger/queries";
 import { isSame, itemsOn } from "@/lib/kiosks/bench-item";
@@ -61,7 +62,15 @@ async function showBench(scope: Scope, { window, derived, context, atMs }: Shown
   const facts = unread.length
     ? [...context.facts, ...(await listItemFacts(scope, unread))]
     : context.facts;
-  return benchOf({ window, folded, context: { ...context, facts }, atMs });
+  const bench = benchOf({ window, folded, context: { ...context, facts }, atMs });
+  const names = await listAuthors(
+    scope,
+    bench.changes.map(({ by }) => by),
+  );
+  return {
+    ...bench,
+    changes: bench.changes.map((change) => ({ ...change, by: names.get(change.by) ?? change.by })),
+  };
 }
 
 /** Lists what is known of ticket operations; unknown ones are left out. */

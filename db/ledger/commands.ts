@@ -76,8 +76,11 @@ export async function book(scope: Scope, booking: Booking): Promise<boolean> {
   }
 }
 
-/** BM001 is raised by `book`; a deadlock is the same thing seen by the database. */
-function isInterference(error: unknown): boolean {
+/**
+ * Says whether a statement failed because somebody else wrote meanwhile: BM001 is raised by `book`;
+ * a deadlock is the same thing seen by the database.
+ */
+export function isInterference(error: unknown): boolean {
   const cause = error instanceof Error ? (error.cause ?? error) : error;
   const code = typeof cause === "object" && cause && "code" in cause ? cause.code : null;
   return code === "BM001" || code === "40P01";

@@ -12,6 +12,19 @@ export interface Booking {
   rows: readonly LedgerRow[];
   timelines: readonly DerivedTimeline[];
   sessions: readonly NewSession[];
+  /** Who enters it in the office or on a phone, as the audit log names them; else it is a kiosk's. */
+  actor?: string;
+  /** Kept records that are answered with it. */
+  answered?: readonly ReceiptEnd[];
+}
+
+/** A loose end of a record that was kept and not counted; instants are epoch milliseconds. */
+export interface ReceiptEnd {
+  code: string;
+  subject: string;
+  workerId: string | null;
+  kioskId: string | null;
+  atMs: number;
 }
 
 /** Writes a booking as the one argument of the database's `book`. */
@@ -49,9 +62,15 @@ export function payloadOf(booking: Booking): string {
         (row) => ({ ...columnsOf(row), source: "fold" }),
       ),
       ...rows.flatMap((row) => keptEnd(row, booking)),
+      ...(booking.answered ?? []).map((end) => ({
+        ...site,
+        ...columnsOf(end),
+        source: "receipt",
+        settled: true,
+      })),
     ],
     marks: markedTickets(booking).map((key) => ({ kind: "ticket", key })),
-    audit: rows.flatMap((row) => auditOf(row, kioskId)),
+    audit: rows.flatMap((row) => auditOf(row, booking)),
   });
 }
 
@@ -117,12 +136,12 @@ function keptEnd(row: LedgerRow, { siteId, kioskId }: Booking): Fields[] {
   ];
 }
 
-/** What a lead enters for somebody else is everybody's to see later. */
-function auditOf({ by, id, kind, workerNumber, keptFor }: LedgerRow, kioskId: string | null) {
-  if (by === null || keptFor) return [];
+/** What is entered for somebody else, and whatever comes from no kiosk, is everybody's to see later. */
+function auditOf({ by, id, kind, workerNumber, keptFor }: LedgerRow, { kioskId, actor }: Booking) {
+  if (keptFor || (by === null && actor === undefined)) return [];
   return [
     {
-      actor: `kiosk:${kioskId}`,
+      actor: actor ?? `kiosk:${kioskId}`,
       action: `records.${kind}`,
       subject: `event:${id}`,
       detail: { by, worker: workerNumber },

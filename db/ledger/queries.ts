@@ -63,9 +63,13 @@ function contextOf({ workers, windows, facts, next, ...rest }: Raw): BookingCont
   };
 }
 
-/** An event may come twice, as one of the window and as what a correction is about. */
+/**
+ * An event may come twice, as one of the window and as what a correction is about; one entered in
+ * the office or on a phone has no kiosk's session.
+ */
 function windowOf(window: { [K in keyof Window]: Window[K] | null }): Window {
-  const events = new Map((window.events ?? []).map((event) => [event.id, event]));
+  const read = (window.events ?? []).map((event) => ({ ...event, session: event.session ?? "" }));
+  const events = new Map(read.map((event) => [event.id, event]));
   return {
     // safe because the columns behind the rest of the fields are never null
     ...(window as Window),

@@ -40,7 +40,7 @@ export function receiveRecords(
 }
 
 /** A version 8 UUID (RFC 9562) whose bits are a hash: the same bytes give the same id. */
-function idFrom(text: string): string {
+export function idFrom(text: string): string {
   const hex = createHash("sha256").update(text).digest("hex");
   const variant = ((Number.parseInt(hex.charAt(16), 16) & 0x3) | 0x8).toString(16);
   return [

@@ -60,8 +60,12 @@ export async function rebuildTickets(scope: Scope): Promise<number> {
   return changed;
 }
 
-/** Judges tickets within a transaction, each locked until its end; answers how many rows changed. */
-async function judgeTickets(scope: Scope, numbers: readonly string[]): Promise<number> {
+/**
+ * Judges tickets within a transaction, each locked until its end; answers how many rows changed.
+ *
+ * @param numbers sorted, so that two transactions never wait for each other
+ */
+export async function judgeTickets(scope: Scope, numbers: readonly string[]): Promise<number> {
   const { db, siteId } = scope;
   await db.execute(sql`
     select pg_advisory_xact_lock(hashtextextended(${siteId}::text || n.number, 0))

@@ -70,10 +70,10 @@ function segmentOf(row: SegmentRow): Segment {
   return { ...base, doing: { kind: activity } };
 }
 
-/** What a lead entered since the sign-in before this one. */
+/** What others altered since the sign-in before this one; an agreement alters nothing. */
 function changesOf({ events, seenMs }: Window): Bench["changes"] {
   return events.flatMap(({ by, receivedMs, atMs, body, note }) =>
-    by === null || (receivedMs ?? 0) <= (seenMs ?? 0)
+    by === null || body.kind === "confirm" || (receivedMs ?? 0) <= (seenMs ?? 0)
       ? []
       : { kind: body.kind, at: iso(atMs), by, note: note ?? "" },
   );

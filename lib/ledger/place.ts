@@ -1,5 +1,5 @@
 import { OLDEST_MS } from "@/lib/ledger/read-event";
-import type { ClockEvent } from "@/lib/ledger/schema";
+import type { ClockEvent, EventBody } from "@/lib/ledger/schema";
 import { instantMs } from "@/lib/time/instant";
 
 /** When a batch came, and what the tablet's own clock then showed. */
@@ -66,7 +66,7 @@ function isShown(instant: number): boolean {
  * The instant at which a correction makes something count: a move's `to`, an inserted event's own,
  * the end that an answer tells; null for everything else.
  */
-export function effectMs(event: ClockEvent): number | null {
+export function effectMs(event: EventBody): number | null {
   if (event.kind === "move") return instantMs(event.to);
   if (event.kind === "settle") return toldMs(event.answer);
   // safe because an inserted event was read as a whole one

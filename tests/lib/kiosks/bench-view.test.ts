@@ -55,6 +55,20 @@ describe("benchOf", () => {
     expect(shownInBreak.work?.items[0]?.bookedSeconds).toBe(0);
   });
 
+  test("tells what others altered since the sign-in before, and no agreement", () => {
+    const by = { by: "account:a" };
+    const move = makeEvent(
+      3,
+      ago(10),
+      { kind: "move", event: work.id, to: "2026-05-14T04:00:00Z" },
+      by,
+    );
+    const agreed = makeEvent(4, ago(9), { kind: "confirm", subject: "workday:x" }, by);
+    const changes = shown([start, work, move, agreed], { seenMs: ago(100) }).changes;
+    expect(changes).toMatchObject([{ kind: "move", by: "account:a" }]);
+    expect(shown([start, work, move], { seenMs: ago(1) }).changes).toEqual([]);
+  });
+
   test("shows other work", () => {
     const other = makeEvent(3, ago(10), { kind: "indirect", code: "cleaning" });
     expect(shown([start, other])).toMatchObject({
