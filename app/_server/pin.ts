@@ -1,6 +1,6 @@
 import "server-only";
 import { provesPassword } from "@/app/_server/password";
-import { forgetPinTries, reservePinTry } from "@/app/_server/throttle";
+import { tryPin } from "@/app/_server/throttle";
 import type { Scope } from "@/db/client";
 import { findWorkerToSignIn } from "@/db/people/sign-in";
 import { findSite } from "@/db/sites/queries";
@@ -29,17 +29,17 @@ export async function provePin(scope: Scope, keyed: KeyedPin): Promise<Result<Pr
   const { number, pin, kioskId, now } = keyed;
   const found = await findWorkerToSignIn(scope, number);
   const one = { siteId: scope.siteId, worker: found?.id ?? number, kioskId, now };
-  const waitSeconds = await reservePinTry(scope.db, one);
-  if (waitSeconds > 0) {
+  const tried = await tryPin(scope.db, one, async () => {
+    const isHere = found !== null && (await worksHere(scope, found.endsOn, now));
+    return provesPassword(isHere ? found.pinHash : null, pin);
+  });
+  if ("waitSeconds" in tried) {
     const detail = "Too many wrong tries here. Wait, or ask your lead for a new PIN.";
-    return no("throttled", detail, { retryAfterSeconds: waitSeconds });
+    return no("throttled", detail, { retryAfterSeconds: tried.waitSeconds });
   }
-  const isHere = found !== null && (await worksHere(scope, found.endsOn, now));
-  const isRight = await provesPassword(isHere ? found.pinHash : null, pin);
-  if (!isRight || !found) {
+  if (!tried.isRight || !found) {
     return no("unauthenticated", "Number and PIN do not match. Try again, or ask your lead.");
   }
-  await forgetPinTries(scope.db, one);
   const { pinHash, endsOn, ...worker } = found;
   return ok(worker);
 }

@@ -15,8 +15,62 @@ export interface PinTry {
   now: Date;
 }
 
+/** A try of this process, from before its place is asked for until its PIN was checked. */
+interface UnderWay {
+  /** Seconds to wait; 0 where it got its place. */
+  reserved: Promise<number>;
+  ended: Promise<unknown>;
+}
+/** By each thing that they count against. */
+const underWay = new Map<string, Set<UnderWay>>();
+
+/** What became of a try: whether the PIN was right, or how many seconds are still to wait. */
+export type Tried = { isRight: boolean } | { waitSeconds: number };
+
+/**
+ * Checks a PIN once there is a place for the try. A place is taken before the check, so that tries at
+ * the same time cannot slip past the count; where the places are only taken by tries that are still
+ * being checked, this one waits for them: a queue of people with right PINs slows nobody down.
+ */
+export async function tryPin(db: Db, one: PinTry, proves: () => Promise<boolean>): Promise<Tried> {
+  const keys = Object.values(keysOf(one));
+  for (;;) {
+    const others = keys.flatMap((key) => [...(underWay.get(key) ?? [])]);
+    const reserved = reservePinTry(db, one);
+    const tried = reserved.then((waitSeconds) => (waitSeconds ? null : check(db, one, proves)));
+    const isRight = await whileUnderWay(keys, { reserved, ended: tried }, tried);
+    if (isRight !== null) return { isRight };
+    const waits = await Promise.all(others.map((other) => other.reserved.catch(() => 1)));
+    const checking = others.filter((_, at) => waits[at] === 0);
+    if (checking.length === 0) return { waitSeconds: await reserved };
+    await Promise.race(checking.map(({ ended }) => ended.catch(() => null)));
+  }
+}
+
+async function check(db: Db, one: PinTry, proves: () => Promise<boolean>): Promise<boolean> {
+  const isRight = await proves();
+  if (isRight) await forgetPinTries(db, one);
+  return isRight;
+}
+
+async function whileUnderWay<T>(
+  keys: readonly string[],
+  attempt: UnderWay,
+  answer: Promise<T>,
+): Promise<T> {
+  for (const key of keys) underWay.set(key, (underWay.get(key) ?? new Set()).add(attempt));
+  try {
+    return await answer;
+  } finally {
+    for (const key of keys) {
+      underWay.get(key)?.delete(attempt);
+      if (underWay.get(key)?.size === 0) underWay.delete(key);
+    }
+  }
+}
+
 /** Takes a place for one try; answers how many seconds are still to wait, 0 for go on. */
-export function reservePinTry(db: Db, one: PinTry): Promise<number> {
+function reservePinTry(db: Db, one: PinTry): Promise<number> {
   const { pair, worker, kiosk } = keysOf(one);
   const slowed = [
     { key: pair, waitsSeconds: pinWaits.pair },
@@ -27,7 +81,7 @@ export function reservePinTry(db: Db, one: PinTry): Promise<number> {
 }
 
 /** Forgets the worker's wrong tries after a right one; of the tablet's it takes back this one. */
-export async function forgetPinTries(db: Db, one: PinTry): Promise<void> {
+async function forgetPinTries(db: Db, one: PinTry): Promise<void> {
   const { pair, worker, kiosk } = keysOf(one);
   await clearTries(db, [pair, worker]);
   await takeBackTry(db, kiosk);

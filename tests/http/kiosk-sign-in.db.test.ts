@@ -51,6 +51,18 @@ describe("200", () => {
     await forgetTries();
   });
 
+  test("sixteen right PINs at once are all let in: nothing is slowed down but wrong ones", async () => {
+    const others = Array.from({ length: 16 }, (_, at) => String(6100 + at));
+    for (const number of others) await makeWorker(factory, { number, pin: "271828" });
+    // slips of this hour that leave the tablet fewer free tries than people stand in the queue
+    for (let tries = 0; tries < 20; tries += 1) await key(String(9000 + tries), "000000");
+    const apart = await Promise.all(others.map((number) => key(number, "271828")));
+    expect(apart.map(({ status }) => status)).toEqual(others.map(() => 200));
+    const same = await Promise.all(others.map(() => key("1042", "271828")));
+    expect(same.map(({ status }) => status)).toEqual(others.map(() => 200));
+    await forgetTries();
+  });
+
   test("a lead sees the bench of somebody of the own cells, and of nobody else", async () => {
     const lead = await makeWorker(factory, { number: "2001", pin: "314159" });
     await makeLead(factory, kiosk, { workerId: lead, cells: ["Mill"] });
@@ -127,6 +139,13 @@ describe("429", () => {
       expect(answer.status).toBe(429);
       expect(Number(answer.headers.get("retry-after"))).toBeGreaterThan(0);
     }
+  });
+
+  test("wrong PINs at once pass the limit as little as one after the other", async () => {
+    const answers = await Promise.all(Array.from({ length: 12 }, () => key("995", "000000")));
+    const statuses = answers.map(({ status }) => status);
+    expect(statuses.filter((status) => status === 401)).toHaveLength(5);
+    expect(statuses.filter((status) => status === 429)).toHaveLength(7);
   });
 
   test("on one tablet only: a colleague elsewhere is not locked out", async () => {
