@@ -95,6 +95,25 @@ export const kioskSessions = pgTable(
   ],
 );
 
+/** Sealed credentials that came while their tries were slowed down: a job tries them again. */
+export const sealedBoxes = pgTable(
+  "sealed_boxes",
+  {
+    siteId: siteId(),
+    /** The session that the box proves. */
+    id: id(),
+    kioskId: uuid().notNull(),
+    workerNumber: text().notNull(),
+    sealed: text().notNull(),
+    keptAt: instantAt().notNull(),
+  },
+  (t) => [
+    primaryKey({ columns: [t.siteId, t.id] }),
+    foreignKey({ columns: [t.siteId, t.kioskId], foreignColumns: [kiosks.siteId, kiosks.id] }),
+    index().on(t.siteId, t.kioskId),
+  ],
+);
+
 /** HPKE key pairs with which kiosks seal credentials; old ones are kept (LEDGER.md 9). */
 export const sealKeys = pgTable(
   "seal_keys",

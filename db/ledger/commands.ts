@@ -1,7 +1,7 @@
 import { sql } from "drizzle-orm";
 import type { Scope } from "@/db/client";
 import { type Booking, payloadOf } from "@/db/ledger/payload";
-import { readContext } from "@/db/ledger/queries";
+import { readContexts } from "@/db/ledger/queries";
 import { receiveRecords } from "@/db/ledger/receive";
 import { askedBy } from "@/lib/ledger/asked";
 import type { BookingContext } from "@/lib/ledger/context";
@@ -10,6 +10,7 @@ import {
   decideBooking,
   type ProvedSession,
 } from "@/lib/ledger/decide-booking";
+import { fitTogether } from "@/lib/ledger/together";
 import { no, ok, type Result } from "@/lib/result";
 
 /** A batch as it comes from a kiosk, or as a scenario makes it. */
@@ -42,6 +43,49 @@ const TRIES_MAX = 5;
  * not at all. Sent twice it books once. Two statements, where nobody books for the same workers.
  */
 export async function bookEvents(scope: Scope, batch: IncomingBatch): Promise<Result<BookedBatch>> {
+  const [booked] = await bookBatches(scope, [batch]);
+  return booked!; // safe because there is one answer a batch
+}
+
+/**
+ * Books several batches together, each as if it came alone: one statement reads for all of them, one
+ * writes. Those that meet in a worker, a record or a kiosk are booked one after the other.
+ *
+ * @returns one a batch, in their order
+ */
+export async function bookBatches(
+  scope: Scope,
+  batches: readonly IncomingBatch[],
+): Promise<Result<BookedBatch>[]> {
+  const received = batches.map(receive);
+  const booked = new Map<Received, BookedBatch>();
+  let waiting = received;
+  for (let tries = 0; tries < TRIES_MAX && waiting.length > 0; ) {
+    const contexts = await readContexts(
+      scope,
+      waiting.map(({ asked }) => asked),
+    );
+    // safe because there is one context a batch
+    const decided = waiting.map((one, at) => decide(one, contexts[at]!));
+    const fits = fitTogether(decided);
+    const together = decided.filter((_, at) => fits[at]);
+    if (await bookTogether(scope, together)) {
+      for (const { one, ...batch } of together) booked.set(one, batch);
+      waiting = waiting.filter((one) => !booked.has(one));
+    } else tries += 1;
+  }
+  return received.map((one) => {
+    const batch = booked.get(one);
+    return batch ? ok(batch) : no("unavailable", BUSY, { retryAfterSeconds: 1 });
+  });
+}
+
+const BUSY = "Others are booking for the same people. Send it again in a moment.";
+
+/** A batch as it was received, with what must be known to decide it. */
+type Received = ReturnType<typeof receive>;
+
+function receive(batch: IncomingBatch) {
   const { kioskId, isRevoked = false, proved = [], withBench = false, arrivals } = batch;
   // a timeline is never derived as of a moment before the last of its records came
   const receivedMs = Math.max(batch.receivedAt.getTime(), ...(arrivals ?? []));
@@ -49,17 +93,27 @@ export async function bookEvents(scope: Scope, batch: IncomingBatch): Promise<Re
   const records = receiveRecords(batch.events, { kioskId, receivedMs, deviceMs, arrivals });
   const benchAtMs = withBench ? receivedMs : null;
   const asked = askedBy(records, { kioskId, proved, benchAtMs });
-  for (let tries = 0; tries < TRIES_MAX; tries += 1) {
-    const context = await readContext(scope, asked);
-    const decided = decideBooking(records, context, { kioskId, isRevoked, receivedMs, proved });
-    const timelines = decided.timelines.filter(({ isTouched }) => isTouched);
-    const isNew = decided.rows.length + decided.sessions.length > 0;
-    const booking = { ...decided, timelines, siteId: scope.siteId, kioskId };
-    if (!isNew || (await book(scope, booking))) return ok({ ...decided, context });
-  }
-  return no("unavailable", "Others are booking for the same people. Send it again in a moment.", {
-    retryAfterSeconds: 1,
-  });
+  return { records, asked, batch: { kioskId, isRevoked, receivedMs, proved } };
+}
+
+function decide(one: Received, context: BookingContext) {
+  const decided = decideBooking(one.records, context, one.batch);
+  return { ...decided, context, one, kioskId: one.batch.kioskId };
+}
+
+/** Nothing is written where nothing is new. */
+async function bookTogether(
+  scope: Scope,
+  decided: readonly ReturnType<typeof decide>[],
+): Promise<boolean> {
+  const bookings = decided
+    .filter(({ rows, sessions }) => rows.length + sessions.length > 0)
+    .map((one) => ({
+      ...one,
+      siteId: scope.siteId,
+      timelines: one.timelines.filter(({ isTouched }) => isTouched),
+    }));
+  return bookings.length === 0 || bookAll(scope, bookings);
 }
 
 /**
@@ -67,8 +121,12 @@ export async function bookEvents(scope: Scope, batch: IncomingBatch): Promise<Re
  * meanwhile, and nothing was written: read and decide again.
  */
 export async function book(scope: Scope, booking: Booking): Promise<boolean> {
+  return bookAll(scope, [booking]);
+}
+
+async function bookAll(scope: Scope, bookings: readonly Booking[]): Promise<boolean> {
   try {
-    await scope.db.execute(sql`select book(${booking.siteId}, ${payloadOf(booking)}::jsonb)`);
+    await scope.db.execute(sql`select book(${scope.siteId}, ${payloadOf(bookings)}::jsonb)`);
     return true;
   } catch (error) {
     if (isInterference(error)) return false;

@@ -27,8 +27,25 @@ export interface ReceiptEnd {
   atMs: number;
 }
 
-/** Writes a booking as the one argument of the database's `book`. */
-export function payloadOf(booking: Booking): string {
+/** Writes bookings of one site as the one argument of the database's `book`. */
+export function payloadOf(bookings: readonly Booking[]): string {
+  return JSON.stringify(bookings.map(fieldsOf).reduce(joined));
+}
+
+/** Lists of the same name one after the other; objects of lists likewise. */
+function joined(one: Fields, other: Fields): Fields {
+  return Object.fromEntries(
+    Object.entries(one).map(([name, value]) => [
+      name,
+      // safe because bookings have the same fields, and none but lists and objects of lists
+      Array.isArray(value)
+        ? [...value, ...(other[name] as unknown[])]
+        : joined(value as Fields, other[name] as Fields),
+    ]),
+  );
+}
+
+function fieldsOf(booking: Booking): Fields {
   const { siteId, kioskId, timelines, rows } = booking;
   const site = { site_id: siteId };
   const from = <T extends object>(
@@ -38,7 +55,7 @@ export function payloadOf(booking: Booking): string {
     timelines.flatMap(({ workerId, derived }) =>
       pick(derived).map((row) => ({ ...site, worker_id: workerId, ...name(row) })),
     );
-  return JSON.stringify({
+  return {
     heads: timelines.map(({ workerId, window, derived }) => ({
       worker_id: workerId,
       version: window.version,
@@ -71,7 +88,7 @@ export function payloadOf(booking: Booking): string {
     ],
     marks: markedTickets(booking).map((key) => ({ kind: "ticket", key })),
     audit: rows.flatMap((row) => auditOf(row, booking)),
-  });
+  };
 }
 
 /** Tickets whose time, counts or answers change: to be judged again. */

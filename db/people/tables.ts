@@ -57,6 +57,7 @@ export const plannedShifts = pgTable(
     primaryKey({ columns: [t.siteId, t.id] }),
     foreignKey({ columns: [t.siteId, t.workerId], foreignColumns: [workers.siteId, workers.id] }),
     index().on(t.siteId, t.workerId, t.startAt),
+    index().on(t.siteId, t.startAt),
     check("planned_shifts_order", sql`${t.endAt} > ${t.startAt}`),
   ],
 );

@@ -57,7 +57,7 @@ export async function recordStatements(
 
 /** Types of the values of both statements, as the server learns them from its functions. */
 const READ =
-  "uuid, uuid, text[], uuid[], uuid[], text[], timestamptz[], uuid[], text[], text[], int, timestamptz";
+  "uuid, uuid[], text[], uuid[], uuid[], text[], timestamptz[], uuid[], text[], text[], int, timestamptz, uuid[]";
 const WRITE = "uuid, jsonb";
 
 /** Keeps what was recorded in a table of the database, one row an event, for pgbench to replay. */

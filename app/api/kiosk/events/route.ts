@@ -1,11 +1,11 @@
 import { nudgeJudge } from "@/app/_jobs/tickets";
+import { bookInLine } from "@/app/_server/booking-line";
 import { database } from "@/app/_server/database";
 import { handle } from "@/app/_server/handle";
 import { renewedCookie } from "@/app/_server/kiosk-cookie";
 import { provedSessions } from "@/app/_server/sealed-sessions";
 import { reserveKept } from "@/app/_server/throttle";
 import { listBenches } from "@/db/kiosks/bench";
-import { bookEvents } from "@/db/ledger/commands";
 import type { EventResults } from "@/lib/kiosks/schema";
 import { eventBatch } from "@/lib/ledger/schema";
 import { instantMs } from "@/lib/time/instant";
@@ -25,7 +25,7 @@ export const POST = handle(
       if (full) return full;
     }
     const proved = isRevoked ? [] : await provedSessions(scope, actor, body, receivedAt);
-    const booked = await bookEvents(scope, {
+    const booked = await bookInLine(scope, {
       kioskId: actor.kioskId,
       isRevoked,
       events: body.events,
