@@ -1,19 +1,19 @@
 import { randomInt } from "node:crypto";
-import { parseArgs } from "node:util";
 import { hashSecret } from "@/app/_server/secret";
 import { listCells } from "@/db/cells/queries";
-import type { Scope } from "@/db/client";
-import { addEnrolmentCode, findCellNamed } from "@/db/kiosks/enrolment";
+import { addEnrolmentCode } from "@/db/kiosks/enrolment";
 import { drawEnrolmentCode, shownEnrolmentCode } from "@/lib/access/issue";
-import { command, Refusal, say, withSite } from "./ground/connect";
+import { command, Refusal, readOptions, say, withSite } from "./ground/connect";
+
+const USAGE = "npm run enrol -- --cell NAME";
 
 /** `npm run enrol -- --cell Assembly [--name "Assembly 2"]`: prints a code for a new kiosk. */
 await command(() =>
   withSite(async (scope) => {
-    const options = { cell: { type: "string" }, name: { type: "string" } } as const;
-    const { values } = parseArgs({ options });
-    const cell = values.cell === undefined ? null : await findCellNamed(scope, values.cell);
-    if (!cell) throw new Refusal(await knownCells(scope, values.cell));
+    const values = readOptions({ cell: { type: "string" }, name: { type: "string" } }, USAGE);
+    const cells = await listCells(scope);
+    const cell = cellNamed(cells, values.cell ?? "");
+    if (!cell) throw new Refusal(knownCells(cells, values.cell));
     const code = drawEnrolmentCode((below) => randomInt(below));
     const name = values.name ?? cell.name;
     const wanted = { codeHash: hashSecret(code), name, cellId: cell.id, by: "command:enrol" };
@@ -23,9 +23,16 @@ await command(() =>
   }),
 );
 
-async function knownCells(scope: Scope, asked: string | undefined): Promise<string> {
-  const names = (await listCells(scope)).map(({ name }) => name);
+/** As it is written, else whatever its capitals. */
+function cellNamed<T extends { name: string }>(cells: readonly T[], asked: string): T | undefined {
+  const [wanted, small] = [asked.trim(), asked.trim().toLowerCase()];
+  const exact = cells.find(({ name }) => name === wanted);
+  return exact ?? cells.find(({ name }) => name.toLowerCase() === small);
+}
+
+function knownCells(cells: readonly { name: string }[], asked: string | undefined): string {
+  const names = cells.map(({ name }) => name);
   const wanted = asked === undefined ? "Say for which cell" : `There is no cell "${asked}" here`;
   const known = names.length > 0 ? `The cells are: ${names.join(", ")}.` : "None is made yet.";
-  return `${wanted}: npm run enrol -- --cell NAME\n${known}`;
+  return `${wanted}: ${USAGE}\n${known}`;
 }

@@ -1,15 +1,15 @@
-import { parseArgs } from "node:util";
 import { KEY_PREFIX } from "@/app/_server/key-actor";
 import { hashSecret, newSecret } from "@/app/_server/secret";
 import { addKey } from "@/db/access/keys";
 import { role, roles } from "@/lib/access/roles";
-import { command, Refusal, say, withSite } from "./ground/connect";
+import { command, Refusal, readOptions, say, withSite } from "./ground/connect";
 
 /** `npm run key -- --role planner [--name "Order import"]`: prints a new integration key, once. */
 await command(async () => {
-  const { values } = parseArgs({ options: { role: { type: "string" }, name: { type: "string" } } });
+  const usage = `npm run key -- --role ${roles.join("|")}`;
+  const values = readOptions({ role: { type: "string" }, name: { type: "string" } }, usage);
   const wanted = role.safeParse(values.role);
-  if (!wanted.success) throw new Refusal(`Say for whom: npm run key -- --role ${roles.join("|")}`);
+  if (!wanted.success) throw new Refusal(`Say for whom: ${usage}`);
   const secret = `${KEY_PREFIX}${newSecret()}`;
   const name = values.name ?? `${wanted.data}, by command`;
   const key = { keyHash: hashSecret(secret), role: wanted.data, name, by: "command:key" };

@@ -8,16 +8,6 @@ import { enrolmentCodes, kioskCells, kiosks } from "@/db/kiosks/tables";
 /** How long an enrolment code can be used (API.md). */
 const CODE_MS = 10 * 60_000;
 
-/** Finds a cell of the site by its name as it is written; null if there is none. */
-export async function findCellNamed({ db, siteId }: Scope, name: string) {
-  const [cell] = await db
-    .select({ id: cells.id, name: cells.name })
-    .from(cells)
-    .where(and(eq(cells.siteId, siteId), eq(cells.name, name)))
-    .limit(1);
-  return cell ?? null;
-}
-
 /**
  * Keeps a new one-time code with which a browser becomes a kiosk of a cell. Kept twice under one id
  * (a form sent again), the code shown last is the one that holds; once used it stays used.

@@ -1,6 +1,9 @@
+import { type ParseArgsConfig, parseArgs } from "node:util";
 import { env } from "@/app/_server/env";
 import { type Db, openPool, type Scope, wrap } from "@/db/client";
 import { findFirstSite } from "@/db/sites/found";
+
+type Options = NonNullable<ParseArgsConfig["options"]>;
 
 /** What a person is told instead of a stack. */
 export class Refusal extends Error {}
@@ -18,6 +21,16 @@ export async function command(work: () => Promise<void>): Promise<void> {
     if (!(error instanceof Refusal)) throw error;
     say(error.message);
     process.exitCode = 1;
+  }
+}
+
+/** Reads the command's options; what it does not know is refused with how to call it. */
+export function readOptions<const T extends Options>(options: T, usage: string) {
+  try {
+    return parseArgs({ options }).values;
+  } catch (error) {
+    const [what] = String((error as Error).message).split(". ");
+    throw new Refusal(`${what}. Say: ${usage}`);
   }
 }
 

@@ -75,6 +75,9 @@ test("an empty installation starts, survives what is killed under it, and keeps 
   const key = await script("with-database.mjs", "key.ts", "--role", "payroll");
   expect(key.text).toMatch(/^bm_[\w-]{43}$/m);
   expect((await script("stop.mjs")).text).toContain("was not running");
+  const mistaken = await script("with-database.mjs", "key.ts", "--rolle", "payroll");
+  expect(mistaken.code).toBe(1);
+  expect(mistaken.text).toContain("Unknown option '--rolle'. Say: npm run key -- --role");
 
   // the supervisor dies: what it leaves behind is ended, and the data is as it was: the key is known
   const second = await start();
