@@ -1,13 +1,14 @@
 import { spawn } from "node:child_process";
 import { once } from "node:events";
 import { openInstallation } from "./ground/installation.mjs";
-import { root } from "./ground/place.mjs";
+import { checkFolders, root } from "./ground/place.mjs";
 import { chooseAddress } from "./ground/plan.mjs";
 import { next, runScript } from "./ground/programs.mjs";
 import { main, say } from "./ground/say.mjs";
 
 /** `npm run dev`: Next's development server on the installation's database. */
 await main(async () => {
+  checkFolders();
   process.on("SIGINT", () => say("")); // the terminal sends it to the server too, which then ends
   const { host, port } = await chooseAddress();
   const { env, close } = await openInstallation();

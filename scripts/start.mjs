@@ -6,14 +6,14 @@ import {
   stopCluster,
   usesGivenServer,
 } from "./ground/installation.mjs";
+import { personLeaves } from "./ground/leave.mjs";
 import { endLeftovers } from "./ground/leftovers.mjs";
 import { installModules } from "./ground/modules.mjs";
 import { installPackages } from "./ground/packages.mjs";
-import { dataFolder, makeFolder } from "./ground/place.mjs";
+import { checkFolders, dataFolder, makeFolder } from "./ground/place.mjs";
 import { checkNode, chooseAddress, sayPlan } from "./ground/plan.mjs";
 import { identityOf, isAlive } from "./ground/process-record.mjs";
 import { runScript } from "./ground/programs.mjs";
-import { stopRunning } from "./ground/run.mjs";
 import { main, Stop, say } from "./ground/say.mjs";
 import { localAddress } from "./ground/server.mjs";
 import { serve } from "./ground/supervise.mjs";
@@ -25,14 +25,15 @@ const REACHABLE =
 /** `npm start`: from a fresh clone to a served Bookmatch, and from there to the next Ctrl-C. */
 await main(async () => {
   checkNode();
+  checkFolders();
   makeFolder(dataFolder());
   const record = runningRecord();
   const before = record.read();
   if (isAlive(before?.supervisor)) return sayRunning(before);
-  const leaving = personLeaves();
+  const leaving = personLeaves("SIGTERM");
   await endLeftovers(before);
   const { host, port } = await chooseAddress();
-  await sayPlan({ host, port });
+  sayPlan({ host, port });
   record.write({ supervisor: identityOf(process.pid), server: null, address: null });
   try {
     await startAndStay({ host, port, record, leaving });
@@ -78,19 +79,4 @@ async function prepare(env, address) {
 function sayRunning({ supervisor, address, greeting }) {
   if (address) say(`Bookmatch is already running: ${address}\n${greeting}\nStop it with npm stop.`);
   else say(`Bookmatch is already being started, by process ${supervisor.pid}.`);
-}
-
-/** Resolves at the first Ctrl-C, stop request or closed terminal; whatever runs then is ended. */
-function personLeaves() {
-  const leaving = { isOver: false, promise: Promise.resolve() };
-  leaving.promise = new Promise((resolve) => {
-    const leave = () => {
-      if (!leaving.isOver) say("\nStopping …");
-      leaving.isOver = true;
-      stopRunning();
-      resolve();
-    };
-    for (const signal of ["SIGINT", "SIGTERM", "SIGHUP"]) process.on(signal, leave);
-  });
-  return leaving;
 }

@@ -1,5 +1,6 @@
 import { runningRecord, stopCluster } from "./ground/installation.mjs";
 import { endLeftovers, endProcess } from "./ground/leftovers.mjs";
+import { checkFolders } from "./ground/place.mjs";
 import { isAlive } from "./ground/process-record.mjs";
 import { main, say } from "./ground/say.mjs";
 
@@ -8,6 +9,7 @@ const SUPERVISOR_MS = 60_000;
 
 /** `npm stop`: ends a running Bookmatch as Ctrl-C does, and whatever a killed one left behind. */
 await main(async () => {
+  checkFolders();
   const record = runningRecord();
   const running = record.read();
   const wasRunning = isAlive(running?.supervisor);

@@ -4,9 +4,10 @@ import { build, isBuildCurrent } from "./ground/build.mjs";
 import { runChecks } from "./ground/checks.mjs";
 import { findPrograms } from "./ground/cluster.mjs";
 import { runningRecord } from "./ground/installation.mjs";
+import { personLeaves } from "./ground/leave.mjs";
 import { installModules } from "./ground/modules.mjs";
 import { installPackages } from "./ground/packages.mjs";
-import { root } from "./ground/place.mjs";
+import { checkFolders, root } from "./ground/place.mjs";
 import { checkNode } from "./ground/plan.mjs";
 import { runPlaywright } from "./ground/playwright.mjs";
 import { isAlive } from "./ground/process-record.mjs";
@@ -26,7 +27,9 @@ const [mode = "all", ...args] = process.argv.slice(2);
  */
 await main(async () => {
   checkNode();
-  const tally = newTally();
+  checkFolders();
+  const leaving = personLeaves("SIGINT");
+  const tally = newTally(leaving);
   const isInstalled = await stage(tally, "install", install);
   if (!isInstalled) return report(tally);
   const data = await startTestServer();

@@ -1,5 +1,6 @@
 import { isInstalled, openInstallation, runningRecord } from "./ground/installation.mjs";
 import { areModulesCurrent } from "./ground/modules.mjs";
+import { checkFolders } from "./ground/place.mjs";
 import { isAlive } from "./ground/process-record.mjs";
 import { runScript } from "./ground/programs.mjs";
 import { main, Stop } from "./ground/say.mjs";
@@ -9,8 +10,9 @@ import { main, Stop } from "./ground/say.mjs";
  * or stopped: `node scripts/with-database.mjs key.ts --role planner`.
  */
 await main(async () => {
+  checkFolders();
   const [name, ...args] = process.argv.slice(2);
-  if (!areModulesCurrent() || !(await isInstalled()))
+  if (!areModulesCurrent() || !isInstalled())
     throw new Stop("There is no Bookmatch here yet. Start it once: npm start");
   const { env, close } = await openInstallation();
   try {

@@ -5,8 +5,6 @@ import {
   mkdirSync,
   readdirSync,
   readFileSync,
-  readlinkSync,
-  realpathSync,
   renameSync,
   rmSync,
   statSync,
@@ -78,13 +76,21 @@ function programsOf(home) {
   );
 }
 
-/** `cwd: /` because the database's user may not be allowed into ours. */
-function asDatabaseUser(home, program, args, mayFail = false) {
+/**
+ * As root: as the one to whom the data belongs, for new data as `postgres`. `cwd: /` because the
+ * database's user may not be allowed into ours.
+ */
+async function asDatabaseUser(home, program, args, mayFail = false) {
   const file = path.join(programsOf(home), program);
   const env = { PATH: process.env.PATH, LC_ALL: "C.UTF-8", TZ: "UTC" };
-  return isRoot
-    ? run("runuser", ["-u", "postgres", "--", file, ...args], { cwd: "/", env, mayFail })
-    : run(file, args, { cwd: "/", env, mayFail });
+  const how = { cwd: "/", env, mayFail };
+  if (!isRoot) return run(file, args, how);
+  return run("runuser", ["-u", await ownerOf(home), "--", file, ...args], how);
+}
+
+async function ownerOf(home) {
+  if (!existsSync(home)) return "postgres";
+  return (await run("id", ["-nu", String(statSync(home).uid)])).text.trim();
 }
 
 /** Made beside its place and renamed when complete, so that a half-made cluster is never started. */
@@ -177,7 +183,8 @@ function isStranger(home) {
   const pid = pidOf(home);
   if (pid === null || !existsSync(`/proc/${pid}`)) return false;
   try {
-    return readlinkSync(`/proc/${pid}/cwd`) !== realpathSync(home);
+    const [at, own] = [statSync(`/proc/${pid}/cwd`), statSync(home)];
+    return at.ino !== own.ino || at.dev !== own.dev;
   } catch (error) {
     // another user's process, which we may not look at, is a stranger; one just gone is none
     return error.code === "EACCES" && statSync(`/proc/${pid}`).uid !== statSync(home).uid;

@@ -1,7 +1,7 @@
 import { existsSync } from "node:fs";
 import path from "node:path";
 import { clusterIn, findPrograms } from "./cluster.mjs";
-import { clusterFolder, dataFolder } from "./place.mjs";
+import { clusterFolder, clusterPlace, dataFolder } from "./place.mjs";
 import { recordIn } from "./process-record.mjs";
 import { run } from "./run.mjs";
 import { Stop } from "./say.mjs";
@@ -16,7 +16,7 @@ const ELSEWHERE = "/var/lib";
 export const usesGivenServer = Boolean(process.env.DATABASE_URL);
 
 /** Where the installation's own cluster is, or is going to be. */
-export const findClusterFolder = () => clusterFolder(dataFolder(), ELSEWHERE);
+export const findClusterPlace = () => clusterPlace(dataFolder(), ELSEWHERE);
 
 /** The record of who serves this installation, if anybody does. */
 export const runningRecord = () => recordIn(path.join(dataFolder(), "running.json"));
@@ -32,7 +32,7 @@ export async function openInstallation() {
   const secrets = secretsIn(folder);
   if (usesGivenServer)
     return { env: givenEnvironment(secrets), cluster: null, close: async () => undefined };
-  const cluster = clusterIn(await findClusterFolder(), { durable: true });
+  const cluster = clusterIn(clusterFolder(dataFolder(), ELSEWHERE), { durable: true });
   const { port, password, wasUp } = await cluster.start();
   await makeDatabase({ port, password, ownerPassword: secrets.owner });
   const at = `127.0.0.1:${port}/${DATABASE}`;
@@ -43,16 +43,14 @@ export async function openInstallation() {
 }
 
 /** Tells whether there is an installation to open: something was started here before. */
-export async function isInstalled() {
-  if (usesGivenServer) return true;
-  const made = path.join(await findClusterFolder(), "cluster/PG_VERSION");
-  return existsSync(made);
+export function isInstalled() {
+  return usesGivenServer || existsSync(path.join(findClusterPlace(), "cluster/PG_VERSION"));
 }
 
 /** Stops the installation's own cluster, if it has one. */
 export async function stopCluster() {
-  if (usesGivenServer || !(await isInstalled())) return;
-  await clusterIn(await findClusterFolder(), { durable: true }).stop();
+  if (usesGivenServer || !isInstalled()) return;
+  await clusterIn(findClusterPlace(), { durable: true }).stop();
 }
 
 /** A server of one's own: with one login given, it is the owner and the app gets one of its own. */

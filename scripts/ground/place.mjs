@@ -1,8 +1,17 @@
 import { createHash } from "node:crypto";
-import { chmodSync, existsSync, lstatSync, mkdirSync } from "node:fs";
+import {
+  accessSync,
+  chmodSync,
+  constants,
+  existsSync,
+  lstatSync,
+  mkdirSync,
+  realpathSync,
+  statSync,
+} from "node:fs";
 import path from "node:path";
 import { fileURLToPath } from "node:url";
-import { run } from "./run.mjs";
+import { Stop } from "./say.mjs";
 
 /** The folder of the clone. */
 export const root = path.resolve(fileURLToPath(new URL("../..", import.meta.url)));
@@ -24,25 +33,54 @@ export function makeFolder(folder) {
 }
 
 /**
- * Where the cluster of a folder lives: inside it, or, where root's unprivileged helper may not walk
- * there (a clone under /root or another 0700 parent), in a place of its own under `elsewhere`.
+ * Where the cluster of a folder lives: inside it, or, where the database's user may not walk there
+ * (a clone of root's under /root or another 0700 parent), in a place of its own under `elsewhere`.
+ * It stays where it was made. Makes nothing: before PostgreSQL is installed it tells the same.
  *
  * @param {string} folder
  * @param {string} elsewhere
  */
-export async function clusterFolder(folder, elsewhere) {
-  makeFolder(folder);
+export function clusterPlace(folder, elsewhere) {
   const sum = createHash("sha256").update(folder).digest("hex").slice(0, 12);
   const other = path.join(elsewhere, `bookmatch-${sum}`);
-  const isMadeThere = existsSync(path.join(other, "cluster")); // it stays where it was made
-  if (!isRoot || (!isMadeThere && (await databaseUserMayEnter(folder)))) return folder;
-  makeFolder(other);
-  if (lstatSync(other).isSymbolicLink() || lstatSync(other).uid !== 0)
-    throw new Error(`${other} belongs to somebody else. Remove it, or set BOOKMATCH_DATA.`);
+  const isMadeIn = (place) => existsSync(path.join(place, "cluster"));
+  const isMadeElsewhere = isRoot && isMadeIn(other);
+  if (!isRoot || isMadeIn(folder) || (!isMadeElsewhere && anybodyMayEnter(folder))) return folder;
   return other;
 }
 
-async function databaseUserMayEnter(folder) {
-  const asPostgres = ["-u", "postgres", "--", "test", "-x", folder];
-  return (await run("runuser", asPostgres, { cwd: "/", mayFail: true })).code === 0;
+/** The same, and the folder is there. */
+export function clusterFolder(folder, elsewhere) {
+  makeFolder(folder);
+  const place = clusterPlace(folder, elsewhere);
+  makeFolder(place);
+  if (place !== folder && (lstatSync(place).isSymbolicLink() || lstatSync(place).uid !== 0))
+    throw new Stop(`${place} belongs to somebody else. Remove it, or set BOOKMATCH_DATA.`);
+  return place;
+}
+
+/** A folder that is not there yet is made so that others may walk through. */
+export function anybodyMayEnter(folder) {
+  const isThere = existsSync(folder);
+  const isOpen = !isThere || (statSync(folder).mode & 0o001) === 0o001;
+  const parent = path.dirname(isThere ? realpathSync(folder) : folder);
+  return isOpen && (parent === folder || anybodyMayEnter(parent));
+}
+
+/** Refuses a clone or a data folder that another user made: half of it could not be written. */
+export function checkFolders() {
+  for (const folder of [root, path.join(root, ".data"), dataFolder()])
+    if (existsSync(folder) && !mayWrite(folder))
+      throw new Stop(
+        `${folder} is another user's. Do this as the one who made it, or in a clone of your own.`,
+      );
+}
+
+function mayWrite(folder) {
+  try {
+    accessSync(folder, constants.W_OK);
+    return true;
+  } catch {
+    return false; // it says no by throwing
+  }
 }

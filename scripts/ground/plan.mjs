@@ -1,7 +1,7 @@
 import path from "node:path";
 import { isBuildCurrent } from "./build.mjs";
 import { findPrograms } from "./cluster.mjs";
-import { findClusterFolder, usesGivenServer } from "./installation.mjs";
+import { findClusterPlace, usesGivenServer } from "./installation.mjs";
 import { areModulesCurrent } from "./modules.mjs";
 import { root } from "./place.mjs";
 import { isFree } from "./ports.mjs";
@@ -37,9 +37,9 @@ may not be yours to use. Choose another with PORT, or stop that program.`);
 }
 
 /** Says what a start is about to do, before it does it. */
-export async function sayPlan({ host, port }) {
+export function sayPlan({ host, port }) {
   const needsServer = !usesGivenServer && !findPrograms();
-  const place = path.relative(root, await findClusterFolder());
+  const place = shownPlace(findClusterPlace());
   const modules = !areModulesCurrent();
   const steps = [
     needsServer && "install PostgreSQL from Debian, which is missing",
@@ -56,4 +56,10 @@ export async function sayPlan({ host, port }) {
       .map((step) => `  · ${step}`)
       .join("\n")}`,
   );
+}
+
+/** Within the clone as seen from there, elsewhere in full. */
+function shownPlace(folder) {
+  const within = path.relative(root, folder);
+  return within.startsWith("..") ? folder : within;
 }

@@ -13,6 +13,7 @@ export async function runPlaywright(args, env) {
     env: { ...env, PLAYWRIGHT_JSON_OUTPUT_FILE: file },
     show: true,
     mayFail: true,
+    apart: true,
   });
   if (!existsSync(file)) throw new Error("Playwright ended before it could report; see above");
   const { stats, suites, errors } = JSON.parse(readFileSync(file, "utf8"));

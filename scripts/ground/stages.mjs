@@ -1,13 +1,20 @@
 import { say } from "./say.mjs";
 
-/** What a test run has counted and how long its stages took. */
-export function newTally() {
-  return { passed: 0, failed: 0, failures: [], minutes: [] };
+/** What a shell calls a program that ended by Ctrl-C. */
+const INTERRUPTED = 130;
+
+/**
+ * What a test run has counted and how long its stages took.
+ *
+ * @param {{isOver: boolean}} [leaving] the person who may stop it before its end
+ */
+export function newTally(leaving = { isOver: false }) {
+  return { passed: 0, failed: 0, failures: [], minutes: [], leaving };
 }
 
 /**
  * Runs a stage of the tests and keeps its time. What it throws is a failure of that stage: the
- * later ones still run, so that one look shows everything that is wrong.
+ * later ones still run, so that one look shows everything that is wrong. Who has left gets no more.
  *
  * @param {ReturnType<typeof newTally>} tally
  * @param {string} name
@@ -15,6 +22,7 @@ export function newTally() {
  * @returns {Promise<boolean>} whether all of it passed
  */
 export async function stage(tally, name, work) {
+  if (tally.leaving.isOver) return false;
   say(`\n── ${name}`);
   const start = performance.now();
   const found = await work().catch((error) => ({
@@ -31,6 +39,10 @@ export async function stage(tally, name, work) {
 
 /** Prints minutes per stage, what failed and what to do about it, and as the last line the counts. */
 export function report(tally) {
+  if (tally.leaving.isOver) {
+    say("Stopped before the end: this says nothing of the tests.");
+    return INTERRUPTED;
+  }
   say("\n── minutes");
   for (const { name, minutes } of tally.minutes) say(`${minutes.toFixed(1).padStart(6)}  ${name}`);
   const total = tally.minutes.reduce((sum, { minutes }) => sum + minutes, 0);

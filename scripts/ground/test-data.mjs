@@ -7,7 +7,7 @@ import { clusterFolder, root } from "./place.mjs";
  * superuser, ending in `/` for a database's name, and whether it was up before.
  */
 export async function startTestServer() {
-  const folder = await clusterFolder(path.join(root, ".test"), "/var/tmp");
+  const folder = clusterFolder(path.join(root, ".test"), "/var/tmp");
   const cluster = clusterIn(folder, { durable: false });
   const { port, password, wasUp } = await cluster.start();
   return {

@@ -14,6 +14,7 @@ export async function runVitest(args, env = process.env) {
     env,
     show: true,
     mayFail: true,
+    apart: true,
   });
   if (!existsSync(file)) throw new Error("vitest ended before it could report; see above");
   const { testResults, numPassedTests } = JSON.parse(readFileSync(file, "utf8"));
