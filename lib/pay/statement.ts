@@ -1,4 +1,5 @@
 import { groupBy } from "@/lib/group-by";
+import type { Warning } from "@/lib/limits/shift-facts";
 import type { PayAnswer } from "@/lib/pay/answer";
 import { statedDay, totalsOf } from "@/lib/pay/day";
 import { type Lifted, liftHours } from "@/lib/pay/overtime";
@@ -9,6 +10,8 @@ import type { PayPolicy } from "@/lib/pay/schema";
 import { warningsOf } from "@/lib/pay/warnings";
 import { weekPay } from "@/lib/rates/week-pay";
 import { instantMs } from "@/lib/time/instant";
+import type { Stretch } from "@/lib/time/site-day";
+import { overlapOf } from "@/lib/time/stretches";
 import { type Workweek, workweekFrom } from "@/lib/time/workweek";
 import { type ZoneClock, zoneClock } from "@/lib/time/zone-clock";
 import { zonedText } from "@/lib/time/zoned-text";
@@ -18,14 +21,26 @@ import { type Timesheet, timesheetOf } from "@/lib/timesheet/timesheet";
 type PayWeek = PayAnswer["workweeks"][number];
 type Extras = PayRequest["extras"];
 
-/** All that a workweek's part of the statement is made from. */
-interface Book {
+/** Time to be stated under one policy. */
+export interface StatedTime {
   clock: ZoneClock;
   policy: PayPolicy;
-  sheet: Timesheet;
-  extras: Extras;
+  spans: readonly Span[];
+  extras?: Extras;
   /** Says whether a workday is asked for. */
   isIn: (date: string) => boolean;
+  /** What counts at all: the rest belongs to another workweek, where the workweek itself changed. */
+  within?: Stretch;
+}
+
+/** A workweek with the workdays asked for. */
+export interface StatedWeek extends Pick<PayWeek, "days" | "totals" | "pay"> {
+  week: Workweek;
+}
+
+/** All that a workweek's part of the statement is made from. */
+interface Book extends Required<Pick<StatedTime, "clock" | "policy" | "extras" | "isIn">> {
+  sheet: Timesheet;
   /** True where rates or extras were given. */
   isMoney: boolean;
 }
@@ -39,17 +54,37 @@ export function payStatement(request: PayRequest): PayAnswer {
   const { from, to, extras } = request;
   const clock = zoneClock(request.timeZone);
   const policy = policyOf(request.policy);
-  const spans = request.spans.map(spanOf);
-  const sheet = timesheetOf(spans, policy, clock);
-  const isMoney = extras.length > 0 || spans.some(({ rate }) => rate !== null);
   const isIn = (date: string) => date >= from && date < to;
-  const book = { clock, policy, sheet, extras, isIn, isMoney };
-  const workweeks = weeksOf(book).map((week) => statedWeek(week, book));
+  const stated = stateTime({ clock, policy, spans: request.spans.map(spanOf), extras, isIn });
+  const workweeks = stated.weeks.map(({ week, ...rest }) => ({
+    start: zonedText(week.start, clock.zone),
+    end: zonedText(week.end, clock.zone),
+    ...rest,
+  }));
   const totals = totalsOf(
     workweeks.map((week) => week.totals),
     policy,
   );
-  return { workweeks, totals, warnings: warningsOf(sheet, policy, clock, isIn) };
+  return { workweeks, totals, warnings: stated.warnings };
+}
+
+/** States time by workweek, and what should be looked at; `payStatement` says how. */
+export function stateTime(asked: StatedTime): { weeks: StatedWeek[]; warnings: Warning[] } {
+  const { clock, policy, spans, extras = [], isIn, within } = asked;
+  const whole = timesheetOf(spans, policy, clock);
+  const sheet = within ? cutTo(whole, within) : whole;
+  const isMoney = extras.length > 0 || spans.some(({ rate }) => rate !== null);
+  const book = { clock, policy, sheet, extras, isIn, isMoney };
+  const weeks = weeksOf(book).map((week) => statedWeek(week, book));
+  return { weeks, warnings: warningsOf(whole, policy, clock, isIn) };
+}
+
+function cutTo(sheet: Timesheet, within: Stretch): Timesheet {
+  const cut = <T extends Stretch>(pieces: readonly T[]) =>
+    pieces
+      .map((piece) => ({ ...piece, ...overlapOf(piece, within) }))
+      .filter(({ start, end }) => end > start);
+  return { ...sheet, worked: cut(sheet.worked), paid: cut(sheet.paid), steps: cut(sheet.steps) };
 }
 
 function spanOf({ start, end, kind, rate }: PayRequest["spans"][number]): Span {
@@ -67,7 +102,7 @@ function weeksOf({ sheet, policy, clock, extras, isIn }: Book): Workweek[] {
     .map((date) => sheet.weeks.get(date) ?? workweekFrom(date, policy.workweek.at, clock));
 }
 
-function statedWeek(week: Workweek, book: Book): PayWeek {
+function statedWeek(week: Workweek, book: Book): StatedWeek {
   const { sheet, policy, clock, isIn } = book;
   const ofWeek = (piece: { week: string }) => piece.week === week.date;
   const lifted = liftHours(sheet.paid.filter(ofWeek), week, policy.overtime);
@@ -83,8 +118,7 @@ function statedWeek(week: Workweek, book: Book): PayWeek {
     return statedDay(date, { worked, lifted: paid, steps, premiums }, policy);
   });
   return {
-    start: zonedText(week.start, clock.zone),
-    end: zonedText(week.end, clock.zone),
+    week,
     days,
     totals: totalsOf(days, policy),
     ...(book.isMoney ? { pay: payOf(week, lifted, book) } : {}),
