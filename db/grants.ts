@@ -5,7 +5,19 @@ import type pg from "pg";
 export const APP_GROUP = "bookmatch_app";
 
 /** What may be added to and read, and nothing else: the ledger and what proves it (LEDGER.md 1). */
-const appendOnly = ["clock_events", "event_ids", "notes", "audit_log"];
+const appendOnly = [
+  "clock_events",
+  "event_ids",
+  "notes",
+  "audit_log",
+  "pay_policies",
+  "pay_choices",
+  "pay_rhythms",
+  "pay_revisions",
+  "pay_reopenings",
+  "pay_cards",
+  "pay_rows",
+];
 
 /** Roles belong to the whole server, so another database on it may have made the group already. */
 export async function makeAppGroup(client: pg.ClientBase): Promise<void> {

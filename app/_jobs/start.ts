@@ -1,5 +1,6 @@
 import "server-only";
 import { every } from "@/app/_jobs/every";
+import { openPeriods } from "@/app/_jobs/periods";
 import { startJudging } from "@/app/_jobs/tickets";
 import { closeForgottenShifts } from "@/app/_jobs/timeline";
 import { database } from "@/app/_server/database";
@@ -7,6 +8,7 @@ import { clearOldTries } from "@/db/access/commands";
 import { makePartitions } from "@/db/jobs/commands";
 
 const MINUTE = 60;
+const HOUR = 3600;
 const DAY = 86_400;
 
 const held = globalThis as typeof globalThis & { bookmatchJobs?: () => Promise<void> };
@@ -25,6 +27,7 @@ function begin(): () => Promise<void> {
     every("partitions", DAY, () => makePartitions(database(), new Date())),
     startJudging(),
     every("timeline", MINUTE, closeForgottenShifts),
+    every("periods", HOUR, openPeriods),
     every("tries", DAY, () => clearOldTries(database(), new Date())),
   ];
   return async () => {

@@ -57,6 +57,13 @@ export const clockEvents = pgTable(
     index("clock_events_corrections")
       .on(t.siteId, t.workerId)
       .where(sql`kind in ('void', 'move', 'insert', 'reassign', 'settle')`),
+    // what may change a pay period that is closed already: few of all
+    index("clock_events_late")
+      .on(t.siteId, t.receivedAt, t.workerId)
+      .where(
+        sql`received_at - at > interval '24 hours'
+          or kind in ('void', 'move', 'insert', 'reassign', 'settle')`,
+      ),
   ],
 );
 

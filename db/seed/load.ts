@@ -3,6 +3,7 @@ import type { Db, Scope } from "@/db/client";
 import { bookHistory, settleHistory } from "@/db/seed/events";
 import { writeFactory } from "@/db/seed/factory";
 import { writeKiosks, writeSessions } from "@/db/seed/kiosks";
+import { writePay } from "@/db/seed/pay";
 import { type Hash, writeAccounts, writePlannedShifts, writeWorkers } from "@/db/seed/people";
 import { DEMO_SITE_ID } from "@/db/seed/sign-ins";
 import { writeTickets } from "@/db/seed/tickets";
@@ -10,6 +11,7 @@ import { findFirstSite, foundSite } from "@/db/sites/found";
 import { TIME_ZONE } from "@/lib/demo/calendar";
 import { no, ok, type Result } from "@/lib/result";
 import { type DemoRun, type Scenario, simulate } from "@/lib/simulation/simulate";
+import { localDate } from "@/lib/time/site-day";
 
 /** How far the loading has come: what it is at, and how much of that is done, 0 to 1. */
 type Progress = (step: string, share: number) => void;
@@ -71,5 +73,7 @@ async function writeHouse(
   await writePlannedShifts(scope, workers, shifts);
   await writeSessions(scope, { kiosks, workers }, sessions);
   await writeTickets(scope, ids, tickets);
+  const today = localDate(now.getTime(), TIME_ZONE);
+  await writePay(scope, { startsOn: calendar.startsOn, today });
   return kiosks;
 }
