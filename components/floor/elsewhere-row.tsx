@@ -1,3 +1,4 @@
+import { type Forgotten, PersonName } from "@/components/floor/person-name";
 import { SeamGauge } from "@/components/seam/gauge";
 import type { PresentElsewhere } from "@/lib/floor/schema";
 import { otherWorkWords } from "@/lib/ledger/other-work-words";
@@ -10,13 +11,15 @@ export function ElsewhereRow({
   now,
   scaleSeconds,
   timeZone,
+  forgotten,
 }: {
   person: PresentElsewhere;
   now: number;
   scaleSeconds: number;
   timeZone: string;
+  forgotten: Forgotten | null;
 }) {
-  const { doing, code, name, since } = person;
+  const { doing, code, since } = person;
   const seconds = Math.max(0, now - since);
   return (
     <tr className="text-ink-2">
@@ -37,7 +40,16 @@ export function ElsewhereRow({
       </td>
       <td data-day="">{actualMinutes(seconds)} min</td>
       <td data-day="">
-        <span className="text-ink">{name}</span>, since {clockText(since * 1000, timeZone)}
+        <span className="text-ink">
+          <PersonName
+            person={person}
+            deed="shift-end"
+            proposedSecond={now}
+            timeZone={timeZone}
+            forgotten={forgotten}
+          />
+        </span>
+        , since {clockText(since * 1000, timeZone)}
       </td>
     </tr>
   );

@@ -6,6 +6,7 @@ import { fetchJson, type ProblemError } from "@/components/fetch-json";
 import { FloorHead } from "@/components/floor/floor-head";
 import { FloorLedger } from "@/components/floor/floor-ledger";
 import { NobodyIn } from "@/components/floor/nobody-in";
+import type { Forgotten } from "@/components/floor/person-name";
 import { useServerClock } from "@/components/floor/use-server-clock";
 import { StaleNote } from "@/components/ui/stale-note";
 import { type FloorView, floorView } from "@/lib/floor/schema";
@@ -23,11 +24,14 @@ export function FloorBoard({
   initial,
   nowMs,
   linksTickets,
+  forgotten = null,
 }: {
   initial: FloorView;
   /** When the server drew `initial`. */
   nowMs: number;
   linksTickets: boolean;
+  /** For whom the one who looks may enter a forgotten start or end; null for nobody. */
+  forgotten?: Forgotten | null;
 }) {
   const clock = useServerClock(nowMs, TICK_MS);
   const [freshMs, setFreshMs] = useState(nowMs);
@@ -50,7 +54,11 @@ export function FloorBoard({
           <StaleNote asOf={clockText(freshMs, floor.timeZone)}>{error.message}</StaleNote>
         </div>
       )}
-      {floor.cells.length > 0 ? <FloorLedger {...shown} /> : <NobodyIn {...shown} />}
+      {floor.cells.length > 0 ? (
+        <FloorLedger {...shown} forgotten={forgotten} />
+      ) : (
+        <NobodyIn {...shown} />
+      )}
     </div>
   );
 }

@@ -1,4 +1,6 @@
+import { Fragment } from "react";
 import { ElsewhereRow } from "@/components/floor/elsewhere-row";
+import { type Forgotten, PersonName } from "@/components/floor/person-name";
 import { WorkRow } from "@/components/floor/work-row";
 import { SeamAxis } from "@/components/seam/axis";
 import { Columns } from "@/components/shell/columns";
@@ -15,10 +17,12 @@ export function FloorLedger({
   floor,
   nowMs,
   linksTickets,
+  forgotten,
 }: {
   floor: FloorView;
   nowMs: number;
   linksTickets: boolean;
+  forgotten: Forgotten | null;
 }) {
   const now = Math.floor(nowMs / 1000);
   const pairs = floor.cells.flatMap(({ work }) =>
@@ -27,7 +31,13 @@ export function FloorLedger({
       actualSeconds: actualSeconds(each, now),
     })),
   );
-  const row = { now, scaleSeconds: seamScale(pairs), timeZone: floor.timeZone, linksTickets };
+  const row = {
+    now,
+    scaleSeconds: seamScale(pairs),
+    timeZone: floor.timeZone,
+    linksTickets,
+    forgotten,
+  };
   return (
     <Ledger caption="Who is on what, by cell" className="mirror-ledger">
       <Columns widths={WIDTHS} />
@@ -46,7 +56,7 @@ export function FloorLedger({
       </thead>
       {floor.cells.map((cell) => (
         <tbody key={cell.cell}>
-          <CellRow cell={cell} timeZone={floor.timeZone} />
+          <CellRow cell={cell} timeZone={floor.timeZone} forgotten={forgotten} />
           {cell.work.map((work) => (
             <WorkRow key={`${work.operation} ${work.ticket}`} work={work} {...row} />
           ))}
@@ -60,10 +70,15 @@ export function FloorLedger({
 }
 
 /** The cell's line: how many are in, and who was planned and is not. */
-function CellRow({ cell, timeZone }: { cell: FloorCell; timeZone: string }) {
-  const missing = cell.missing.map(
-    ({ name, plannedAt }) => `${name}, planned ${clockText(plannedAt * 1000, timeZone)}`,
-  );
+function CellRow({
+  cell,
+  timeZone,
+  forgotten,
+}: {
+  cell: FloorCell;
+  timeZone: string;
+  forgotten: Forgotten | null;
+}) {
   return (
     <tr data-group="">
       <th scope="rowgroup" colSpan={3} data-book="">
@@ -72,8 +87,23 @@ function CellRow({ cell, timeZone }: { cell: FloorCell; timeZone: string }) {
       <td aria-hidden />
       <td colSpan={2} data-day="">
         {cell.inCount} in
-        {missing.length > 0 && (
-          <span className="text-t-2 font-medium text-ink-2"> · not in: {missing.join("; ")}</span>
+        {cell.missing.length > 0 && (
+          <span className="text-t-2 font-medium text-ink-2">
+            {" · not in: "}
+            {cell.missing.map((person, place) => (
+              <Fragment key={person.worker}>
+                {place > 0 && "; "}
+                <PersonName
+                  person={person}
+                  deed="shift-start"
+                  proposedSecond={person.plannedAt}
+                  timeZone={timeZone}
+                  forgotten={forgotten}
+                />
+                , planned {clockText(person.plannedAt * 1000, timeZone)}
+              </Fragment>
+            ))}
+          </span>
         )}
       </td>
     </tr>

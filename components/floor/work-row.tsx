@@ -1,3 +1,4 @@
+import { type Forgotten, PersonName } from "@/components/floor/person-name";
 import { SeamGauge } from "@/components/seam/gauge";
 import { VerdictTag } from "@/components/seam/verdict-tag";
 import { TicketLink } from "@/components/tickets/ticket-link";
@@ -14,12 +15,14 @@ export function WorkRow({
   scaleSeconds,
   timeZone,
   linksTickets,
+  forgotten,
 }: {
   work: FloorWork;
   now: number;
   scaleSeconds: number;
   timeZone: string;
   linksTickets: boolean;
+  forgotten: Forgotten | null;
 }) {
   const { standardSeconds } = work;
   const pair = { standardSeconds, actualSeconds: actualSeconds(work, now) };
@@ -56,7 +59,13 @@ export function WorkRow({
       <td data-day="" className="desk-tall">
         {work.people.map(({ worker, name, since, activity, weights }) => (
           <span key={worker} className="block">
-            {name}
+            <PersonName
+              person={{ worker, name }}
+              deed="shift-end"
+              proposedSecond={now}
+              timeZone={timeZone}
+              forgotten={forgotten}
+            />
             <span className="text-ink-2">
               {activity === "run" ? "" : `, ${activity}`}
               {weights.length > 1 ? `, on ${weights.length} tickets` : ""}, since{" "}

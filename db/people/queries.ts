@@ -83,6 +83,19 @@ export async function findWorker(
   return worker ?? null;
 }
 
+/** Lists the numbers of the workers whose home is one of the cells. */
+export async function listNumbersOf(
+  { db, siteId }: Scope,
+  cellIds: readonly string[],
+): Promise<string[]> {
+  const rows = await db
+    .select({ number: workers.number })
+    .from(workers)
+    .where(and(eq(workers.siteId, siteId), inArray(workers.homeCellId, [...cellIds])))
+    .orderBy(asc(workers.number));
+  return rows.map(({ number }) => number);
+}
+
 /** The number that the next new worker may have: one more than the highest, from 1001. */
 export async function findNextNumber({ db, siteId }: Scope): Promise<string> {
   const [highest] = await db
