@@ -7,6 +7,7 @@ import { SeamAxis } from "@/components/seam/axis";
 import { SeamGauge } from "@/components/seam/gauge";
 import { hourWords } from "@/components/seam/verdict-tag";
 import { Columns } from "@/components/shell/columns";
+import type { FormAction } from "@/components/shell/use-answer";
 import { Icon } from "@/components/ui/icon";
 import { Head, Ledger, NumberCell, NumberHead } from "@/components/ui/table";
 import { decimalDays } from "@/lib/hours/decimal";
@@ -37,10 +38,19 @@ interface LedgerProps {
   timeZone: string;
   nowSecond: number;
   linksTickets: boolean;
+  /** Null for someone who may look and not correct. */
+  correct: FormAction<void> | null;
 }
 
 /** Workers on one scale: planned against present, and what the time was. One opens to its days. */
-export function HoursLedger({ workers, filter, timeZone, nowSecond, linksTickets }: LedgerProps) {
+export function HoursLedger({
+  workers,
+  filter,
+  timeZone,
+  nowSecond,
+  linksTickets,
+  correct,
+}: LedgerProps) {
   const scaleSeconds = seamScale(workers.map(pairOf));
   return (
     <Ledger caption="Hours by worker" className="mirror-ledger">
@@ -84,6 +94,7 @@ export function HoursLedger({ workers, filter, timeZone, nowSecond, linksTickets
                   <TapRow
                     key={line.tap.id}
                     line={line}
+                    correcting={correct && { worker: worker.worker, action: correct }}
                     timeZone={timeZone}
                     nowSecond={nowSecond}
                     linksTickets={linksTickets}

@@ -179,7 +179,10 @@ export async function listStretches(
   return found.rows;
 }
 
-/** Lists the records of one worker of the wanted in a window, as the ledger has them, by time. */
+/**
+ * Lists the records of one worker of the wanted in a window, as the ledger has them, by time: one that
+ * was entered later stands where it counts. What was last done about each goes with it.
+ */
 export async function listTaps(
   scope: Scope,
   wanted: HoursWanted,
@@ -190,21 +193,42 @@ export async function listTaps(
     select
       e.id,
       e.kind,
-      (extract(epoch from e.at) * 1000)::float8 as "atMs",
+      (extract(epoch from t.at) * 1000)::float8 as "atMs",
       (extract(epoch from e.received_at) * 1000)::float8 as "receivedMs",
       k.name as kiosk,
-      coalesce(l.name, e.by) as by,
+      coalesce(l.name, a.name, e.by) as by,
       e.kept_for as "keptFor",
+      done.corrected,
       e.body
     from people p
     join clock_events e on e.site_id = ${scope.siteId} and e.worker_id = p.id
+    cross join lateral (
+      select case when e.kind = 'insert' then coalesce(e.counts_at, e.at) else e.at end as at) t
+    left join lateral (
+      select json_build_object('kind', d.kind, 'toMs', epoch_ms(d.counts_at)) as corrected
+      from clock_events d
+      where d.site_id = e.site_id
+        and d.worker_id = e.worker_id
+        and d.kind in ('void', 'move')
+        and d.kept_for is null
+        and d.target_id = e.id
+        and not exists (
+          select from clock_events v
+          where v.site_id = d.site_id
+            and v.worker_id = d.worker_id
+            and v.kind = 'void'
+            and v.kept_for is null
+            and v.target_id = d.id)
+      order by d.at desc, d.seq desc, d.id desc
+      limit 1) done on true
     left join kiosks k on k.site_id = e.site_id and k.id = e.kiosk_id
     left join workers l on l.site_id = e.site_id and l.number = e.by
+    left join accounts a on e.by = 'account:' || a.id
     where p.number = ${worker}
       and e.received_at >= ${instant(start)}::timestamptz - interval '2 hours'
-      and e.at >= ${instant(start)}
-      and e.at < ${instant(end)}
-    order by e.at, e.seq, e.id`);
+      and t.at >= ${instant(start)}
+      and t.at < ${instant(end)}
+    order by t.at, e.seq, e.id`);
   return found.rows;
 }
 

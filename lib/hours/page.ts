@@ -125,7 +125,7 @@ function openDay(
         start,
         end: end ?? bounds.end,
         activity,
-        kind: kinds[activity],
+        kind: stripKinds[activity],
       })),
     taps: isOpen
       ? taps.map((tap) => ({ tap, began: own.filter(({ event }) => event === tap.id) }))
@@ -144,7 +144,8 @@ function cutTo(row: StretchRow, { start, end }: { start: number; end: number }):
   return [{ ...row, ...cut, seconds: isWhole ? row.seconds : null }];
 }
 
-const kinds: Record<Activity, Stretch["kind"]> = {
+/** How each sort of time is drawn on a day's strip. */
+export const stripKinds: Record<Activity, Stretch["kind"]> = {
   setup: "work",
   run: "work",
   inspect: "work",

@@ -12,7 +12,29 @@ export interface Tap {
   by: string | null;
   /** Why it is kept and not counted; null where it is booked. */
   keptFor: string | null;
+  /** What was last done about it: taken out, or moved, and to when; null where it stands as tapped. */
+  corrected: { kind: "void" | "move"; toMs: number | null } | null;
   body: Record<string, unknown>;
+}
+
+/** What may be moved or taken out: whatever says or counts what somebody did. */
+const correctable = [
+  "shift-start",
+  "shift-end",
+  "break-start",
+  "break-end",
+  "work",
+  "indirect",
+  "pause",
+  "report",
+  "inspect",
+  "hand-over",
+  "insert",
+];
+
+/** Says whether a record can be moved or taken out: it counts, and was not taken out before. */
+export function isCorrectable({ kind, keptFor, corrected }: Tap): boolean {
+  return keptFor === null && corrected?.kind !== "void" && correctable.includes(kind);
 }
 
 const plain: Record<string, string> = {
@@ -27,7 +49,6 @@ const plain: Record<string, string> = {
   settle: "settled",
   void: "taken out",
   move: "moved",
-  insert: "entered",
   release: "released",
   reading: "reading",
 };
@@ -46,6 +67,10 @@ export function tapWords({ kind, body }: Pick<Tap, "kind" | "body">): string {
     case "report":
     case "inspect":
       return `${kind === "report" && body.stop === true ? "done" : "counted"}: ${counts(body)}`;
+    case "insert":
+      return isRecord(body.event)
+        ? tapWords({ kind: text(body.event.kind), body: body.event })
+        : "entered";
     default:
       return plain[kind] ?? kind.replaceAll("-", " ");
   }
@@ -65,6 +90,10 @@ function itemsText(items: unknown): string {
   if (!first) return "nothing";
   const more = list.length > 1 ? ` and ${list.length - 1} more` : "";
   return `${showTicket(text(first.ticket))}, ${text(first.operation)}${more}`;
+}
+
+function isRecord(value: unknown): value is Record<string, unknown> {
+  return typeof value === "object" && value !== null;
 }
 
 function text(value: unknown): string {

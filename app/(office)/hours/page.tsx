@@ -2,6 +2,7 @@ import type { Metadata } from "next";
 import { hoursWanted } from "@/app/_server/hours";
 import { personFor } from "@/app/_server/page-actor";
 import { siteOf } from "@/app/_server/site";
+import { correct } from "@/app/(office)/floor/actions";
 import { HoursFigures } from "@/components/hours/hours-figures";
 import { HoursFilterSentence } from "@/components/hours/hours-filter";
 import { HoursLedger } from "@/components/hours/hours-ledger";
@@ -67,6 +68,7 @@ export default async function HoursPage({ searchParams }: HoursProps) {
             timeZone={ruleAt(site.rules, now.getTime()).timeZone}
             nowSecond={Math.floor(now.getTime() / 1000)}
             linksTickets={reachOf(person.held, "tickets.see") !== null}
+            correct={reachOf(person.held, "records.correct") !== null ? correct : null}
           />
         </>
       ) : (

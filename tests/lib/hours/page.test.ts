@@ -37,6 +37,7 @@ const tap = {
   kiosk: "Mill 1",
   by: null,
   keptFor: null,
+  corrected: null,
   body: {},
 };
 const days = [

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { tapWords } from "@/lib/hours/taps";
+import { isCorrectable, type Tap, tapWords } from "@/lib/hours/taps";
 
 const item = { ticket: "26048176", operation: "120" };
 
@@ -15,7 +15,39 @@ describe("tapWords", () => {
     ["shift-end", {}, "shift ended"],
     ["step-done", {}, "step done"],
     ["work", {}, " on nothing"],
+    ["insert", { event: { kind: "break-start", break: "rest" } }, "rest break"],
+    [
+      "insert",
+      { event: { kind: "work", activity: "run", items: [item] } },
+      "run on 26-04817-6, 120",
+    ],
+    ["insert", {}, "entered"],
   ])("says of %s %j: %s", (kind, body, words) => {
     expect(tapWords({ kind, body })).toBe(words);
   });
+});
+
+describe("isCorrectable", () => {
+  const tap: Tap = {
+    id: "a",
+    kind: "work",
+    atMs: 0,
+    receivedMs: 0,
+    kiosk: null,
+    by: null,
+    keptFor: null,
+    corrected: null,
+    body: {},
+  };
+  test("what says what somebody did, while it counts", () => {
+    expect(isCorrectable(tap)).toBe(true);
+    expect(isCorrectable({ ...tap, kind: "insert" })).toBe(true);
+    expect(isCorrectable({ ...tap, corrected: { kind: "move", toMs: 1 } })).toBe(true);
+  });
+  test.each([
+    { kind: "move" },
+    { kind: "confirm" },
+    { keptFor: "unproved" },
+    { corrected: { kind: "void" as const, toMs: null } },
+  ])("not %j", (other) => expect(isCorrectable({ ...tap, ...other })).toBe(false));
 });
