@@ -9,7 +9,9 @@ import { Purfling } from "@/components/ui/purfling";
 import { roleWords } from "@/lib/access/role-words";
 import { roomsFor } from "@/lib/access/rooms";
 import "@/app/styles/desk.css";
+import "@/app/styles/ends.css";
 import "@/app/styles/paper.css";
+import "@/app/styles/records.css";
 
 /** Draws the office around a page. It guards nothing: each page asks for its person itself. */
 export default async function OfficeLayout({ children }: { children: ReactNode }) {

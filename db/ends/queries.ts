@@ -1,5 +1,6 @@
 import { type SQL, sql } from "drizzle-orm";
 import type { Scope } from "@/db/client";
+import type { Activity } from "@/lib/hours/sheet";
 import type { EndPosition } from "@/lib/ends/schema";
 import { rankOf } from "@/lib/ends/urgency";
 import type { EventBody, LooseEndCode } from "@/lib/ledger/schema";
@@ -121,18 +122,46 @@ export interface EndFound extends EndRow {
   note: string | null;
   shift: { startMs: number; endMs: number | null; provisional: boolean } | null;
   planned: { startMs: number; endMs: number } | null;
+  /** The shift's time as it stands, epoch seconds; empty where it lies in none. */
+  stretches: { start: number; end: number | null; activity: Activity }[];
+}
+
+/** The key of one loose end. */
+export interface EndNamed {
+  code: string;
+  subject: string;
 }
 
 /** Finds one loose end, settled or not, with its record, shift and plan; null outside the reach. */
 export async function findEnd(
   scope: Scope,
-  { code, subject }: { code: string; subject: string },
+  { code, subject }: EndNamed,
   within: readonly string[] | null,
 ): Promise<EndFound | null> {
-  const { rows } = await scope.db.execute<EndFound & Record<string, unknown>>(sql`
+  return findFirst(
+    scope,
+    sql`${ends(scope, within)} and l.code = ${code} and l.subject = ${subject}`,
+  );
+}
+
+/** Finds the loose end that a list shows open: the named one while it is unsettled, else the first. */
+export async function findOpenEnd(
+  scope: Scope,
+  wanted: EndsWanted,
+  { code, subject }: EndNamed,
+): Promise<EndFound | null> {
+  return findFirst(
+    scope,
+    sql`${wantedEnds(scope, wanted)}
+      order by (l.code = ${code} and l.subject = ${subject}) desc, r.rank, l.at, l.code, l.subject
+      limit 1`,
+  );
+}
+
+async function findFirst({ db }: Scope, which: SQL): Promise<EndFound | null> {
+  const { rows } = await db.execute<EndFound & Record<string, unknown>>(sql`
     with found as (
-      select ${shown}, l.settled, l.at, l.site_id, l.worker_id
-      ${ends(scope, within)} and l.code = ${code} and l.subject = ${subject})
+      select ${shown}, l.settled, l.at, l.site_id, l.worker_id ${which})
     select f.*,
       (extract(epoch from e.received_at) * 1000)::float8 as "receivedMs",
       (extract(epoch from e.at) * 1000)::float8 as "eventMs",
@@ -142,7 +171,8 @@ export async function findEnd(
       coalesce(b.name, a.name, e.by) as by,
       n.text as note,
       s.shift,
-      p.planned
+      p.planned,
+      coalesce(t.stretches, '[]') as stretches
     from found f
     left join clock_events e on e.site_id = f.site_id and e.id = case
       when right(f.subject, 36) ~ '^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$'
@@ -151,7 +181,7 @@ export async function findEnd(
     left join workers b on b.site_id = e.site_id and b.number = e.by
     left join accounts a on e.by = 'account:' || a.id
     left join lateral (
-      select s.start_at, jsonb_build_object(
+      select s.start_at, s.end_at, jsonb_build_object(
         'startMs', epoch_ms(s.start_at), 'endMs', epoch_ms(s.end_at),
         'provisional', s.provisional) as shift
       from shifts s
@@ -160,6 +190,14 @@ export async function findEnd(
         and (s.end_at is null or s.end_at >= f.at)
       order by s.start_at desc
       limit 1) s on true
+    left join lateral (
+      select jsonb_agg(jsonb_build_object(
+        'start', extract(epoch from g.start_at)::integer,
+        'end', extract(epoch from g.end_at)::integer,
+        'activity', g.activity) order by g.start_at) as stretches
+      from segments g
+      where g.site_id = f.site_id and g.worker_id = f.worker_id and g.item = 0
+        and g.start_at >= s.start_at and g.start_at < coalesce(s.end_at, 'infinity')) t on true
     left join lateral (
       select jsonb_build_object(
         'startMs', epoch_ms(d.start_at), 'endMs', epoch_ms(d.end_at)) as planned

@@ -15,6 +15,7 @@ const rooms: readonly Room[] = [
   { name: "Tickets", path: "/tickets", may: "tickets.see", leaf: "book" },
   { name: "Kiosks", path: "/kiosks", may: "kiosks.see", leaf: "book" },
   { name: "Floor", path: "/floor", may: "floor.see", leaf: "day" },
+  { name: "Loose ends", path: "/ends", may: "ends.see", leaf: "day" },
   { name: "Hours", path: "/hours", may: "hours.see", leaf: "day" },
 ];
 
