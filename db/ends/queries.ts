@@ -1,8 +1,8 @@
 import { type SQL, sql } from "drizzle-orm";
 import type { Scope } from "@/db/client";
-import type { Activity } from "@/lib/hours/sheet";
 import type { EndPosition } from "@/lib/ends/schema";
 import { rankOf } from "@/lib/ends/urgency";
+import type { Activity } from "@/lib/hours/sheet";
 import type { EventBody, LooseEndCode } from "@/lib/ledger/schema";
 
 /** Which loose ends a list is about. */
