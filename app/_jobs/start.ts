@@ -1,5 +1,6 @@
 import "server-only";
 import { every } from "@/app/_jobs/every";
+import { retryBoxes } from "@/app/_jobs/kiosks";
 import { openPeriods } from "@/app/_jobs/periods";
 import { startJudging } from "@/app/_jobs/tickets";
 import { closeForgottenShifts } from "@/app/_jobs/timeline";
@@ -7,6 +8,7 @@ import { database } from "@/app/_server/database";
 import { clearOldTries } from "@/db/access/commands";
 import { makePartitions } from "@/db/jobs/commands";
 
+const HALF_MINUTE = 30;
 const MINUTE = 60;
 const HOUR = 3600;
 const DAY = 86_400;
@@ -28,6 +30,7 @@ function begin(): () => Promise<void> {
     startJudging(),
     every("timeline", MINUTE, closeForgottenShifts),
     every("periods", HOUR, openPeriods),
+    every("boxes", HALF_MINUTE, retryBoxes),
     every("tries", DAY, () => clearOldTries(database(), new Date())),
   ];
   return async () => {

@@ -228,6 +228,10 @@ export async function listTaps(
       and e.received_at >= ${instant(start)}::timestamptz - interval '2 hours'
       and t.at >= ${instant(start)}
       and t.at < ${instant(end)}
+      -- one that was proved later has a second row, which counts
+      and not (e.kept_for is not null and exists (
+        select from clock_events c
+        where c.site_id = ${scope.siteId} and c.id = e.id and c.kept_for is null))
     order by t.at, e.seq, e.id`);
   return found.rows;
 }

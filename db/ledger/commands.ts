@@ -1,10 +1,11 @@
 import { sql } from "drizzle-orm";
 import type { Scope } from "@/db/client";
 import { type Booking, payloadOf } from "@/db/ledger/payload";
-import { readContexts } from "@/db/ledger/queries";
+import { readContext, readContexts } from "@/db/ledger/queries";
 import { receiveRecords } from "@/db/ledger/receive";
 import { askedBy } from "@/lib/ledger/asked";
 import type { BookingContext } from "@/lib/ledger/context";
+import type { ReceivedRecord } from "@/lib/ledger/decide";
 import {
   type DecidedBooking,
   decideBooking,
@@ -99,6 +100,40 @@ function receive(batch: IncomingBatch) {
 function decide(one: Received, context: BookingContext) {
   const decided = decideBooking(one.records, context, one.batch);
   return { ...decided, context, one, kioskId: one.batch.kioskId };
+}
+
+/**
+ * Books records that were kept because nothing proved them, now that their session is proved. What is
+ * to be kept for another reason stays as it is.
+ *
+ * @returns how many were booked
+ */
+export async function bookKept(
+  scope: Scope,
+  kept: {
+    kioskId: string;
+    proved: ProvedSession;
+    records: readonly ReceivedRecord[];
+    now: Date;
+  },
+): Promise<number> {
+  const { kioskId, records } = kept;
+  const batch = {
+    kioskId,
+    receivedMs: kept.now.getTime(),
+    isRevoked: false,
+    proved: [kept.proved],
+  };
+  const asked = askedBy(records, { ...batch, benchAtMs: null });
+  const read = await readContext(scope, asked);
+  const known = read.known.filter(({ keptFor }) => keptFor !== "unproved");
+  const decided = decideBooking(records, { ...read, known }, batch);
+  const rows = decided.rows.filter(({ keptFor }) => keptFor === null);
+  if (rows.length === 0) return 0;
+  const timelines = decided.timelines.filter(({ isTouched }) => isTouched);
+  const booking = { ...decided, rows, timelines, siteId: scope.siteId, kioskId, isAgain: true };
+  if (await book(scope, booking)) return rows.length;
+  throw new Error("somebody booked for the same people: it is tried again later");
 }
 
 /** Nothing is written where nothing is new. */

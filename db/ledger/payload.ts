@@ -16,6 +16,8 @@ export interface Booking {
   actor?: string;
   /** Kept records that are answered with it. */
   answered?: readonly ReceiptEnd[];
+  /** True where its rows were kept as `unproved` before, with their notes, and are proved now. */
+  isAgain?: boolean;
 }
 
 /** A loose end of a record that was kept and not counted; instants are epoch milliseconds. */
@@ -46,7 +48,7 @@ function joined(one: Fields, other: Fields): Fields {
 }
 
 function fieldsOf(booking: Booking): Fields {
-  const { siteId, kioskId, timelines, rows } = booking;
+  const { siteId, kioskId, timelines, rows, isAgain = false } = booking;
   const site = { site_id: siteId };
   const from = <T extends object>(
     pick: (derived: Derived) => readonly T[],
@@ -61,14 +63,20 @@ function fieldsOf(booking: Booking): Fields {
       version: window.version,
       as_of: instant(derived.asOfMs),
     })),
-    events: rows.map((row) => ({ ...site, ...eventColumns(row, booking) })),
-    notes: rows.flatMap(({ id, note }) => (note === null ? [] : [{ event_id: id, text: note }])),
+    [isAgain ? "again" : "events"]: rows.map((row) => ({ ...site, ...eventColumns(row, booking) })),
+    [isAgain ? "events" : "again"]: [],
+    notes: (isAgain ? [] : rows).flatMap(({ id, note }) =>
+      note === null ? [] : [{ event_id: id, text: note }],
+    ),
     sessions: booking.sessions.map((session) => ({ ...columnsOf(session), kiosk_id: kioskId })),
     gone: {
       segments: from(({ segments }) => segments.gone),
       shifts: from(({ shifts }) => shifts.gone),
       reports: from(({ reports }) => reports.gone),
-      loose_ends: from(({ looseEnds }) => looseEnds.gone),
+      loose_ends: [
+        ...from(({ looseEnds }) => looseEnds.gone),
+        ...(isAgain ? rows.map(({ id }) => ({ code: "unproved", subject: id })) : []),
+      ],
     },
     segments: from(({ segments }) => segments.changed),
     shifts: from(({ shifts }) => shifts.changed),

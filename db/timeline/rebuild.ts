@@ -39,7 +39,11 @@ async function rebuildReceipts({ db, siteId }: Scope): Promise<number> {
         coalesce(e.at, e.received_at) as at,
         e.kept_for || ':' || e.id in (select a.key from answers a) as settled
       from clock_events e
-      where e.site_id = ${siteId} and e.kept_for is not null),
+      where e.site_id = ${siteId} and e.kept_for is not null
+        -- one that was proved later has a second row, which counts
+        and not exists (
+          select from clock_events c
+          where c.site_id = ${siteId} and c.id = e.id and c.kept_for is null)),
     gone as (
       delete from loose_ends l
       where l.site_id = ${siteId} and l.source = 'receipt'

@@ -42,14 +42,21 @@ export function placeEvent(event: ClockEvent, arrival: Arrival): Placed | null {
   const rawMs = sentMs - (offsetMs ?? 0);
   if (!isShown(atMs)) return null;
   const uncertaintyMs = Math.min(event.clock.uncertaintyMs ?? 0, UNCERTAINTY_MAX_MS);
-  const latestMs = arrival.receivedMs + uncertaintyMs + FUTURE_SLACK_MS;
   return {
     atMs,
     rawMs: isShown(rawMs) ? rawMs : atMs,
     uncertaintyMs,
     isMeasured: offsetMs !== null || isSameRun,
-    isFuture: Math.max(atMs, effectMs(event) ?? atMs) > latestMs,
+    isFuture: isAhead(event, { atMs, uncertaintyMs, receivedMs: arrival.receivedMs }),
   };
+}
+
+/** Says whether an event, or what it makes count, lies after its arrival beyond what clocks excuse. */
+export function isAhead(
+  event: EventBody,
+  { atMs, uncertaintyMs, receivedMs }: { atMs: number; uncertaintyMs: number; receivedMs: number },
+): boolean {
+  return Math.max(atMs, effectMs(event) ?? atMs) > receivedMs + uncertaintyMs + FUTURE_SLACK_MS;
 }
 
 /** An answer such as `end-at:2026-05-14T16:00:00Z` says when. */
