@@ -10,11 +10,12 @@ export interface Round {
 }
 
 /**
- * Runs a job at once, then each time so many seconds after it ended, and whenever it is nudged. What
- * it throws is logged, and it comes round again: a database that was away is back some time.
+ * Runs a job at once, then each time so many seconds after it ended, and when it is nudged: then not
+ * sooner than `restMs` after it ended, so that many nudges make one run. What it throws is logged,
+ * and it comes round again: a database that was away is back some time.
  */
-export function every(name: string, seconds: number, run: () => Promise<void>): Round {
-  const state = { isStopped: false, isNudged: false, timer: setTimeout(begin, 0) };
+export function every(name: string, seconds: number, run: () => Promise<void>, restMs = 0): Round {
+  const state = { isStopped: false, isNudged: false, endedMs: 0, timer: setTimeout(begin, 0) };
   let running: Promise<void> | null = null;
 
   function begin(): void {
@@ -25,15 +26,23 @@ export function every(name: string, seconds: number, run: () => Promise<void>): 
       .catch((error: unknown) => log().warn({ err: error, job: name }, "a job failed"))
       .finally(() => {
         running = null;
-        state.timer = setTimeout(begin, state.isNudged ? 0 : seconds * 1000);
-        state.timer.unref();
+        state.endedMs = performance.now();
+        beginIn(state.isNudged ? restMs : seconds * 1000);
       });
+  }
+
+  function beginIn(ms: number): void {
+    clearTimeout(state.timer);
+    if (state.isStopped) return;
+    state.timer = setTimeout(begin, ms);
+    state.timer.unref();
   }
 
   return {
     nudge() {
+      if (state.isNudged) return;
       state.isNudged = true;
-      begin();
+      if (!running) beginIn(Math.max(0, state.endedMs + restMs - performance.now()));
     },
     async stop() {
       state.isStopped = true;

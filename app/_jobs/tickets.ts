@@ -1,13 +1,19 @@
 import "server-only";
 import { every, type Round } from "@/app/_jobs/every";
 import { database } from "@/app/_server/database";
-import { judgeMarkedTickets } from "@/db/tickets/commands";
+import { CLAIM_MAX, judgeMarkedTickets } from "@/db/tickets/commands";
 
 const held = globalThis as typeof globalThis & { bookmatchJudge?: Round };
 
-/** Judges the tickets that bookings marked: every second, and right after a booking of this process. */
+/**
+ * Taps come faster than this on a busy floor; one run then judges all their tickets, each once, where
+ * a run for every tap would cost more than booking it.
+ */
+const REST_MS = 400;
+
+/** Judges the tickets that bookings marked: every second, and soon after a booking of this process. */
 export function startJudging(): Round {
-  held.bookmatchJudge ??= every("tickets", 1, judgeAll);
+  held.bookmatchJudge ??= every("tickets", 1, judgeAll, REST_MS);
   return held.bookmatchJudge;
 }
 
@@ -17,5 +23,6 @@ export function nudgeJudge(): void {
 }
 
 async function judgeAll(): Promise<void> {
-  while ((await judgeMarkedTickets(database())) > 0);
+  // a run that could claim no more than there were has left nothing behind
+  while ((await judgeMarkedTickets(database())) === CLAIM_MAX);
 }

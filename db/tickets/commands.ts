@@ -4,7 +4,7 @@ import { listTicketBooks } from "@/db/tickets/books";
 import { countChanges, type Judgement, judgementOf } from "@/lib/tickets/judgement";
 
 /** How many marks one transaction claims: few enough that a ticket is never locked for long. */
-const CLAIM_MAX = 100;
+export const CLAIM_MAX = 100;
 /** How many tickets a rebuild judges at a time. */
 const REBUILD_BATCH = 100;
 
