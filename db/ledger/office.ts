@@ -85,7 +85,7 @@ async function tryOnce(
         timelines.flatMap(({ window }) => window.events.map(({ id, body }) => [id, body] as const)),
       );
       const tickets = [
-        ...timelines.flatMap(({ derived }) => ticketsTouched(derived)),
+        ...timelines.flatMap(({ derived, window }) => ticketsTouched(derived, window.segments)),
         ...rows.flatMap(({ targetId }) => ticketsAbout(targetId, events)),
       ];
       if (tickets.length > 0) await judgeTickets(within, [...new Set(tickets)].sort());

@@ -1,7 +1,8 @@
 import type { LedgerRow } from "@/lib/ledger/decide";
 import type { DerivedTimeline, NewSession } from "@/lib/ledger/decide-booking";
 import { ticketsAbout } from "@/lib/ledger/target";
-import { type Derived, ticketsTouched } from "@/lib/timeline/derive";
+import { attendanceKey } from "@/lib/matching/mark-keys";
+import { type Derived, ticketsTouched, timeTouched } from "@/lib/timeline/derive";
 
 /** What a row gains so that the database can take it: instants as text, names as its columns. */
 type Fields = Record<string, unknown>;
@@ -94,7 +95,10 @@ function fieldsOf(booking: Booking): Fields {
         settled: true,
       })),
     ],
-    marks: markedTickets(booking).map((key) => ({ kind: "ticket", key })),
+    marks: [
+      ...markedTickets(booking).map((key) => ({ kind: "ticket", key })),
+      ...markedTime(booking).map((key) => ({ kind: "attendance", key })),
+    ],
     audit: rows.flatMap((row) => auditOf(row, booking)),
   };
 }
@@ -104,9 +108,17 @@ function markedTickets({ timelines, rows }: Booking): string[] {
   const events = new Map(
     timelines.flatMap(({ window }) => window.events.map(({ id, body }) => [id, body] as const)),
   );
-  const changed = timelines.flatMap(({ derived }) => ticketsTouched(derived));
+  const changed = timelines.flatMap(({ derived, window }) =>
+    ticketsTouched(derived, window.segments),
+  );
   const answered = rows.flatMap(({ targetId }) => ticketsAbout(targetId, events));
   return [...new Set([...changed, ...answered])];
+}
+
+/** Time in cells whose sums change. */
+function markedTime({ timelines }: Booking): string[] {
+  const touched = timelines.flatMap(({ derived, window }) => timeTouched(derived, window.segments));
+  return [...new Set(touched.map(attendanceKey))];
 }
 
 /** `startMs` is the column `start_at`, `cellId` the column `cell_id`. */

@@ -59,8 +59,58 @@ export function isInWindow(
   return atMs >= Math.floor(firstMs / 1000) * 1000 && atMs <= lastMs;
 }
 
-/** The tickets whose time or counts a derivation changes; each once. */
-export function ticketsTouched({ segments, reports }: Derived): string[] {
-  const rows = [...segments.gone, ...segments.changed, ...reports.gone, ...reports.changed];
+/**
+ * The tickets whose time or counts a derivation changes; each once.
+ *
+ * @param before the segments that were kept: one may be another ticket's now
+ */
+export function ticketsTouched(
+  { segments, reports }: Pick<Derived, "segments" | "reports">,
+  before: readonly SegmentRow[],
+): string[] {
+  const rows = [
+    ...segments.gone,
+    ...rowsBefore(segments, before),
+    ...segments.changed,
+    ...reports.gone,
+    ...reports.changed,
+  ];
   return [...new Set(rows.flatMap(({ ticket }) => ticket ?? []))];
+}
+
+/** What was kept of the intervals that change. */
+function rowsBefore({ changed }: Derived["segments"], before: readonly SegmentRow[]): SegmentRow[] {
+  const starts = new Set(changed.map(({ startMs }) => startMs));
+  return before.filter(({ startMs }) => starts.has(startMs));
+}
+
+/** Time in a cell whose sums a derivation changes; epoch milliseconds. */
+export interface TouchedTime {
+  startMs: number;
+  endMs: number;
+  cell: string | null;
+}
+
+/**
+ * The time whose sums by cell a derivation changes, one stretch a cell around all of it; what runs
+ * is in no sum yet.
+ *
+ * @param before the segments that were kept
+ */
+export function timeTouched(
+  { segments }: Pick<Derived, "segments">,
+  before: readonly SegmentRow[],
+): TouchedTime[] {
+  const touched = new Map<string | null, TouchedTime>();
+  const rows = [...segments.gone, ...rowsBefore(segments, before), ...segments.changed];
+  for (const { startMs, endMs, cellId: cell } of rows) {
+    if (endMs === null) continue;
+    const one = touched.get(cell);
+    touched.set(cell, {
+      startMs: Math.min(startMs, one?.startMs ?? startMs),
+      endMs: Math.max(endMs, one?.endMs ?? endMs),
+      cell,
+    });
+  }
+  return [...touched.values()];
 }

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { deriveWindow, isInWindow, ticketsTouched } from "@/lib/timeline/derive";
+import { deriveWindow, isInWindow, ticketsTouched, timeTouched } from "@/lib/timeline/derive";
 import { makeWindow } from "@/tests/make/context";
 import { eventId, makeEvent, siteRules } from "@/tests/make/events";
 
@@ -19,7 +19,7 @@ describe("deriveWindow", () => {
       ["unassigned", 3600],
       ["run", 7200],
     ]);
-    expect(ticketsTouched(derived)).toEqual(["26000017"]);
+    expect(ticketsTouched(derived, [])).toEqual(["26000017"]);
   });
 
   test("changes nothing where everything is kept already", () => {
@@ -36,7 +36,7 @@ describe("deriveWindow", () => {
     for (const change of [again.segments, again.shifts, again.reports, again.looseEnds]) {
       expect(change).toEqual({ gone: [], changed: [] });
     }
-    expect(ticketsTouched(again)).toEqual([]);
+    expect(ticketsTouched(again, kept.segments)).toEqual([]);
   });
 
   test("names what is gone", () => {
@@ -44,7 +44,28 @@ describe("deriveWindow", () => {
     const kept = { ...window, segments: before.segments.changed, events: [start, end] };
     const derived = deriveWindow(kept, [], { rules, asOfMs: 0 });
     expect(derived.segments.gone).toMatchObject([{ activity: "run" }]);
-    expect(ticketsTouched(derived)).toEqual(["26000017"]);
+    expect(ticketsTouched(derived, kept.segments)).toEqual(["26000017"]);
+  });
+
+  test("names also the ticket whose time became another's", () => {
+    const before = deriveWindow(window, [start, work, end], { rules, asOfMs: 0 });
+    const [first, run] = before.segments.changed;
+    const other = { ...run!, ticket: "26000028", cellId: "elsewhere" };
+    const kept = { ...window, segments: [first!, other], events: [start, work, end] };
+    const derived = deriveWindow(kept, [], { rules, asOfMs: 0 });
+    expect(ticketsTouched(derived, kept.segments)).toEqual(["26000028", "26000017"]);
+    const stretch = { startMs: DAY + 7 * HOUR, endMs: DAY + 9 * HOUR };
+    expect(timeTouched(derived, kept.segments)).toEqual([
+      { ...stretch, cell: "elsewhere" },
+      { ...stretch, cell: run!.cellId },
+    ]);
+  });
+
+  test("time that runs is in no sum yet", () => {
+    const running = deriveWindow(window, [start, work], { rules, asOfMs: 0 });
+    expect(timeTouched(running, [])).toEqual([
+      { startMs: DAY + 6 * HOUR, endMs: DAY + 7 * HOUR, cell: running.segments.changed[0]!.cellId },
+    ]);
   });
 
   test("is never as of a moment before the recorded one", () => {
