@@ -2,6 +2,7 @@ import "server-only";
 import { every } from "@/app/_jobs/every";
 import { retryBoxes } from "@/app/_jobs/kiosks";
 import { openPeriods } from "@/app/_jobs/periods";
+import { startSumming } from "@/app/_jobs/seam";
 import { startJudging } from "@/app/_jobs/tickets";
 import { closeForgottenShifts } from "@/app/_jobs/timeline";
 import { database } from "@/app/_server/database";
@@ -28,6 +29,7 @@ function begin(): () => Promise<void> {
   const rounds = [
     every("partitions", DAY, () => makePartitions(database(), new Date())),
     startJudging(),
+    startSumming(),
     every("timeline", MINUTE, closeForgottenShifts),
     every("periods", HOUR, openPeriods),
     every("boxes", HALF_MINUTE, retryBoxes),

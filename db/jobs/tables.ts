@@ -10,8 +10,11 @@ export const dirtyMarks = pgTable(
   {
     siteId: siteId(),
     id: bigint({ mode: "number" }).generatedAlwaysAsIdentity(),
-    kind: text({ enum: ["ticket"] }).notNull(),
-    /** For `ticket`: the ticket's number. */
+    kind: text({ enum: ["ticket", "standard", "booked", "matched", "attendance"] }).notNull(),
+    /**
+     * `ticket`: its number; `standard`: model id, first day, operation; `booked`, `matched`: day,
+     * operation; `attendance`: first and last epoch millisecond, cell id (parted by blanks).
+     */
     key: text().notNull(),
     markedAt: instantAt().notNull().defaultNow(),
   },

@@ -1,10 +1,11 @@
-import { eq, sql } from "drizzle-orm";
+import { and, eq, inArray, sql } from "drizzle-orm";
 import type { Scope } from "@/db/client";
 import { dirtyMarks } from "@/db/jobs/tables";
 import { bookEvents } from "@/db/ledger/commands";
+import { rebuildRollups, sumMarked } from "@/db/seam/commands";
 import { idOf } from "@/db/seed/factory";
 import { findSite } from "@/db/sites/queries";
-import { rebuildTickets } from "@/db/tickets/commands";
+import { judgeMarkedTickets, rebuildTickets } from "@/db/tickets/commands";
 import { closeOverdueShifts } from "@/db/timeline/commands";
 import { assert } from "@/lib/assert";
 import type { DemoEvent } from "@/lib/simulation/record";
@@ -56,8 +57,16 @@ export async function settleHistory(scope: Scope, now: Date): Promise<void> {
   assert(site !== null, "the demo has a site");
   await closeOverdueShifts(scope, site.rules, now);
   await db.execute(sql`select refresh_statistics()`);
-  await rebuildTickets(scope);
+  // what its bookings marked is done by this, each ticket and each day once
   await db.delete(dirtyMarks).where(eq(dirtyMarks.siteId, siteId));
+  await rebuildTickets(scope);
+  await rebuildRollups(scope);
+  await db
+    .delete(dirtyMarks)
+    .where(and(eq(dirtyMarks.siteId, siteId), inArray(dirtyMarks.kind, ["booked", "matched"])));
+  // tickets that changed each other's setups
+  while ((await judgeMarkedTickets(db)) > 0);
+  while ((await sumMarked(db)) > 0);
 }
 
 /** Events in the order of the weeks in which they were tapped, by author and kiosk. */

@@ -58,6 +58,10 @@ export const operations = pgTable(
     shareBy: text({ enum: ["standard", "equal"] })
       .notNull()
       .default("standard"),
+    /** When its setup is earned (CALCULATIONS.md 3): one setup may serve several lots. */
+    setupEarned: text({ enum: ["first-good", "when-booked"] })
+      .notNull()
+      .default("first-good"),
     hazards: text().array().notNull().default(sql`'{}'::text[]`),
   },
   (t) => [
@@ -66,6 +70,7 @@ export const operations = pgTable(
     foreignKey({ columns: [t.siteId, t.cellId], foreignColumns: [cells.siteId, cells.id] }),
     index().on(t.siteId, t.cellId),
     check("operations_share_by", sql`${t.shareBy} in ('standard', 'equal')`),
+    check("operations_setup_earned", sql`${t.setupEarned} in ('first-good', 'when-booked')`),
   ],
 );
 

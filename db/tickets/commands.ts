@@ -1,5 +1,6 @@
 import { sql } from "drizzle-orm";
 import type { Db, Scope } from "@/db/client";
+import { keepParts } from "@/db/seam/keep-parts";
 import { listTicketBooks } from "@/db/tickets/books";
 import { countChanges, type Judgement, judgementOf } from "@/lib/tickets/judgement";
 
@@ -77,7 +78,7 @@ export async function judgeTickets(scope: Scope, numbers: readonly string[]): Pr
   if (changes > 0) {
     await db.execute(sql`select keep_judgement(${siteId}, ${payloadOf(judged)}::jsonb)`);
   }
-  return changes;
+  return changes + (await keepParts(scope, books));
 }
 
 function payloadOf(judged: readonly { ticket: string; judgement: Judgement }[]): string {

@@ -1,23 +1,29 @@
 import { sql } from "drizzle-orm";
 import type { Scope } from "@/db/client";
-import { rebuildTickets } from "@/db/tickets/commands";
+import { rebuildRollups, sumMarked } from "@/db/seam/commands";
+import { judgeMarkedTickets, rebuildTickets } from "@/db/tickets/commands";
 import { rebuildTimelines } from "@/db/timeline/commands";
 
 /** How many rows a rebuild put right: all 0 on a sound database. */
 export interface Rebuilt {
   timelines: number;
   tickets: number;
+  rollups: number;
   receipts: number;
 }
 
 /**
  * Makes everything that follows from the ledger again: timelines, then the tickets judged from them,
- * and what was kept without being counted. It must change nothing; what it changes was spoilt.
+ * the sums of days, and what was kept without being counted. It must change nothing; what it changes
+ * was spoilt. What the background has still to do is done first: that is late, not wrong.
  */
 export async function rebuild(scope: Scope): Promise<Rebuilt> {
+  while ((await judgeMarkedTickets(scope.db)) > 0);
+  while ((await sumMarked(scope.db)) > 0);
   const timelines = await rebuildTimelines(scope);
   const tickets = await rebuildTickets(scope);
-  return { timelines, tickets, receipts: await rebuildReceipts(scope) };
+  const rollups = await rebuildRollups(scope);
+  return { timelines, tickets, rollups, receipts: await rebuildReceipts(scope) };
 }
 
 /**

@@ -76,7 +76,7 @@ describe("bookDeed", () => {
           action: "records.insert",
         },
       ]);
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, rollups: 0, receipts: 0 });
     });
   });
 
@@ -94,7 +94,7 @@ describe("bookDeed", () => {
       expect(await stands()).toEqual([{ state: "finished", good: 1 }]);
       await bookDeed(scope, deed({ kind: "void", event: events[2]!.id }));
       expect(await stands()).toEqual([{ state: "working", good: 0 }]);
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, rollups: 0, receipts: 0 });
     });
   });
 
@@ -178,6 +178,6 @@ describe("two people at once", () => {
       sql`select kind from clock_events where site_id = ${factory.siteId} and kind = 'settle'`,
     );
     expect(rows).toHaveLength(1);
-    expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+    expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, rollups: 0, receipts: 0 });
   });
 });

@@ -5,6 +5,7 @@ import { dirtyMarks } from "@/db/jobs/tables";
 import { kiosks } from "@/db/kiosks/tables";
 import { clockEvents } from "@/db/ledger/tables";
 import { workers } from "@/db/people/tables";
+import { rebuildRollups } from "@/db/seam/commands";
 import { loadDemo } from "@/db/seed/load";
 import { DEMO_SITE_ID, demoSignIns, findDemoSignIns } from "@/db/seed/sign-ins";
 import { foundSite } from "@/db/sites/found";
@@ -88,6 +89,7 @@ describe("loadDemo", () => {
     const scope = { db: own.db, siteId: DEMO_SITE_ID };
     expect(await rebuildTimelines(scope)).toBe(0);
     expect(await rebuildTickets(scope)).toBe(0);
+    expect(await rebuildRollups(scope)).toBe(0);
     expect(await own.db.$count(dirtyMarks)).toBe(0);
   });
 

@@ -39,7 +39,7 @@ describe("closeOverdueShifts", () => {
         sql`select code from loose_ends where site_id = ${scope.siteId}`,
       );
       expect(rows).toEqual([{ code: "no-shift-end" }]);
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, rollups: 0, receipts: 0 });
       expect(await close("2026-05-15T20:00:00")).toBe(0);
     });
   });
@@ -53,7 +53,7 @@ describe("bookEvents", () => {
       const receivedAt = at("2026-05-16T06:00:00");
       await bookEvents(scope, { kioskId: kiosk.kioskId, events: [late], receivedAt });
       expect(await listOpenShifts(scope)).toEqual([]);
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, rollups: 0, receipts: 0 });
     });
   });
 
