@@ -20,6 +20,8 @@ interface UnderWay {
   /** Seconds to wait; 0 where it got its place. */
   reserved: Promise<number>;
   ended: Promise<unknown>;
+  /** The tries that were under way at any time while it asked: they may hold its place. */
+  beside: Set<UnderWay>;
 }
 /** By each thing that they count against. */
 const underWay = new Map<string, Set<UnderWay>>();
@@ -35,15 +37,16 @@ export type Tried = { isRight: boolean } | { waitSeconds: number };
 export async function tryPin(db: Db, one: PinTry, proves: () => Promise<boolean>): Promise<Tried> {
   const keys = Object.values(keysOf(one));
   for (;;) {
-    const others = keys.flatMap((key) => [...(underWay.get(key) ?? [])]);
     const reserved = reservePinTry(db, one);
-    const tried = reserved.then((waitSeconds) => (waitSeconds ? null : check(db, one, proves)));
-    const isRight = await whileUnderWay(keys, { reserved, ended: tried }, tried);
+    const ended = reserved.then((waitSeconds) => (waitSeconds ? null : check(db, one, proves)));
+    const attempt = { reserved, ended, beside: new Set<UnderWay>() };
+    const isRight = await whileUnderWay(keys, attempt, ended);
     if (isRight !== null) return { isRight };
-    const waits = await Promise.all(others.map((other) => other.reserved.catch(() => 1)));
-    const checking = others.filter((_, at) => waits[at] === 0);
+    const beside = [...attempt.beside];
+    const waits = await Promise.all(beside.map((other) => other.reserved.catch(() => 1)));
+    const checking = beside.filter((_, at) => waits[at] === 0);
     if (checking.length === 0) return { waitSeconds: await reserved };
-    await Promise.race(checking.map(({ ended }) => ended.catch(() => null)));
+    await Promise.race(checking.map((other) => other.ended.catch(() => null)));
   }
 }
 
@@ -58,7 +61,14 @@ async function whileUnderWay<T>(
   attempt: UnderWay,
   answer: Promise<T>,
 ): Promise<T> {
-  for (const key of keys) underWay.set(key, (underWay.get(key) ?? new Set()).add(attempt));
+  for (const key of keys) {
+    const others = underWay.get(key) ?? new Set();
+    for (const other of others) {
+      other.beside.add(attempt);
+      attempt.beside.add(other);
+    }
+    underWay.set(key, others.add(attempt));
+  }
   try {
     return await answer;
   } finally {
