@@ -2,19 +2,23 @@ import "server-only";
 import type { KioskActor, WorkerActor } from "@/app/_server/actor";
 import { bearerOf } from "@/app/_server/bearer";
 import { database } from "@/app/_server/database";
+import { inGroups } from "@/app/_server/in-groups";
 import { hashSecret } from "@/app/_server/secret";
 import { listRolesOfWorker } from "@/db/access/queries";
-import { findKioskByToken, findKioskSession } from "@/db/kiosks/queries";
+import { findKioskSession, findKiosksByToken } from "@/db/kiosks/queries";
 import { isSessionOver } from "@/lib/kiosks/session";
 import { no, ok, type Result } from "@/lib/result";
 
 /** The device cookie that enrolment sets. */
 export const KIOSK_COOKIE = "bookmatch_kiosk";
 
+/** Every hand-in asks this first; those of many tablets are asked together. */
+const kioskOfToken = inGroups((hashes) => findKiosksByToken(database(), hashes));
+
 /** Finds the kiosk of a request by its device cookie; a revoked one is found too. */
 export async function kioskOf(request: Request): Promise<Result<KioskActor>> {
   const token = kioskTokenOf(request);
-  const kiosk = token ? await findKioskByToken(database(), hashSecret(token)) : null;
+  const kiosk = token ? await kioskOfToken(hashSecret(token)) : null;
   if (!kiosk) return no("unauthenticated", "This tablet is not enrolled. Ask an admin for a code.");
   return ok({ kind: "kiosk", ...kiosk });
 }

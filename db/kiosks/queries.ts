@@ -3,14 +3,18 @@ import type { Db, Scope } from "@/db/client";
 import { kioskSessions, kiosks } from "@/db/kiosks/tables";
 import { workers } from "@/db/people/tables";
 
-/** Finds the kiosk of a device cookie by the cookie's SHA-256; revoked ones too. */
-export async function findKioskByToken(db: Db, tokenHash: string) {
-  const [kiosk] = await db
-    .select({ siteId: kiosks.siteId, kioskId: kiosks.id, revokedAt: kiosks.revokedAt })
+/** Finds the kiosks of device cookies by the cookies' SHA-256, in a map by it; revoked ones too. */
+export async function findKiosksByToken(db: Db, tokenHashes: readonly string[]) {
+  const rows = await db
+    .select({
+      tokenHash: kiosks.tokenHash,
+      siteId: kiosks.siteId,
+      kioskId: kiosks.id,
+      revokedAt: kiosks.revokedAt,
+    })
     .from(kiosks)
-    .where(eq(kiosks.tokenHash, tokenHash))
-    .limit(1);
-  return kiosk ?? null;
+    .where(sql`${kiosks.tokenHash} = any (${sql.param(tokenHashes)}::text[])`);
+  return new Map(rows.map(({ tokenHash, ...kiosk }) => [tokenHash, kiosk]));
 }
 
 /**
