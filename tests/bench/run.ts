@@ -1,3 +1,4 @@
+import { cpus, loadavg, totalmem } from "node:os";
 import { openPool, wrap } from "@/db/client";
 import { fire, type Run } from "@/tests/bench/drive";
 import { FOLDER, given, onClone, onServer, STATE } from "@/tests/bench/ground";
@@ -9,8 +10,12 @@ import { APP, ask, cloneDatabase, OWNER, urlFor } from "@/tests/setup/clone";
 import { makeTemplate } from "@/tests/setup/template";
 
 const server = given("BENCH_SERVER");
+const loadBefore = loadavg();
 const BATCHES = 200;
 const SIGN_INS = 400;
+/** As many taps, as many a second, as a large floor makes in its busiest minute. */
+const STEADY = 1500;
+const STEADY_RATE = 50;
 /** People whose taps warm the server up; the others' are measured. */
 const WARM_UP = 200;
 
@@ -19,13 +24,16 @@ const warm = state.workers.slice(0, WARM_UP);
 const people = state.workers.slice(WARM_UP);
 
 say("one event a request, beside an empty route");
-const { single, empty } = await onServer(async (url) => {
-  await fire(url, empties(1000), 404);
-  const floor = await fire(url, empties(6000), 404);
+const { single, empty, steady } = await onServer(async (url) => {
+  await fire(url, empties(1000), { status: 401 });
+  const floor = await fire(url, empties(6000), { status: 401 });
   await fire(url, singles(state, warm));
-  return { empty: floor, single: await fire(url, singles(state, people)) };
+  const [calm, busy] = [people.slice(0, STEADY), people.slice(STEADY)];
+  const paced = await fire(url, singles(state, calm), { rate: STEADY_RATE });
+  return { empty: floor, steady: paced, single: await fire(url, singles(state, busy)) };
 });
 tell(empty);
+tell(steady);
 tell(single);
 say("batches");
 const batched = await onServer(async (url) => {
@@ -43,7 +51,20 @@ const signedIn = await onServer(async (url) => {
 tell(signedIn);
 say("the same statements through pgbench");
 const replayed = await onClone(replayBookings);
-process.stdout.write(`\n${reportOf({ empty, single, batched, signedIn, replayed })}`);
+const measured = { empty, single, steady, batched, signedIn, replayed };
+process.stdout.write(`\n${await machine()}\n${reportOf(measured)}`);
+
+/** What it was measured on, and how busy that was with other things as well. */
+async function machine(): Promise<string> {
+  const [{ model } = { model: "unknown" }, ...others] = cpus();
+  const { rows } = await ask(server, "select current_setting('server_version') as version");
+  const gigabytes = (totalmem() / 2 ** 30).toFixed(1);
+  const load = [loadBefore, loadavg()].map(([minute = 0]) => minute.toFixed(1)).join(" to ");
+  return [
+    `${others.length + 1} × ${model}, ${gigabytes} GB; load ${load} from first to last`,
+    `Node.js ${process.version}, PostgreSQL ${rows[0]?.version}`,
+  ].join("\n");
+}
 
 /** Deals people out so that neighbours come from different tablets: `step` people share one. */
 function turns<T>(all: readonly T[], step: number): T[][] {
