@@ -49,7 +49,7 @@ async function install() {
     ...(findPrograms() ? [] : ["postgresql"]),
     ...(existsSync("/usr/bin/chromium") ? [] : ["chromium"]),
   ];
-  if (packages.length > 0) await installPackages(packages, "install them by hand.");
+  if (packages.length > 0) await installPackages(packages);
   await installModules();
   return none;
 }
