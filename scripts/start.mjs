@@ -19,8 +19,8 @@ import { localAddress } from "./ground/server.mjs";
 import { serve } from "./ground/supervise.mjs";
 
 const REACHABLE =
-  "Others on the network can reach it, by plain http: put TLS in front (README), and do not leave\n" +
-  "the demo sign-ins open to people who should not have them.";
+  "Others on the network can reach it, by plain http: put TLS in front (README), and leave demo\n" +
+  "sign-ins open to nobody who should not have them.";
 
 /** `npm start`: from a fresh clone to a served Bookmatch, and from there to the next Ctrl-C. */
 await main(async () => {

@@ -18,10 +18,22 @@ export async function command(work: () => Promise<void>): Promise<void> {
   try {
     await work();
   } catch (error) {
-    if (!(error instanceof Refusal)) throw error;
-    say(error.message);
+    const reason = error instanceof Refusal ? error.message : whyNoDatabase(error);
+    if (!reason) throw error;
+    say(reason);
     process.exitCode = 1;
   }
+}
+
+/** PostgreSQL's and the network's codes for: wrong password, no such login, no such database, … */
+const NO_WAY_IN =
+  /^(28P01|28000|3D000|57P03|ECONNREFUSED|ENOTFOUND|EAI_AGAIN|E[A-Z]+UNREACH|ETIMEDOUT)$/;
+
+/** Says in plain words why a database server was not reached; null for any other fault. */
+export function whyNoDatabase(error: unknown): string | null {
+  if (!(error instanceof Error) || !("code" in error)) return null;
+  if (!NO_WAY_IN.test(String(error.code))) return null;
+  return `The database server cannot be used: ${error.message || String(error.code)}. If it is one of your own, look at DATABASE_URL.`;
 }
 
 /** Reads the command's options; what it does not know is refused with how to call it. */

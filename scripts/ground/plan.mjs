@@ -26,8 +26,10 @@ export async function chooseAddress() {
     throw new Stop(`PORT is "${asked}": give a number from 1 to 65535.`);
   if (await isFree(port, host)) return { host, port };
   if (asked)
-    throw new Stop(`Port ${port} on ${host} cannot be listened on: another program has it, or it
-may not be yours to use. Choose another with PORT, or stop that program.`);
+    throw new Stop(
+      `Port ${port} on ${host} cannot be listened on: another program has it, it may not be\n` +
+        "yours to use, or this machine has no such address. Choose others with PORT and HOST.",
+    );
   for (let other = port + 1; other < port + 100; other += 1) {
     if (!(await isFree(other, host))) continue;
     say(`Another program has port ${port}: using ${other}. PORT chooses one.`);
