@@ -38,8 +38,7 @@ export const test = base.extend<Fixtures, { closing: undefined }>({
     await use(current.installation);
   },
   baseURL: async ({ bookmatch }, use) => use(bookmatch.url),
-  signIns: async ({ bookmatch }, use) =>
-    use(JSON.parse(await bookmatch.command("demo.ts", "--json")) as SignIns),
+  signIns: async ({ bookmatch }, use) => use(await bookmatch.signIns()),
   withCamera: async ({ bookmatch, viewport }, use, info) => {
     const opened: BrowserContext[] = [];
     await use(async (shots) => {

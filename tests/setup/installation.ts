@@ -6,8 +6,9 @@ import { localAddress, startServer, tailOf, waitForHealth } from "@/scripts/grou
 import { APP, ask, cloneDatabase, OWNER, urlFor } from "@/tests/setup/clone";
 
 const HOST = "127.0.0.1";
-/** Tests' servers listen from here on: out of the way of the clusters. */
+/** Tests' servers listen from here on, each worker's on ports of its own. */
 const FIRST_PORT = 28_000;
+const PORTS_A_WORKER = 100;
 
 /** The demo sign-ins, as `npm run demo -- --json` prints them. */
 export interface SignIns {
@@ -24,7 +25,8 @@ export async function openInstallation(name: string) {
   const server = given("BOOKMATCH_TEST_SERVER");
   await ask(server, `drop database if exists ${name} with (force)`);
   await cloneDatabase(server, given("BOOKMATCH_SEEDED"), name);
-  const port = await freePortFrom(FIRST_PORT);
+  const worker = Number(process.env.TEST_PARALLEL_INDEX ?? 0);
+  const port = await freePortFrom(FIRST_PORT + worker * PORTS_A_WORKER);
   const url = localAddress(HOST, port);
   const logFile = path.join(root, `.test/${name}.log`);
   const env = environment(server, name);
@@ -39,8 +41,19 @@ export async function openInstallation(name: string) {
     running = null;
   };
   await start();
+  /** Runs a command of `scripts/`, as `npm run` does, and gives its answer. */
+  const command = async (script: string, ...args: string[]) =>
+    (await runScript(script, args, env, { talk: true })).text.trim();
+  let signIns: Promise<SignIns> | null = null;
+  const askSignIns = async () => JSON.parse(await command("demo.ts", "--json")) as SignIns;
   return {
     url,
+    command,
+    /** Asked for once: the demo's sign-ins are made when it is loaded. */
+    signIns: () => {
+      signIns ??= askSignIns();
+      return signIns;
+    },
     /** The database as the app, and as its owner. */
     databaseUrl: env.DATABASE_URL,
     ownerUrl: env.DATABASE_OWNER_URL,
@@ -52,9 +65,6 @@ export async function openInstallation(name: string) {
       await running?.ended;
       running = null;
     },
-    /** Runs a command of `scripts/`, as `npm run` does, and gives its answer. */
-    command: async (script: string, ...args: string[]) =>
-      (await runScript(script, args, env, { talk: true })).text.trim(),
     close: async () => {
       await stop();
       await ask(server, `drop database ${name} with (force)`);
