@@ -8,12 +8,13 @@ import { ask } from "@/kiosk/server";
 import { sealedSessions } from "@/kiosk/sessions";
 import { openStore } from "@/kiosk/store";
 import type { World } from "@/kiosk/world";
+import { firstState } from "@/lib/bench/first-state";
 import type { KioskState } from "@/lib/bench/schema";
 import { stayOf } from "@/lib/bench/time-out";
 import { benchView } from "@/lib/bench/view";
 import { eventResults } from "@/lib/kiosks/schema";
 import type { Input } from "@/lib/taps/inputs";
-import { firstState, step } from "@/lib/taps/step";
+import { step } from "@/lib/taps/step";
 
 /** The seams of a running kiosk: the browser's own, or a test's. */
 export interface MachineParts {

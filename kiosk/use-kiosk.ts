@@ -2,10 +2,10 @@
 
 import { useCallback, useEffect, useState, useSyncExternalStore } from "react";
 import { v7 } from "uuid";
-import { type Machine, runKiosk } from "@/kiosk/machine";
+import type { Machine, MachineParts } from "@/kiosk/machine";
+import { firstState } from "@/lib/bench/first-state";
 import type { KioskState } from "@/lib/bench/schema";
 import type { Input } from "@/lib/taps/inputs";
-import { firstState } from "@/lib/taps/step";
 
 /** Runs the kiosk for as long as the page is open, and draws the screen anew when it changes. */
 export function useKiosk(): { state: KioskState; send: (input: Input) => void } {
@@ -13,7 +13,7 @@ export function useKiosk(): { state: KioskState; send: (input: Input) => void } 
   useEffect(() => {
     let isGone = false;
     let running: Machine | undefined;
-    void runKiosk({
+    void startKiosk({
       fetcher: (...asked) => fetch(...asked),
       clocks: { wallMs: () => Date.now(), monotonicMs: () => performance.now() },
       newId: () => v7(),
@@ -52,4 +52,10 @@ export function useKiosk(): { state: KioskState; send: (input: Input) => void } 
     };
   }, [machine]);
   return { state, send };
+}
+
+/** The machine and all that it reads by are a script of their own: the first paint needs neither. */
+async function startKiosk(parts: MachineParts): Promise<Machine> {
+  const { runKiosk } = await import("@/kiosk/machine");
+  return runKiosk(parts);
 }

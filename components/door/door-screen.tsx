@@ -7,7 +7,7 @@ import { Keypad } from "@/components/ui/keypad";
 import { Board, Plate } from "@/components/ui/plate";
 import { Slots } from "@/components/ui/slots";
 import type { Screen } from "@/lib/bench/schema";
-import type { Language } from "@/lib/kiosks/schema";
+import type { Language } from "@/lib/kiosks/languages";
 
 /** Each language is named in itself, so that everyone finds their own. */
 const languages: readonly { language: Language; name: string }[] = [

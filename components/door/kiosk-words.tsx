@@ -4,7 +4,7 @@ import { type ReactNode, useEffect, useState } from "react";
 import { IntlProvider } from "use-intl";
 import { spokenLanguage } from "@/lib/bench/language";
 import type { KioskState } from "@/lib/bench/schema";
-import type { Language } from "@/lib/kiosks/schema";
+import type { Language } from "@/lib/kiosks/languages";
 import { en } from "@/lib/messages/en";
 import { loadMessages } from "@/lib/messages/load";
 import type { Messages } from "@/lib/messages/schema";

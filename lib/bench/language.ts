@@ -1,5 +1,5 @@
 import type { KioskState } from "@/lib/bench/schema";
-import { type Language, language } from "@/lib/kiosks/schema";
+import { type Language, languageOf } from "@/lib/kiosks/languages";
 
 /**
  * The language of the screen: the one chosen at the door, else the worker's own, else the site's,
@@ -11,6 +11,5 @@ export function spokenLanguage(state: KioskState): Language {
   const person = state.cell?.people.find((each) => each.worker === worker);
   const own = worker ? (state.sessions[worker]?.language ?? person?.language) : undefined;
   const wanted = [state.language, own, state.device?.site.locale];
-  const known = wanted.map((each) => language.safeParse(each?.slice(0, 2)).data);
-  return known.find((each) => each !== undefined) ?? "en";
+  return wanted.map(languageOf).find((each) => each !== null) ?? "en";
 }

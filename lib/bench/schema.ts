@@ -1,11 +1,5 @@
-import type {
-  Bench,
-  Enrolled,
-  KioskCell,
-  KioskTicket,
-  Language,
-  Obstacle,
-} from "@/lib/kiosks/schema";
+import type { Language } from "@/lib/kiosks/languages";
+import type { Bench, Enrolled, KioskCell, KioskTicket, Obstacle } from "@/lib/kiosks/schema";
 import type { Activity, ClockEvent } from "@/lib/ledger/schema";
 
 /** What this browser is at the site, since it was enrolled. */

@@ -1,6 +1,6 @@
 import type { CellName } from "@/lib/demo/cells";
 import { type Random, randomFrom } from "@/lib/demo/random";
-import type { Language } from "@/lib/kiosks/schema";
+import type { Language } from "@/lib/kiosks/languages";
 import { drawPin } from "@/lib/people/pin";
 
 /** Which shifts someone works; `lib/demo/shifts` has the hours. */

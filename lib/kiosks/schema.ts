@@ -1,10 +1,10 @@
 import { z } from "zod";
 import { role } from "@/lib/access/roles";
+import { languages } from "@/lib/kiosks/languages";
 import { activity, instant, looseEndCode, verdict, workerNumber } from "@/lib/ledger/schema";
 
-/** The languages in which a kiosk speaks; `lib/messages` has one catalogue each. */
-export const language = z.enum(["en", "es"]);
-export type Language = z.infer<typeof language>;
+/** One of the languages in which a kiosk speaks. */
+export const language = z.enum(languages);
 
 const seconds = z.number().int().min(0);
 

@@ -1,4 +1,4 @@
-import type { Language } from "@/lib/kiosks/schema";
+import type { Language } from "@/lib/kiosks/languages";
 import type { Messages } from "@/lib/messages/schema";
 
 /** Loads every language of the kiosk; each is a file of its own, fetched after the first screen. */

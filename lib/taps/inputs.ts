@@ -7,7 +7,8 @@ import type {
   KioskState,
   Link,
 } from "@/lib/bench/schema";
-import type { Bench, KioskCell, KioskTicket, Language } from "@/lib/kiosks/schema";
+import type { Language } from "@/lib/kiosks/languages";
+import type { Bench, KioskCell, KioskTicket } from "@/lib/kiosks/schema";
 import type { ClockEvent, EventBody } from "@/lib/ledger/schema";
 
 /** What happens: the world's answers, time, and taps. */

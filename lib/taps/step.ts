@@ -36,26 +36,6 @@ import type { Input, Step, Tap } from "@/lib/taps/inputs";
 import { type Look, refuse, show, still, toDoor } from "@/lib/taps/moves";
 import { atCause, atCount, atPickItem, atScrap } from "@/lib/taps/report";
 
-/** A kiosk before it knows anything. */
-export const firstState: KioskState = {
-  nowMs: 0,
-  touchedMs: 0,
-  screen: { at: "loading" },
-  device: null,
-  cell: null,
-  tickets: {},
-  language: null,
-  link: { is: "connected", sinceMs: 0 },
-  pending: [],
-  sessions: {},
-  benches: {},
-  visit: null,
-  saving: null,
-  notKept: false,
-  finding: null,
-  undo: null,
-};
-
 /**
  * What becomes of the kiosk when something happens at an instant: the next state, and what is to be
  * done in the world. Pure: `look` folds a worker's records into a bench. While an act is being

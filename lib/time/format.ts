@@ -1,7 +1,6 @@
-import { Temporal } from "temporal-polyfill";
 import { assert } from "@/lib/assert";
 import { sum } from "@/lib/sum";
-import { wallClock } from "@/lib/time/zone";
+import { correctedOffset, writtenOffsetMs } from "@/lib/time/corrections";
 
 /** A hundredth of an hour. */
 const HUNDREDTH_SECONDS = 36;
@@ -73,12 +72,27 @@ export function hoursAndMinutes(seconds: number): string {
 
 /** Local time on a 24-hour clock, "09:05"; seconds are cut off, not rounded. */
 export function clockText(atMs: number, zone: string): string {
-  return wallClock(atMs, zone).toPlainTime().toString({ smallestUnit: "minute" });
+  return clockSecondText(atMs, zone).slice(0, -":00".length);
 }
 
 /** Local time to the second on a 24-hour clock, "09:05:09". */
 export function clockSecondText(atMs: number, zone: string): string {
-  return wallClock(atMs, zone).toPlainTime().toString({ smallestUnit: "second" });
+  const offset = correctedOffset(atMs, zone);
+  if (offset !== null) return clockIn("UTC").format(atMs + writtenOffsetMs(offset));
+  return clockIn(zone).format(atMs);
+}
+
+/** A kiosk writes its clock every second, and making a formatter costs more than using one. */
+const clocks = new Map<string, Intl.DateTimeFormat>();
+
+function clockIn(timeZone: string): Intl.DateTimeFormat {
+  const kept = clocks.get(timeZone);
+  if (kept) return kept;
+  const pair = "2-digit";
+  const parts = { hour: pair, minute: pair, second: pair, hourCycle: "h23", timeZone } as const;
+  const made = new Intl.DateTimeFormat("en-GB", parts);
+  clocks.set(timeZone, made);
+  return made;
 }
 
 /** An exact length, "7:05:09": hours, minutes and seconds. */
@@ -90,7 +104,7 @@ export function secondsText(seconds: number): string {
 
 /** A date as the desk writes it, "Thu 14 May", with the language's own words in that order. */
 export function dayText(date: string, language: string): string {
-  const atMs = Temporal.PlainDate.from(date).toZonedDateTime("UTC").epochMilliseconds;
+  const atMs = Date.parse(date); // a date alone is read as UTC (ECMA-262)
   const parts: Intl.DateTimeFormatOptions[] = [
     { weekday: "short" },
     { day: "numeric" },

@@ -1,30 +1,5 @@
 import { Temporal } from "temporal-polyfill";
-
-/**
- * Rules that are younger than the zone data of a run-time may be: from `fromMs` on the zone keeps
- * one offset. Where the run-time's data is newer, the answer is the same, so an entry does no harm.
- * Source: tz database 2026b (British Columbia) and 2026c (Alberta, Morocco).
- */
-export const zoneCorrections = [
-  {
-    zones: ["America/Vancouver", "Canada/Pacific"],
-    fromMs: Date.parse("2026-11-01T09:00:00Z"),
-    offset: "-07:00",
-    release: "2026b",
-  },
-  {
-    zones: ["America/Edmonton", "America/Yellowknife", "Canada/Mountain"],
-    fromMs: Date.parse("2026-11-01T08:00:00Z"),
-    offset: "-06:00",
-    release: "2026c",
-  },
-  {
-    zones: ["Africa/Casablanca", "Africa/El_Aaiun"],
-    fromMs: Date.parse("2026-09-20T01:00:00Z"),
-    offset: "+00:00",
-    release: "2026c",
-  },
-] as const;
+import { correctedOffset } from "@/lib/time/corrections";
 
 /** Says whether the text names a zone of the IANA database that this run-time knows. */
 export function isTimeZone(text: string): boolean {
@@ -68,9 +43,5 @@ export function utcMs(local: Temporal.PlainDateTime): number {
 
 /** The zone itself, or the fixed offset that a correction puts in its place at that instant. */
 function zoneAt(atMs: number, zone: string): string {
-  const name = zone.toLowerCase(); // zone names are the same in any case
-  const correction = zoneCorrections.find(
-    ({ zones, fromMs }) => atMs >= fromMs && zones.some((one) => one.toLowerCase() === name),
-  );
-  return correction?.offset ?? zone;
+  return correctedOffset(atMs, zone) ?? zone;
 }

@@ -1,10 +1,11 @@
+import { firstState } from "@/lib/bench/first-state";
 import type { BenchSession, Device, KioskState } from "@/lib/bench/schema";
 import { benchView } from "@/lib/bench/view";
 import { checkDigit } from "@/lib/codes/damm";
 import type { Bench, KioskCell, KioskTicket, TicketOperation } from "@/lib/kiosks/schema";
 import type { ClockEvent, EventBody } from "@/lib/ledger/schema";
 import type { Effect, Input } from "@/lib/taps/inputs";
-import { firstState, step } from "@/lib/taps/step";
+import { step } from "@/lib/taps/step";
 
 /** 14 May 2026, 06:52 in Chicago: shortly before the early shift. */
 const MORNING_MS = Date.UTC(2026, 4, 14, 11, 52);

@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
+import { firstState } from "@/lib/bench/first-state";
 import { benchView } from "@/lib/bench/view";
-import { firstState, step } from "@/lib/taps/step";
+import { step } from "@/lib/taps/step";
 import { cell, device, HERON, NIA, sessionOf, TestKiosk, WREN } from "@/tests/make/bench";
 
 describe("step", () => {

@@ -2,6 +2,7 @@ import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { sum } from "@/lib/sum";
 import { clockText, dayText, decimalHour, decimalHours, hoursAndMinutes } from "@/lib/time/format";
+import { wallClock } from "@/lib/time/zone";
 
 describe("decimalHours", () => {
   // "Sum in minutes or seconds, round once": tests/checks/work-measurement.json, common practice
@@ -71,6 +72,21 @@ describe("clockText", () => {
   test("is local, on 24 hours, with the seconds cut off", () => {
     expect(clockText(Date.parse("2026-06-09T11:05:59.999Z"), "America/New_York")).toBe("07:05");
     expect(clockText(Date.parse("2026-06-10T04:00:00Z"), "America/New_York")).toBe("00:00");
+  });
+  test("keeps a zone's correction from its day on", () => {
+    const winter = (year: number) => Date.parse(`${year}-01-15T20:30:00Z`);
+    expect(clockText(winter(2026), "America/Vancouver")).toBe("12:30");
+    expect(clockText(winter(2027), "America/Vancouver")).toBe("13:30");
+  });
+  test("for any instant it shows the hour and minute of the wall clock", () => {
+    const zones = ["America/New_York", "Asia/Kathmandu", "Europe/London", "Africa/Casablanca"];
+    const instants = fc.integer({ min: 0, max: Date.UTC(2100, 0, 1) });
+    fc.assert(
+      fc.property(instants, fc.constantFrom(...zones), (atMs, zone) => {
+        const shown = wallClock(atMs, zone).toPlainTime().toString({ smallestUnit: "minute" });
+        expect(clockText(atMs, zone)).toBe(shown);
+      }),
+    );
   });
 });
 

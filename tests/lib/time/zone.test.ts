@@ -1,12 +1,6 @@
 import { describe, expect, test } from "vitest";
-import {
-  isTimeZone,
-  offsetMs,
-  utcMs,
-  wallClock,
-  zoneCorrections,
-  zoneDataRelease,
-} from "@/lib/time/zone";
+import { zoneCorrections } from "@/lib/time/corrections";
+import { isTimeZone, offsetMs, utcMs, wallClock, zoneDataRelease } from "@/lib/time/zone";
 import { timeChecks } from "./checks";
 
 const MINUTE_MS = 60_000;
