@@ -1,5 +1,6 @@
 import { sql } from "drizzle-orm";
 import type { Scope } from "@/db/client";
+import { closingKey } from "@/db/ledger/closing-lock";
 import { type Booking, payloadOf } from "@/db/ledger/payload";
 import { readContext, readContexts } from "@/db/ledger/queries";
 import { receiveRecords } from "@/db/ledger/receive";
@@ -161,7 +162,9 @@ export async function book(scope: Scope, booking: Booking): Promise<boolean> {
 
 async function bookAll(scope: Scope, bookings: readonly Booking[]): Promise<boolean> {
   try {
-    await scope.db.execute(sql`select book(${scope.siteId}, ${payloadOf(bookings)}::jsonb)`);
+    await scope.db.execute(sql`
+      select book(${scope.siteId}, ${payloadOf(bookings)}::jsonb)
+      from pg_advisory_xact_lock_shared(${closingKey(scope.siteId)})`);
     return true;
   } catch (error) {
     if (isInterference(error)) return false;

@@ -139,7 +139,7 @@ async function addDuePeriods(scope: Scope, today: string): Promise<number> {
 }
 
 /** One at a time sets what a site is paid by; held until the end of the transaction. */
-async function lockPay({ db, siteId }: Scope): Promise<void> {
+export async function lockPay({ db, siteId }: Scope): Promise<void> {
   await db.execute(sql`select pg_advisory_xact_lock(hashtextextended(${`pay ${siteId}`}, 0))`);
 }
 

@@ -9,6 +9,7 @@ import {
   payRhythms,
 } from "@/db/pay/tables";
 import { workers } from "@/db/people/tables";
+import type { FileTotals } from "@/lib/periods/file";
 import type { PolicyBook } from "@/lib/policies/in-force";
 
 /** Reads all that a site ever set about pay policies, in the order of entry. */
@@ -87,6 +88,7 @@ export interface PeriodRow {
   closedAt: Date | null;
   closedBy: string | null;
   digest: string | null;
+  totals: FileTotals | null;
 }
 
 /** Lists pay periods, the latest first; `before` is the first day of the last one of the page before. */
@@ -122,6 +124,7 @@ async function periodsWhere(
       closedAt: payRevisions.closedAt,
       closedBy: payRevisions.closedByName,
       digest: payRevisions.digest,
+      totals: payRevisions.totals,
       reopened: payReopenings.revision,
     })
     .from(payPeriods)

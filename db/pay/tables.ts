@@ -116,8 +116,11 @@ export const payRevisions = pgTable(
     /** `account:<id>`, and the name that it had. */
     closedBy: text().notNull(),
     closedByName: text().notNull(),
-    /** The moment of which the figures are: what came later is an adjustment. */
+    /** What was received after this moment may not be in the figures. */
     asOf: instantAt().notNull(),
+    /** From the first workday's start to the last one's end. */
+    startsAt: instantAt().notNull(),
+    endsAt: instantAt().notNull(),
     /** SHA-256 of the cards and rows as canonical JSON, in hex. */
     digest: text().notNull(),
     totals: jsonb().$type<FileTotals>().notNull(),

@@ -38,6 +38,11 @@ export const permissions = {
     payroll: "self",
     worker: "self",
   },
+  "periods.see": { payroll: "site", lead: "cells" },
+  "periods.close": { payroll: "site" },
+  "periods.export": { payroll: "site" },
+  "policies.see": { payroll: "site", admin: "site" },
+  "policies.change": { payroll: "site", admin: "site" },
   "account.change": {
     admin: "self",
     planner: "self",

@@ -8,6 +8,7 @@ import { checkCodeRequest } from "@/lib/codes/schema";
 import { benchQuery, enrolRequest, signInRequest, timeQuery } from "@/lib/kiosks/schema";
 import { eventBatch } from "@/lib/ledger/schema";
 import { payRequest } from "@/lib/pay/request";
+import { exportQuery, periodsQuery } from "@/lib/periods/schema";
 
 /** A route of the contract: who may call it, what it takes and gives. */
 export interface ApiRoute {
@@ -22,7 +23,7 @@ export interface ApiRoute {
   body?: z.ZodType;
   answer: keyof typeof answers;
   /** Refusals beyond those that follow from the rest. */
-  also?: Partial<Record<404 | 429, string>>;
+  also?: Partial<Record<404 | 409 | 410 | 429, string>>;
   /** True where an `ETag` spares an answer that is known already. */
   unchanged?: true;
   /** When it answers 503, in its usual form. */
@@ -160,6 +161,33 @@ const integrationRoutes: ApiRoute[] = [
     may: "calculate.pay",
     body: payRequest,
     answer: "PayAnswer",
+  },
+  {
+    method: "get",
+    path: "/api/v1/periods",
+    name: "listPeriods",
+    summary: "Lists pay periods, the latest first, closed ones with what stands beside their file.",
+    actor: "key",
+    may: "periods.export",
+    query: periodsQuery,
+    answer: "PeriodPage",
+  },
+  {
+    method: "get",
+    path: "/api/v1/periods/{id}/export",
+    name: "exportPeriod",
+    summary:
+      "The file of a closed period as CSV, XLSX or JSON (`format`, JSON unless given): the same bytes " +
+      "for ever, their SHA-256 in the `Digest` header. `revision` asks for an earlier closing's.",
+    actor: "key",
+    may: "periods.export",
+    query: exportQuery,
+    answer: "PayFile",
+    also: {
+      404: "No such period or revision here.",
+      409: "The period is open.",
+      410: "The file was erased.",
+    },
   },
   {
     method: "get",

@@ -14,6 +14,8 @@ import {
 } from "@/lib/kiosks/schema";
 import { instant } from "@/lib/ledger/schema";
 import { payAnswer } from "@/lib/pay/answer";
+import { payFile } from "@/lib/periods/file";
+import { periodPage } from "@/lib/periods/schema";
 
 /** RFC 9457, as every refusal is answered; `errors` names the fields of invalid input. */
 const problem = z.object({
@@ -48,6 +50,8 @@ export const answers = {
   Split: splitAnswer,
   CodeReading: codeReading,
   PayAnswer: payAnswer,
+  PeriodPage: periodPage,
+  PayFile: payFile,
   Enrolled: enrolled,
   KioskTime: kioskTime,
   KioskCell: kioskCell,
