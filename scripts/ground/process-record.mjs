@@ -1,4 +1,5 @@
 import { existsSync, readFileSync, rmSync, writeFileSync } from "node:fs";
+import { Stop } from "./say.mjs";
 
 /** When a process began, in the kernel's ticks: tells it from a later one with the same number. */
 function startTicks(pid) {
@@ -23,13 +24,15 @@ export function isAlive(identity) {
 }
 
 /** The record of a running installation: who supervises, who serves, where. */
-export function recordIn(file) {
+export function recordIn(file, readFile = readFileSync) {
   const read = () => {
     if (!existsSync(file)) return null;
     try {
-      return JSON.parse(readFileSync(file, "utf8"));
-    } catch {
-      return null; // half written when the machine stopped
+      return JSON.parse(readFile(file, "utf8"));
+    } catch (error) {
+      if (error instanceof SyntaxError) return null; // half written when the machine stopped
+      if (error.code !== "EACCES") throw error;
+      throw new Stop("Another user runs this Bookmatch, root perhaps: do this as that one.");
     }
   };
   return {

@@ -31,6 +31,15 @@ describe("recordIn", () => {
     record.remove();
     expect(record.read()).toBeNull();
   });
+  test("does not take one that it cannot read for none: somebody runs it", () => {
+    const file = path.join(folder, "another.json");
+    writeFileSync(file, "{}");
+    const denied = Object.assign(new Error("permission denied"), { code: "EACCES" });
+    const read = () => {
+      throw denied;
+    };
+    expect(() => recordIn(file, read).read()).toThrow("Another user runs this Bookmatch");
+  });
   test("reads one that was cut off as none", () => {
     const file = path.join(folder, "cut.json");
     writeFileSync(file, '{"supervisor": {"pid"');
