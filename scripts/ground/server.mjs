@@ -10,12 +10,13 @@ const LOG_MAX_BYTES = 20_000_000;
 const STOP_MS = 10_000;
 
 /**
- * Starts the production server; what it says goes to `logFile`. It gets the app's login only, and a
- * session of its own, so that Ctrl-C at the terminal reaches whoever supervises it first.
+ * Starts the production server; what it says goes to `logFile`. It gets the app's login only, and,
+ * unless it is to end with its group, a session of its own, so that Ctrl-C at the terminal reaches
+ * whoever supervises it first.
  *
- * @param {{env: NodeJS.ProcessEnv, host: string, port: number, logFile: string}} how
+ * @param {{env: NodeJS.ProcessEnv, host: string, port: number, logFile: string, apart?: boolean}} how
  */
-export function startServer({ env, host, port, logFile }) {
+export function startServer({ env, host, port, logFile, apart = true }) {
   if (existsSync(logFile) && statSync(logFile).size > LOG_MAX_BYTES)
     renameSync(logFile, `${logFile}.1`);
   const log = openSync(logFile, "a", 0o600);
@@ -24,7 +25,7 @@ export function startServer({ env, host, port, logFile }) {
     cwd: root,
     env: { ...own, TZ: "UTC" },
     stdio: ["ignore", log, log],
-    detached: true,
+    detached: apart,
   });
   const ended = new Promise((resolve) => {
     child.on("error", (error) => resolve(error.message));

@@ -32,7 +32,7 @@ export async function openInstallation(name: string) {
   const env = environment(server, name);
   let running: ReturnType<typeof startServer> | null = null;
   const start = async () => {
-    running = startServer({ env, host: HOST, port, logFile });
+    running = startServer({ env, host: HOST, port, logFile, apart: false });
     if (!(await waitForHealth(url, running.ended)))
       throw new Error(`The server did not come up:\n${tailOf(logFile)}`);
   };
