@@ -85,9 +85,12 @@ export interface UndoOffer {
   untilMs: number;
 }
 
+/** Why no kiosk was made: the code, the server, too many tries, or records that go in first. */
+export type EnrolRefusal = "wrong" | "away" | "wait" | "kept";
+
 export type Screen =
   | { at: "loading" }
-  | { at: "enrol"; says: "wrong" | "away" | "wait" | null; busy: boolean; isDone: boolean }
+  | { at: "enrol"; says: EnrolRefusal | null; busy: boolean; isDone: boolean }
   | { at: "door"; digits: string; says: "unread-badge" | "ticket-first" | null }
   | {
       at: "pin";

@@ -362,6 +362,7 @@ export const en = {
     wrong: "That code does not hold. Ask for a new one.",
     away: "The server does not answer. Try again in a moment.",
     wait: "Too many tries. Wait a minute, then try again.",
+    kept: "Records wait here and go in first. Wait until it says connected, then try again.",
   },
   seam: {
     onStandard: "on standard",

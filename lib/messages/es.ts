@@ -365,6 +365,7 @@ export const es: Messages = {
     wrong: "Ese código no vale. Pida uno nuevo.",
     away: "El servidor no responde. Intente en un momento.",
     wait: "Demasiados intentos. Espere un minuto e intente otra vez.",
+    kept: "Aquí esperan registros y se entregan antes. Espere a que haya conexión e intente otra vez.",
   },
   seam: {
     onStandard: "en estándar",

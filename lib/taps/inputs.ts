@@ -3,6 +3,7 @@ import type {
   Choice,
   CountField,
   Device,
+  EnrolRefusal,
   ItemKey,
   KioskState,
   Link,
@@ -21,7 +22,7 @@ export type Input =
   | { on: "link"; is: Link["is"] }
   | { on: "device"; device: Device }
   | { on: "enrolled"; device: Device }
-  | { on: "enrol-refused"; says: "wrong" | "away" | "wait" }
+  | { on: "enrol-refused"; says: EnrolRefusal }
   | { on: "signed-in"; session: BenchSession; bench: Bench | null }
   | { on: "sign-in-refused"; worker: string; says: "wrong" | "away"; waitSeconds: number | null }
   | { on: "bench"; worker: string; bench: Bench }

@@ -192,7 +192,8 @@ function withLink(state: KioskState, is: Link["is"]): KioskState {
 
 /** This browser is a kiosk from now on, of this cell: the page begins anew with that. */
 function enrolledAs(state: KioskState, device: Device): Step {
-  const next: KioskState = { ...state, device, cell: null, tickets: {} };
+  const forgotten = { cell: null, tickets: {}, sessions: {}, benches: {} };
+  const next: KioskState = { ...state, device, ...forgotten };
   return show(next, { at: "enrol", says: null, busy: false, isDone: true });
 }
 

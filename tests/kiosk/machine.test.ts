@@ -13,6 +13,8 @@ import { uuidOf } from "./records";
 class FakeServer {
   isAway = false;
   isPinRight = true;
+  /** The kiosk was taken away from the office's list; a new enrolment puts it back. */
+  isUnknown = false;
   readonly batches: EventBatch[] = [];
   sealKey = { kid: "k1", key: toBase64(new Uint8Array(32).fill(9)) };
 
@@ -28,6 +30,8 @@ class FakeServer {
 
   private answer(path: string, body: Record<string, unknown> | null): Response {
     const serverTime = new Date().toISOString();
+    if (path === "/api/kiosk/enrol") this.isUnknown = false;
+    if (this.isUnknown) return problem(401, "unauthenticated");
     switch (path) {
       case "/api/kiosk/time":
         return Response.json({ serverTime, build: "b1", sealKey: this.sealKey });
@@ -235,6 +239,52 @@ describe("runKiosk", () => {
     send(running, { on: "submit" });
     const state = await until(running, ({ screen }) => screen.at === "scan" && !!screen.says);
     expect(state.screen).toMatchObject({ says: { what: "away" } });
+  });
+
+  test("a kiosk is not made another one while its records wait, and forgets none", async () => {
+    const server = new FakeServer();
+    const { running } = await enrolled(server);
+    await signIn(running);
+    server.isAway = true;
+    send(running, { on: "start-shift" });
+    await until(running, screenIs("done"));
+    await until(running, ({ link }) => link.is === "away");
+    send(running, { on: "leave" }, { on: "show-enrol" }, { on: "enrol", code: "K7QF-3MZ9" });
+    const refused = await until(running, ({ screen }) => screen.at === "enrol" && !screen.busy);
+    expect(refused.screen).toMatchObject({ says: "kept", isDone: false });
+    expect(refused.pending).toHaveLength(1);
+    server.isAway = false;
+    running.wake();
+    await until(running, isAnswered);
+    expect(server.booked.map(({ kind }) => kind)).toEqual(["shift-start"]);
+    send(running, { on: "enrol", code: "K7QF-3MZ9" });
+    await until(running, ({ screen }) => screen.at === "enrol" && screen.isDone);
+  });
+
+  test("a badge opens nothing on a kiosk that was made another one", async () => {
+    const server = new FakeServer();
+    const { running, storeName } = await enrolled(server);
+    await signIn(running);
+    send(running, { on: "leave" }, { on: "show-enrol" }, { on: "enrol", code: "K7QF-3MZ9" });
+    await until(running, ({ screen }) => screen.at === "enrol" && screen.isDone);
+    const again = await start(server, storeName);
+    again.send({ on: "scan", text: badgeCode(NIA) });
+    expect(again.state().screen).toMatchObject({ at: "pin", worker: NIA });
+  });
+
+  test("a tablet that the server knows no more is enrolled anew, and its records go in then", async () => {
+    const server = new FakeServer();
+    const { running } = await enrolled(server);
+    await signIn(running);
+    server.isUnknown = true;
+    send(running, { on: "start-shift" });
+    await until(running, ({ link }) => link.is === "unknown-device");
+    expect(running.state().pending).toHaveLength(1);
+    send(running, { on: "leave" }, { on: "show-enrol" }, { on: "enrol", code: "K7QF-3MZ9" });
+    await until(running, ({ screen }) => screen.at === "enrol" && screen.isDone);
+    running.wake();
+    await until(running, isAnswered);
+    expect(server.booked.map(({ kind }) => kind)).toEqual(["shift-start"]);
   });
 
   test("a tablet that breaks while a person waits says that it cannot be done now", async () => {
