@@ -23,8 +23,8 @@ export function Ask({
       tabIndex={-1}
       className={`mirror items-center font-bold leading-[1.08] outline-none ${className}`}
     >
-      <span className="pr-[26px] pl-6 [text-wrap:balance]">{book}</span>
-      <span className="pr-6 pl-[26px] [text-wrap:balance]">{day}</span>
+      <span className="min-w-0 pr-[26px] pl-6 [text-wrap:balance]">{book}</span>
+      <span className="min-w-0 pr-6 pl-[26px] [text-wrap:balance]">{day}</span>
     </h1>
   );
 }

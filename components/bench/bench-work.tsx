@@ -56,6 +56,7 @@ function Job({ view, item }: SeenBench & { item: ItemView }) {
   return (
     <section className="mirror text-k-2 portrait:text-k-1">
       <p className="truncate pr-8 pl-8 portrait:px-6">
+        {activity && <b className="text-standard-ink">{activity}, </b>}
         <code>{showTicket(item.ticket)}</code>&ensp;{modelName(item)}
       </p>
       <p className="truncate pr-8 pl-8 portrait:px-6">
@@ -64,10 +65,7 @@ function Job({ view, item }: SeenBench & { item: ItemView }) {
       <Ask
         className="col-span-2 mt-0.5 text-k-4 portrait:text-[32px]"
         book={
-          <span className="block pl-2 [text-wrap:balance] landscape:truncate">
-            {activity && <span className="text-standard-ink">{activity}: </span>}
-            {item.name}
-          </span>
+          <span className="block pl-2 [text-wrap:balance] landscape:truncate">{item.name}</span>
         }
         day={
           <span className="font-medium">

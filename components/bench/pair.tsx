@@ -21,7 +21,7 @@ export function Pair({
   const words = useSeamWords();
   const { standardSeconds, actualSeconds } = pair;
   return (
-    <div className="grid gap-2">
+    <div className="grid gap-2 portrait:gap-11">
       <p className="mirror items-baseline text-k-2 font-semibold">
         <span className="pr-[26px] pl-8 text-standard-ink">
           {standardSeconds === null ? (

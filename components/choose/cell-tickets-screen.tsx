@@ -1,6 +1,6 @@
 "use client";
 
-import { useFormatter, useTranslations } from "use-intl";
+import { useLocale, useTranslations } from "use-intl";
 import { Ask, Foot } from "@/components/bench/ask";
 import type { Seen } from "@/components/bench/seen";
 import { modelName } from "@/components/bench/words";
@@ -9,6 +9,7 @@ import { KioskFrame } from "@/components/shell/kiosk-frame";
 import { Plate } from "@/components/ui/plate";
 import type { KioskState, Screen } from "@/lib/bench/schema";
 import { showTicket } from "@/lib/codes/ticket-code";
+import { dayText } from "@/lib/time/format";
 
 /** Four rows of two leaves; the place of the last is the page-turner's where there are more. */
 const PAGE_SIZE = 7;
@@ -64,24 +65,14 @@ function QueueWords({
   entry: { ticket: string; operation: string };
 }) {
   const t = useTranslations("pick");
-  const format = useFormatter();
+  const language = useLocale();
   const ticket = state.tickets[entry.ticket]?.ticket;
   const operation = ticket?.operations.find((each) => each.operation === entry.operation);
-  const due = ticket?.dueOn
-    ? t("due", {
-        date: format.dateTime(new Date(`${ticket.dueOn}T12:00:00Z`), {
-          day: "numeric",
-          month: "short",
-          timeZone: "UTC",
-        }),
-      })
-    : "";
+  const due = ticket?.dueOn ? t("due", { date: dayText(ticket.dueOn, language) }) : "";
   return (
     <>
       <code>{showTicket(entry.ticket)}</code> {operation?.name ?? entry.operation}
-      <small className="truncate">
-        {[ticket ? modelName(ticket) : "", due].filter(Boolean).join(", ")}
-      </small>
+      <small>{[ticket ? modelName(ticket) : "", due].filter(Boolean).join(", ")}</small>
     </>
   );
 }

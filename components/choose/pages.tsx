@@ -4,6 +4,9 @@ import type { ReactNode } from "react";
 import { useTranslations } from "use-intl";
 import { Board, Plate } from "@/components/ui/plate";
 
+/** So many have the screen to themselves, and are larger. */
+const FEW = 4;
+
 /**
  * A list that never scrolls: plates in two leaves, and one that turns the page where there are
  * more. `size` is how many fit one page.
@@ -24,7 +27,7 @@ export function Pages({
   const shown = plates.slice((page % pages) * size, (page % pages) * size + size);
   const half = Math.ceil(shown.length / 2);
   return (
-    <div className="pages">
+    <div className="pages" data-few={plates.length <= FEW ? "" : undefined}>
       <Board stacked className="pages-leaf" data-side="book">
         {shown.slice(0, half)}
       </Board>
