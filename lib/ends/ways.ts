@@ -48,14 +48,14 @@ export function waysFor(end: EndFacts): Way[] {
       return [...startWays(end), ...accept];
     case "break-open":
     case "break-long":
-      return [...accept, asked("enter:break-end", "The break ended at")];
+      return [...accept, asked("enter:break-end", "The break ended then")];
     case "shift-long":
-      return [...accept, asked("enter:shift-end", "The shift ended at")];
+      return [...accept, asked("enter:shift-end", "The shift ended then")];
     case "already-in":
-      return [...accept, asked("enter:shift-end", "The shift before ended at")];
+      return [...accept, asked("enter:shift-end", "The shift before ended then")];
     case "since-outside":
     case "clock-unmeasured":
-      return [...accept, asked("move", "It was at"), takeOut];
+      return [...accept, asked("move", "It was then"), takeOut];
     case "undo-late":
       return [{ answer: "void-undone", label: "Take it back now" }, ...accept];
     case "objection":
@@ -87,7 +87,7 @@ function endWays({ atMs, planned, timeZone, nowMs }: EndFacts): Way[] {
   });
   const plannedMs = planned?.endMs ?? 0;
   const byPlan = plannedMs > atMs + 999 && plannedMs <= nowMs ? [at(plannedMs)] : [];
-  return [at(lastInstantOf(atMs)), ...byPlan, asked("end-at", "End at another time")];
+  return [at(lastInstantOf(atMs)), ...byPlan, asked("end-at", "End then")];
 }
 
 /**
@@ -110,7 +110,7 @@ function startWays({ atMs, planned, timeZone }: EndFacts): Way[] {
           },
         ]
       : [];
-  return [...byPlan, asked("enter:shift-start", "Came in at another time")];
+  return [...byPlan, asked("enter:shift-start", "Came in then")];
 }
 
 function keptWays({ code, body, receivedMs, nowMs }: EndFacts): Way[] {
@@ -120,7 +120,7 @@ function keptWays({ code, body, receivedMs, nowMs }: EndFacts): Way[] {
   if (code === "unknown-worker")
     return [{ answer: "take-in", label: "It belongs to", asks: "worker" }, leaveOut];
   if (code === "future" && (receivedMs ?? nowMs) <= nowMs)
-    return [asked("take-in", "It was at"), leaveOut];
+    return [asked("take-in", "It was then"), leaveOut];
   return [{ answer: "take-in", label: "Take it in" }, leaveOut];
 }
 

@@ -26,7 +26,7 @@ describe("waysFor", () => {
     expect(waysFor(end())).toEqual([
       { answer: "end-at:2026-05-06T12:12:03.999Z", label: "End at 12:12" },
       { answer: "end-at:2026-05-06T14:30:00.000Z", label: "End at 14:30" },
-      { answer: "end-at", label: "End at another time", asks: "time" },
+      { answer: "end-at", label: "End then", asks: "time" },
     ]);
   });
 
