@@ -17,6 +17,8 @@ export interface Settling {
   by: string | null;
   actor: string;
   within: readonly string[] | null;
+  /** The number of the one worker whose own it is; left out for whoever settles for others. */
+  only?: string;
   now: Date;
   rules: readonly SiteRules[];
 }
@@ -33,7 +35,9 @@ export async function settleEnd(
 ): Promise<Result<void>> {
   if (await isBooked(scope, form.id)) return ok(undefined);
   const end = await findEnd(scope, form, settling.within);
-  if (!end) return no("notFound", "That is not among your loose ends any more. Look again.");
+  const isOthers = settling.only !== undefined && end?.worker !== settling.only;
+  if (!end || isOthers)
+    return no("notFound", "That is not among your loose ends any more. Look again.");
   if (end.settled) return no("conflict", "Someone settled this meanwhile. Look at the list again.");
   const facts = endFacts(end, settling);
   const told = toldTime(form.time, facts.timeZone);

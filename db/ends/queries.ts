@@ -12,8 +12,9 @@ export interface EndsWanted {
   /** Name of a home cell; empty for any. */
   cell: string;
   code: LooseEndCode | "";
-  /** The number of the one worker; left out for all. */
+  /** The number of the one worker, or the id; left out for all. */
   worker?: string;
+  workerId?: string;
 }
 
 /** A loose end as a list shows it; instants are epoch milliseconds. */
@@ -102,12 +103,14 @@ export async function countEnds(
   return rows;
 }
 
-function wantedEnds(scope: Scope, { within, cell, code, worker }: EndsWanted): SQL {
+function wantedEnds(scope: Scope, wanted: EndsWanted): SQL {
+  const { within, cell, code, worker, workerId } = wanted;
   return sql`${ends(scope, within)}
     and not l.settled
     ${cell ? sql`and c.name = ${cell}` : sql``}
     ${code ? sql`and l.code = ${code}` : sql``}
-    ${worker ? sql`and w.number = ${worker}` : sql``}`;
+    ${worker ? sql`and w.number = ${worker}` : sql``}
+    ${workerId ? sql`and l.worker_id = ${workerId}` : sql``}`;
 }
 
 /** A loose end with all that decides how it may be settled. */

@@ -24,9 +24,13 @@ export function roomsFor(held: readonly Held[]): Room[] {
   return rooms.filter(({ may }) => reachOf(held, may) !== null);
 }
 
-/** Where someone begins: on the floor if they may see it, else in the first room that is theirs. */
+/**
+ * Where someone begins: on the floor if they may see it, else in the first room that is theirs; who
+ * is nothing but a worker, with the own hours on the phone.
+ */
 export function homeFor(held: readonly Held[]): string {
   const mine = roomsFor(held);
+  if (held.length > 0 && held.every(({ role }) => role === "worker")) return "/me";
   const first = mine.find(({ path }) => path === "/floor") ?? mine[0];
   return first?.path ?? "/account";
 }

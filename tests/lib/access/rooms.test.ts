@@ -17,7 +17,7 @@ describe("roomsFor", () => {
 describe("homeFor", () => {
   test("is the floor, for a worker the own hours, for nobody the own account", () => {
     expect(homeFor(held("lead"))).toBe("/floor");
-    expect(homeFor(held("worker"))).toBe("/hours");
+    expect(homeFor(held("worker"))).toBe("/me");
     expect(homeFor([])).toBe("/account");
   });
 });
