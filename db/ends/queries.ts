@@ -103,6 +103,22 @@ export async function countEnds(
   return rows;
 }
 
+/** Counts by worker what must be settled between two instants; workers without any are left out. */
+export async function listOpenByWorker(
+  scope: Scope,
+  within: readonly string[] | null,
+  { from, to }: { from: Date; to: Date },
+): Promise<ReadonlyMap<string, number>> {
+  const { rows } = await scope.db.execute<{ workerId: string; count: number }>(sql`
+    select l.worker_id as "workerId", count(*)::integer as count
+    ${ends(scope, within)}
+      and not l.settled
+      and l.worker_id is not null
+      and l.at >= ${from.toISOString()} and l.at < ${to.toISOString()}
+    group by l.worker_id`);
+  return new Map(rows.map(({ workerId, count }) => [workerId, count]));
+}
+
 function wantedEnds(scope: Scope, wanted: EndsWanted): SQL {
   const { within, cell, code, worker, workerId } = wanted;
   return sql`${ends(scope, within)}

@@ -44,6 +44,26 @@ export async function listOwnPlanned(
   return rows;
 }
 
+/** Sums planned seconds by worker on some dates; workers without a plan are left out. */
+export async function listPlannedSums(
+  { db, siteId }: Scope,
+  within: readonly string[] | null,
+  { from, to }: { from: string; to: string },
+): Promise<ReadonlyMap<string, number>> {
+  const { rows } = await db.execute<{ workerId: string; seconds: number }>(sql`
+    select p.worker_id as "workerId",
+      sum(extract(epoch from p.end_at - p.start_at))::integer as seconds
+    from (
+      select distinct on (s.worker_id, s.work_on) s.worker_id, s.start_at, s.end_at
+      from planned_shifts s
+      join workers w on w.site_id = s.site_id and w.id = s.worker_id
+      where s.site_id = ${siteId} and s.work_on >= ${from} and s.work_on < ${to}
+        ${within === null ? sql`` : sql`and w.home_cell_id = any (${sql.param([...within])}::uuid[])`}
+      order by s.worker_id, s.work_on, s.seq desc) p
+    group by p.worker_id`);
+  return new Map(rows.map(({ workerId, seconds }) => [workerId, seconds]));
+}
+
 /** Lists what others altered in a worker's time since an instant, the latest first; agreements aside. */
 export async function listChanges(
   { db, siteId }: Scope,

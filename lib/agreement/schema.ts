@@ -32,3 +32,6 @@ export const agreeForm = z.strictObject({
   days: z.array(namedDay).min(1, "Choose at least one.").max(DAYS_MAX),
 });
 export type AgreeForm = z.infer<typeof agreeForm>;
+
+/** Which period the cards are of, by its first day; anything odd counts as not said. */
+export const agreementQuery = z.object({ period: z.iso.date().catch("") });
