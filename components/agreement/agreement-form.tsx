@@ -11,15 +11,15 @@ import { seamScale } from "@/lib/seam/scale";
 
 const WIDTHS = {
   tick: 4,
-  number: 6,
-  worker: 18,
-  cell: 11,
-  planned: 7,
-  gauge: 8,
-  attended: 8,
-  look: 24,
-  self: 7,
-  lead: 7,
+  number: 5,
+  worker: 15,
+  cell: 8,
+  planned: 6,
+  gauge: 24,
+  present: 7,
+  look: 19,
+  self: 6,
+  lead: 6,
 };
 
 /** Cards on one scale; those without an open question are ticked, and agreed to at once. */
@@ -38,9 +38,9 @@ export function AgreementForm({
 }) {
   const sent = useAnswer(action);
   const scaleSeconds = seamScale(
-    [...toLookAt, ...agreed].map(({ plannedSeconds, attendedSeconds }) => ({
+    [...toLookAt, ...agreed].map(({ plannedSeconds, presentSeconds }) => ({
       standardSeconds: plannedSeconds,
-      actualSeconds: attendedSeconds,
+      actualSeconds: presentSeconds,
     })),
   );
   const ready = toLookAt.filter(({ toAgree }) => toAgree.length > 0);
@@ -60,10 +60,10 @@ export function AgreementForm({
             <Head>Home cell</Head>
             <NumberHead>Planned</NumberHead>
             <th scope="col">
-              <span className="sr-only">Planned and attended</span>
+              <span className="sr-only">Planned and present</span>
               <SeamAxis scaleSeconds={scaleSeconds} unitShown />
             </th>
-            <NumberHead>Attended</NumberHead>
+            <NumberHead>Present</NumberHead>
             <Head>To look at</Head>
             <Head>Self</Head>
             <Head>Lead</Head>

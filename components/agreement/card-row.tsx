@@ -8,7 +8,7 @@ import type { CardLine } from "@/lib/agreement/page";
 import { dayText, decimalHour } from "@/lib/time/format";
 import { addDays } from "@/lib/time/site-day";
 
-/** One card: planned and attended, what to look at, and who has agreed. */
+/** One card: planned and present, what to look at, and who has agreed. */
 export function CardRow({
   line,
   range,
@@ -18,7 +18,7 @@ export function CardRow({
   range: { from: string; to: string };
   scaleSeconds: number;
 }) {
-  const { number, name, cell, plannedSeconds, attendedSeconds, toAgree } = line;
+  const { number, name, cell, plannedSeconds, presentSeconds, toAgree } = line;
   const [isTicked, setTicked] = useState(toAgree.length > 0 && line.openEnds === 0);
   const days = new URLSearchParams({
     worker: number,
@@ -55,17 +55,17 @@ export function CardRow({
       <td data-gauge="">
         <SeamGauge
           standardSeconds={plannedSeconds}
-          actualSeconds={attendedSeconds}
+          actualSeconds={presentSeconds}
           flush
           size="cell"
           state={line.runningDays > 0 ? "live" : "finished"}
           scaleSeconds={scaleSeconds}
           words={hourWords}
-          name={`${name}, planned and attended`}
+          name={`${name}, planned and present`}
         />
       </td>
-      <NumberCell data-day="" data-actual="" data-label="attended">
-        {decimalHour(attendedSeconds)}
+      <NumberCell data-day="" data-actual="" data-label="present">
+        {decimalHour(presentSeconds)}
       </NumberCell>
       <td data-day="" className="desk-cut">
         <ToLookAt line={line} />
@@ -100,6 +100,6 @@ function Signed({ isSigned, who }: { isSigned: boolean; who: string }) {
       <Icon name="good" />
     </span>
   ) : (
-    <span className="sr-only">not yet</span>
+    <span role="img" aria-label={`not agreed by ${who}`} className="agreement-open" />
   );
 }

@@ -38,16 +38,18 @@ export function DayList({
               <span className="text-ink-2">{day.span}</span>
             </span>
           </h2>
-          <SeamGauge
-            standardSeconds={day.plannedSeconds}
-            actualSeconds={day.tappedSeconds ?? 0}
-            size="row"
-            flush
-            state={day.runs || day.tappedSeconds === null ? "live" : "finished"}
-            words={hourWords}
-            scaleSeconds={scaleSeconds}
-            name={`${day.label}, planned and tapped`}
-          />
+          {(day.plannedSeconds ?? day.tappedSeconds) !== null && (
+            <SeamGauge
+              standardSeconds={day.plannedSeconds}
+              actualSeconds={day.tappedSeconds ?? 0}
+              size="row"
+              flush
+              state={day.runs || day.tappedSeconds === null ? "live" : "finished"}
+              words={hourWords}
+              scaleSeconds={scaleSeconds}
+              name={`${day.label}, planned and tapped`}
+            />
+          )}
           {isOpen(day) && <DayOpen day={day} />}
         </li>
       ))}

@@ -15,7 +15,8 @@ export interface CardDay {
   endMs: number;
   /** The parts that reach into it, by time, whole. */
   parts: readonly DayPart[];
-  attendedSeconds: number;
+  /** From coming in to leaving, meals too: what is planned is counted in the same way. */
+  presentSeconds: number;
   runs: boolean;
   /** What an agreement to it names; null where there is nothing to agree to, or some still runs. */
   digest: string | null;
@@ -66,16 +67,18 @@ function cardDay(
     .toSorted((a, b) => a.startMs - b.startMs || a.item - b.item);
   const text = dayText(own, { date, startMs, endMs, policy });
   const digest = text === null ? null : digestOf(text);
-  const attended = own.filter(({ item, activity }) => item === 0 && activity !== "meal");
+  const present = own.filter(({ item }) => item === 0);
   return {
     date,
     startMs,
     endMs,
     parts: own,
-    attendedSeconds: sum(
-      attended.map(
-        (part) => (Math.min(part.endMs ?? nowMs, endMs) - Math.max(part.startMs, startMs)) / 1000,
-      ),
+    presentSeconds: Math.floor(
+      sum(
+        present.map(
+          (part) => Math.min(part.endMs ?? nowMs, endMs) - Math.max(part.startMs, startMs),
+        ),
+      ) / 1000,
     ),
     runs: own.some((part) => part.endMs === null),
     digest,

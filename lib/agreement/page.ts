@@ -20,7 +20,7 @@ export interface CardLine {
   name: string;
   cell: string;
   plannedSeconds: number | null;
-  attendedSeconds: number;
+  presentSeconds: number;
   openEnds: number;
   state: "to look at" | "agreed" | "closed";
   isSignedByWorker: boolean;
@@ -60,7 +60,7 @@ function lineOf({
     name,
     cell,
     plannedSeconds,
-    attendedSeconds: Math.floor(sum(days.map(({ attendedSeconds }) => attendedSeconds))),
+    presentSeconds: sum(days.map(({ presentSeconds }) => presentSeconds)),
     openEnds,
     state: cardState(facts),
     isSignedByWorker: isSignedByWorker(facts),

@@ -99,9 +99,7 @@ function sumsIn(facts: OwnFacts, dates: Dates): OwnSums {
   const lengths = soFar.map(({ start, end }) => Math.min(end, facts.nowMs / 1000) - start);
   return {
     plannedSeconds: Math.floor(sum(lengths)),
-    tappedSeconds: Math.floor(
-      sum(facts.card.filter(isIn).map(({ attendedSeconds }) => attendedSeconds)),
-    ),
+    tappedSeconds: sum(facts.card.filter(isIn).map(({ presentSeconds }) => presentSeconds)),
     paidSeconds: sum(statedIn(facts, dates).map(({ paidSeconds }) => paidSeconds)),
   };
 }

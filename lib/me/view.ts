@@ -39,7 +39,7 @@ export interface MeDay {
   label: string;
   isToday: boolean;
   plannedSeconds: number | null;
-  /** As tapped; null where nothing was, or will be. */
+  /** From coming in to leaving; null where nothing was, or will be. */
   tappedSeconds: number | null;
   paidSeconds: number;
   /** "06:58 to 15:30", "since 06:57", or what is planned. */
@@ -72,7 +72,7 @@ function meDay(date: string, facts: WeekFacts): MeDay {
     label: dayText(date, "en-GB"),
     isToday: date === today,
     plannedSeconds: plan ? plan.end - plan.start : null,
-    tappedSeconds: day ? Math.floor(day.attendedSeconds) : null,
+    tappedSeconds: day?.presentSeconds ?? null,
     paidSeconds: sum(stated.map(({ paidSeconds }) => paidSeconds)),
     span: day ? spanText(day, clock) : date >= today ? planText : "",
     trail: stated.flatMap(({ trail }) => trail.map(({ text }) => text)),

@@ -91,7 +91,7 @@ describe("agreeDays", () => {
       expect(changed?.agreement).toEqual({ worker: null, lead: null, hasLapsed: true });
       const late = await agreeDays(scope, { id: uuid(), days: [day] }, lead);
       expect(late).toMatchObject({ ok: false, problem: { code: "conflict" } });
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0, rollups: 0 });
     });
   });
 
@@ -179,7 +179,7 @@ describe("enterShift", () => {
       });
       const end = { ...form, id: uuid(), deed: "shift-end" as const, time: "2026-05-15T09:30" };
       expect(await enterShift(scope, end, lead)).toMatchObject({ ok: true });
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0, rollups: 0 });
     });
   });
 });

@@ -134,7 +134,7 @@ describe("settleEnd", () => {
       expect((await listEnds(scope, all, page)).map(({ code }) => code)).not.toContain(
         "no-shift-end",
       );
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0, rollups: 0 });
       expect(await settleEnd(scope, settle, settling)).toMatchObject({ ok: true });
       const other = form("no-shift-end", start.id, { answer: "end-at", time: "2026-05-14T13:00" });
       expect(await settleEnd(scope, other, settling)).toMatchObject({
@@ -154,7 +154,7 @@ describe("settleEnd", () => {
         code: "cleaning",
         seconds: 175 * 60,
       });
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0, rollups: 0 });
     });
   });
 
@@ -172,7 +172,7 @@ describe("settleEnd", () => {
       expect(await listEnds(scope, { ...all, worker: "1077" }, page)).toMatchObject([
         { code: "no-shift-end", atMs: Date.parse("2026-05-14T08:00:00Z") },
       ]);
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0, rollups: 0 });
     });
   });
 
@@ -183,7 +183,7 @@ describe("settleEnd", () => {
       const settle = form("unreadable", rows[0]!.subject, { answer: "leave-out" });
       expect(await settleEnd(scope, settle, settling)).toMatchObject({ ok: true });
       expect(await listEnds(scope, { ...all, code: "unreadable" }, page)).toEqual([]);
-      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0 });
+      expect(await rebuild(scope)).toEqual({ timelines: 0, tickets: 0, receipts: 0, rollups: 0 });
     });
   });
 

@@ -29,15 +29,15 @@ const parts = [
 describe("cardDays", () => {
   const [monday, tuesday, wednesday] = cardDays({ parts, confirms: [] }, rules);
 
-  test("has a day for each workday with time, attended without meals", () => {
-    expect(monday).toMatchObject({ date: "2026-05-11", attendedSeconds: 8 * 3600, runs: false });
-    expect(tuesday).toMatchObject({ date: "2026-05-12", attendedSeconds: 2 * 3600 });
+  test("has a day for each workday with time, present from coming in to leaving", () => {
+    expect(monday).toMatchObject({ date: "2026-05-11", presentSeconds: 8.5 * 3600, runs: false });
+    expect(tuesday).toMatchObject({ date: "2026-05-12", presentSeconds: 2 * 3600 });
     expect(cardDays({ parts: [], confirms: [] }, rules)).toEqual([]);
   });
 
   test("a day that still runs counts until now, and is not agreed to yet", () => {
     expect(wednesday).toMatchObject({ runs: true, digest: null, agreement: null });
-    expect(wednesday?.attendedSeconds).toBe(2 * 3600 + 2 * 3600);
+    expect(wednesday?.presentSeconds).toBe(2 * 3600 + 2 * 3600);
   });
 
   test("knows who agreed to the day as it is", () => {
@@ -52,7 +52,7 @@ describe("cardDays", () => {
 
   test("shared time counts once", () => {
     const shared = [...parts, part(at("11T06:00"), at("11T10:00"), { item: 1 })];
-    expect(cardDays({ parts: shared, confirms: [] }, rules)[0]?.attendedSeconds).toBe(8 * 3600);
+    expect(cardDays({ parts: shared, confirms: [] }, rules)[0]?.presentSeconds).toBe(8.5 * 3600);
   });
 });
 

@@ -8,7 +8,7 @@ const signature = { atMs: 1, by: "Ada Berg" };
 function day(date: string, other: Partial<CardDay> = {}): CardDay {
   const open = { worker: null, lead: null, hasLapsed: false };
   const bounds = { startMs: 0, endMs: 1, parts: [], runs: false };
-  return { date, attendedSeconds: 3600, digest, agreement: open, ...bounds, ...other };
+  return { date, presentSeconds: 3600, digest, agreement: open, ...bounds, ...other };
 }
 function card(other: Partial<CardRead> = {}): CardRead {
   return {
@@ -30,7 +30,7 @@ describe("cardLines", () => {
     expect(toLookAt).toMatchObject([
       {
         state: "to look at",
-        attendedSeconds: 7200,
+        presentSeconds: 7200,
         toAgree: [`1042 2026-05-11 ${digest}`, `1042 2026-05-12 ${digest}`],
       },
     ]);

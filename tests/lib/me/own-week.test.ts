@@ -55,7 +55,7 @@ describe("ownWeek", () => {
       before: "2026-05-04",
       after: null,
       plannedSeconds: (8.5 + 4) * 3600,
-      tappedSeconds: 8 * 3600 + 20 * 60,
+      tappedSeconds: 8.5 * 3600,
     });
     expect(own.days.map(({ date }) => date)).toHaveLength(7);
   });
@@ -69,7 +69,7 @@ describe("ownWeek", () => {
   test("sums the period that the week lies in", () => {
     expect(own.period).toMatchObject({
       label: "Mon 4 May to Sun 17 May",
-      tappedSeconds: 16 * 3600 + 20 * 60,
+      tappedSeconds: 16.5 * 3600,
       isClosed: false,
     });
   });
