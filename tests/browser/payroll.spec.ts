@@ -42,7 +42,8 @@ test("the file's decimal hours add up in every row", async ({ page, signIns }) =
 
 test("a worker sees the own hours, and nobody else's", async ({ page, signIns }) => {
   await enterOffice(page, signIns, "worker");
-  await expect(page).toHaveURL(/\/hours/);
+  await expect(page).toHaveURL(/\/me$/);
+  await page.goto("/hours");
   await expect(page.getByText("Your hours")).toBeVisible();
   expect((await page.request.get("/hours/csv")).status()).toBe(403);
   expect((await page.goto("/people"))!.status()).toBe(403);
