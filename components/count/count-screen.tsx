@@ -24,7 +24,9 @@ export function CountScreen({ state, view, tap, screen }: SeenBench & { screen: 
   const counted = counts.good + counts.rework + counts.scrap;
   return (
     <KioskFrame state={state}>
-      <div className="grid min-h-0 grid-rows-[84px_112px_minmax(0,1fr)_auto]">
+      <div
+        className={`grid min-h-0 ${keying ? "landscape:grid-rows-[68px_48px_minmax(0,1fr)_auto]" : ""} grid-rows-[84px_112px_minmax(0,1fr)_auto]`}
+      >
         <Ask
           className="text-[42px] portrait:text-k-4"
           book={t("says", { open })}
@@ -35,10 +37,10 @@ export function CountScreen({ state, view, tap, screen }: SeenBench & { screen: 
           ticket={open}
           count={counts}
           label={t("counted", { counted, open })}
-          className="[--h:112px]"
+          className={keying ? "[--h:112px] landscape:[--h:48px]" : "[--h:112px]"}
         />
         <Leaves
-          className="pt-5"
+          className={keying ? "pt-5 landscape:pt-2.5" : "pt-5"}
           book={
             keying ? (
               <CountPad keying={keying} tap={tap} />
