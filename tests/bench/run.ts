@@ -6,6 +6,7 @@ import { reportOf } from "@/tests/bench/report";
 import { batches, empties, nextTap, signIns, singles } from "@/tests/bench/shots";
 import { makeState, type State } from "@/tests/bench/state";
 import { keepStatements, recordStatements, replay } from "@/tests/bench/statements";
+import { kioskWeight } from "@/tests/bench/weight";
 import { APP, ask, cloneDatabase, OWNER, urlFor } from "@/tests/setup/clone";
 import { makeTemplate } from "@/tests/setup/template";
 
@@ -53,6 +54,7 @@ say("the same statements through pgbench");
 const replayed = await onClone(replayBookings);
 const measured = { empty, single, steady, batched, signedIn, replayed };
 process.stdout.write(`\n${await machine()}\n${reportOf(measured)}`);
+process.stdout.write(`\n${kioskWeight()}`);
 
 /** What it was measured on, and how busy that was with other things as well. */
 async function machine(): Promise<string> {
