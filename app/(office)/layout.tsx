@@ -8,6 +8,7 @@ import { OfficeMenu } from "@/components/shell/office-menu";
 import { Purfling } from "@/components/ui/purfling";
 import { roleWords } from "@/lib/access/role-words";
 import { roomsFor } from "@/lib/access/rooms";
+import "@/app/styles/analytics.css";
 import "@/app/styles/desk.css";
 import "@/app/styles/ends.css";
 import "@/app/styles/paper.css";

@@ -13,7 +13,7 @@ export function OfficeNav({ label, rooms }: { label: string; rooms: readonly Roo
         <Link
           key={room.path}
           href={room.path}
-          aria-current={isIn(path, room.path) ? "page" : undefined}
+          aria-current={isInRoom(path, room) ? "page" : undefined}
         >
           {room.name}
         </Link>
@@ -21,5 +21,8 @@ export function OfficeNav({ label, rooms }: { label: string; rooms: readonly Roo
     </nav>
   );
 }
+
+const isInRoom = (path: string, { path: own, also }: Room) =>
+  isIn(path, own) || (also !== undefined && isIn(path, also));
 
 const isIn = (path: string, room: string) => path === room || path.startsWith(`${room}/`);

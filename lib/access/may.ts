@@ -56,6 +56,8 @@ export const permissions = {
   "segments.name-people": { payroll: "site" },
   "records.correct": { lead: "cells", payroll: "site" },
   "standards.read": { planner: "site", lead: "site" },
+  "analytics.see": { admin: "site", planner: "site", lead: "cells" },
+  "analytics.read": { planner: "site", lead: "site" },
   calculate: { planner: "site" },
   "calculate.pay": { payroll: "site" },
 } as const satisfies Record<string, Partial<Record<Role, Reach>>>;

@@ -4,6 +4,8 @@ import { type Action, type Held, reachOf } from "@/lib/access/may";
 export interface Room {
   name: string;
   path: string;
+  /** Another page of the same room. */
+  also?: string;
   may: Action;
   /** Which leaf it stands on: what is known beforehand, or what happens. */
   leaf: "book" | "day";
@@ -15,6 +17,13 @@ const rooms: readonly Room[] = [
   { name: "Tickets", path: "/tickets", may: "tickets.see", leaf: "book" },
   { name: "Kiosks", path: "/kiosks", may: "kiosks.see", leaf: "book" },
   { name: "Floor", path: "/floor", may: "floor.see", leaf: "day" },
+  {
+    name: "Seam",
+    path: "/analytics/seam",
+    also: "/analytics/cells",
+    may: "analytics.see",
+    leaf: "day",
+  },
   { name: "Loose ends", path: "/ends", may: "ends.see", leaf: "day" },
   { name: "Hours", path: "/hours", may: "hours.see", leaf: "day" },
 ];

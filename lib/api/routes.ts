@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import type { Action } from "@/lib/access/may";
+import { cellsQuery, operationsQuery } from "@/lib/analytics/schema";
 import type { answers } from "@/lib/api/schema";
 import { segmentsQuery } from "@/lib/api/segments";
 import { splitRequest } from "@/lib/api/split";
@@ -131,6 +132,28 @@ const integrationRoutes: ApiRoute[] = [
     may: "segments.read",
     query: segmentsQuery,
     answer: "SegmentPage",
+  },
+  {
+    method: "get",
+    path: "/api/v1/analytics/operations",
+    name: "readOperations",
+    summary:
+      "Standard against actual by operation, on finished work (`matched`) or on all time booked. " +
+      "Without `to` up to now, without `from` the four weeks before `to`; `to` is exclusive.",
+    actor: "key",
+    may: "analytics.read",
+    query: operationsQuery,
+    answer: "OperationsAnswer",
+  },
+  {
+    method: "get",
+    path: "/api/v1/analytics/cells",
+    name: "readCells",
+    summary: "Attendance, standard and actual by cell; the same days and bases.",
+    actor: "key",
+    may: "analytics.read",
+    query: cellsQuery,
+    answer: "CellsAnswer",
   },
   {
     method: "post",

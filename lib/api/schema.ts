@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { cellsAnswer, operationsAnswer } from "@/lib/analytics/schema";
 import { segmentPage } from "@/lib/api/segments";
 import { splitAnswer } from "@/lib/api/split";
 import { birthRecord, ticketPage } from "@/lib/api/tickets";
@@ -47,6 +48,8 @@ export const answers = {
   TicketPage: ticketPage,
   BirthRecord: birthRecord,
   SegmentPage: segmentPage,
+  OperationsAnswer: operationsAnswer,
+  CellsAnswer: cellsAnswer,
   Split: splitAnswer,
   CodeReading: codeReading,
   PayAnswer: payAnswer,
