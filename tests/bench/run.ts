@@ -1,5 +1,6 @@
 import { cpus, loadavg, totalmem } from "node:os";
 import { openPool, wrap } from "@/db/client";
+import { benchAnalytics } from "@/tests/bench/analytics";
 import { fire, type Run } from "@/tests/bench/drive";
 import { FOLDER, given, onClone, onServer, STATE } from "@/tests/bench/ground";
 import { reportOf } from "@/tests/bench/report";
@@ -55,6 +56,7 @@ const replayed = await onClone(replayBookings);
 const measured = { empty, single, steady, batched, signedIn, replayed };
 process.stdout.write(`\n${await machine()}\n${reportOf(measured)}`);
 process.stdout.write(`\n${kioskWeight()}`);
+process.stdout.write(`\n${await benchAnalytics(server, say)}`);
 
 /** What it was measured on, and how busy that was with other things as well. */
 async function machine(): Promise<string> {
