@@ -19,13 +19,13 @@ const WIDTHS = {
   earned: 6.5,
   gauge: 14,
   actual: 5.5,
-  word: 8.5,
+  word: 8,
   efficiency: 5,
-  without: 5,
-  rework: 6,
+  without: 4.5,
+  rework: 5.5,
   utilization: 3.5,
   productivity: 4,
-  trend: 5.5,
+  trend: 7,
 };
 
 /** Cells on one scale, with what their attendance was made of. Analytics stop at the cell. */
@@ -52,12 +52,12 @@ export function CellsLedger({
           <NumberHead>Earned</NumberHead>
           <th scope="col">
             <span className="sr-only">Earned and actual</span>
-            <SeamAxis scaleSeconds={scaleSeconds} unitShown />
+            <SeamAxis scaleSeconds={scaleSeconds} unitShown className="axis-sparse" />
           </th>
           <NumberHead>Actual</NumberHead>
           <Head>Over or under</Head>
           <NumberHead>Efficiency</NumberHead>
-          <NumberHead>No rework</NumberHead>
+          <NumberHead title="Efficiency without rework">No rework</NumberHead>
           <NumberHead title="Hours of rework; in brackets what another cell caused">
             Rework
           </NumberHead>

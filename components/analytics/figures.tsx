@@ -8,15 +8,17 @@ export function SeamFigures({ totals, basis }: { totals: SeamTotals; basis: Basi
   return (
     <div className="desk-figures">
       <div>
-        <p className="desk-aside">
+        <p className="desk-aside seam-aside">
           <b>{countOf(work.pieces)}</b>
           <br />
-          {basis === "matched" ? "pieces finished" : "good pieces"}
+          {basis === "matched" ? "pieces through" : "pieces counted"}
         </p>
-        <p className="desk-aside">
+        <p className="desk-aside seam-aside">
           <b>{hoursOf(totals.attendanceSeconds)}</b>
           <br />
-          hours attended, of it {hoursOf(totals.indirectSeconds)} indirect
+          hours attended
+          <br />
+          of it {hoursOf(totals.indirectSeconds)} indirect
         </p>
         <p className="desk-figure text-standard-ink">
           <span>
@@ -44,7 +46,7 @@ export function SeamFigures({ totals, basis }: { totals: SeamTotals; basis: Basi
 
 function Ratio({ name, of, value }: { name: string; of: string; value: number | null }) {
   return (
-    <p className="desk-aside">
+    <p className="desk-aside seam-aside">
       <b>{finePercentOf(value)}</b>
       <br />
       {name}

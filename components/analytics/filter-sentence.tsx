@@ -49,9 +49,10 @@ export function SeamSentence({ filter, models, cells, stages }: SentenceProps) {
       day={
         <>
           <DaysChoice filter={filter} />
-          {" by operation, or "}
-          <Link href={seamAddress("/analytics/cells", filter, CELLS_ONLY)}>by cell</Link>{" "}
-          <SaveLink path="/analytics/seam/csv" filter={{ ...filter, open: "", over: "" }} />
+          <span className="seam-links">
+            <Link href={seamAddress("/analytics/cells", filter, CELLS_ONLY)}>By cell</Link>
+            <SaveLink path="/analytics/seam/csv" filter={{ ...filter, open: "", over: "" }} />
+          </span>
         </>
       }
     />
@@ -75,9 +76,10 @@ export function CellsSentence({ filter }: { filter: SeamFilter }) {
       day={
         <>
           <DaysChoice filter={filter} />
-          {" by cell, or "}
-          <Link href={seamAddress("/analytics/seam", filter, {})}>by operation</Link>{" "}
-          <SaveLink path="/analytics/cells/csv" filter={filter} />
+          <span className="seam-links">
+            <Link href={seamAddress("/analytics/seam", filter, {})}>By operation</Link>
+            <SaveLink path="/analytics/cells/csv" filter={filter} />
+          </span>
         </>
       }
     />
@@ -113,7 +115,7 @@ function withAll(all: string, names: readonly string[]): (readonly [string, stri
 /** Saves a table as a file. */
 export function SaveLink({ path, filter }: { path: string; filter: SeamFilter }) {
   return (
-    <a className="hours-save" href={seamAddress(path, filter, {})} download>
+    <a href={seamAddress(path, filter, {})} download>
       Save as CSV
     </a>
   );

@@ -44,6 +44,14 @@ function OverNote({
       <Link href={href} scroll={false} aria-expanded={isOpen}>
         {isOpen ? "Hide them" : "Show them"}
       </Link>
+      {isOpen && (
+        <>
+          {", or "}
+          <a href={seamAddress("/analytics/seam/csv", filter, {})} download>
+            save as CSV
+          </a>
+        </>
+      )}
     </>
   );
 }
@@ -56,12 +64,11 @@ function BetweenNote({ totals: { matched, booked, between } }: { totals: SeamTot
   const moved = signedHours(between.movedSeconds);
   return (
     <p>
-      Finished work {hoursOf(matched.directSeconds)} h and{" "}
-      {signedHours(between.inProcessActualSeconds)} h in process are the{" "}
-      {hoursOf(booked.directSeconds)} h booked; earned {hoursOf(matched.earnedSeconds)},{" "}
+      Finished work took {hoursOf(matched.directSeconds)} h; with{" "}
+      {signedHours(between.inProcessActualSeconds)} h in process that is all{" "}
+      {hoursOf(booked.directSeconds)} h booked. It earned {hoursOf(matched.earnedSeconds)} h; with{" "}
       {signedHours(between.inProcessEarnedSeconds)} in process
-      {moved === "0.0" ? "" : ` and ${moved} moved between cells`} are{" "}
-      {hoursOf(booked.earnedSeconds)}.
+      {moved === "0.0" ? "" : ` and ${moved} moved between cells`}, {hoursOf(booked.earnedSeconds)}.
     </p>
   );
 }

@@ -11,16 +11,16 @@ import type { Opened } from "@/lib/analytics/opened";
 import { seamScale } from "@/lib/seam/scale";
 
 const WIDTHS = {
-  code: 5,
-  name: 18,
-  pieces: 5.5,
-  standard: 5.5,
-  earned: 6,
-  gauge: 20,
-  actual: 6,
-  word: 11,
-  efficiency: 8,
-  trend: 11,
+  code: 4.5,
+  name: 16,
+  pieces: 5,
+  standard: 5,
+  earned: 5.5,
+  gauge: 28,
+  actual: 5.5,
+  word: 10,
+  efficiency: 7,
+  trend: 9.5,
   open: 4,
 };
 

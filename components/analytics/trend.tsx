@@ -13,6 +13,7 @@ export function Trend({ values }: { values: readonly (number | null)[] }) {
       role="img"
       aria-label={`Efficiency by week, the oldest first: ${spoken}`}
       viewBox={`-4 -4 ${SIZE.width + 8} ${SIZE.height + 8}`}
+      preserveAspectRatio="none"
       className="trend"
     >
       <line x1={0} x2={SIZE.width} y1={targetY} y2={targetY} className="trend-target" />
@@ -22,7 +23,7 @@ export function Trend({ values }: { values: readonly (number | null)[] }) {
           points={points.map(({ x, y }) => `${x.toFixed(1)},${y.toFixed(1)}`).join(" ")}
         />
       ))}
-      <circle cx={last.x} cy={last.y} r={3} />
+      <line x1={last.x} x2={last.x} y1={last.y} y2={last.y} className="trend-last" />
     </svg>
   );
 }

@@ -52,7 +52,11 @@ export default async function SeamPage({ searchParams }: SeamProps) {
         <>
           <SeamFigures totals={totals} basis={basis} />
           <SeamNotes filter={filter} totals={totals} over={overSums(board.over)} />
-          {filter.over && <OverLedger over={board.over} operations={board.operations} />}
+          {filter.over && (
+            <div className="seam-over">
+              <OverLedger over={board.over} operations={board.operations} />
+            </div>
+          )}
           <SeamLedger lines={lines} filter={filter} opened={opened} timeZone={timeZone} />
         </>
       ) : (
