@@ -1,7 +1,7 @@
 import Link from "next/link";
 import { useState } from "react";
+import { plannedWords } from "@/components/me/planned-words";
 import { SeamGauge } from "@/components/seam/gauge";
-import { hourWords } from "@/components/seam/verdict-tag";
 import { Icon } from "@/components/ui/icon";
 import { NumberCell } from "@/components/ui/table";
 import type { CardLine } from "@/lib/agreement/page";
@@ -60,7 +60,7 @@ export function CardRow({
           size="cell"
           state={line.runningDays > 0 ? "live" : "finished"}
           scaleSeconds={scaleSeconds}
-          words={hourWords}
+          words={plannedWords}
           name={`${name}, planned and present`}
         />
       </td>

@@ -1,3 +1,4 @@
+import Link from "next/link";
 import { Choice } from "@/components/shell/choice";
 import { SentenceForm } from "@/components/shell/sentence-form";
 import type { HoursFilter } from "@/lib/hours/filter";
@@ -7,11 +8,14 @@ export function HoursFilterSentence({
   filter,
   cells,
   exports,
+  agrees,
 }: {
   filter: HoursFilter;
   /** Empty for someone who sees only their own. */
   cells: readonly string[];
   exports: boolean;
+  /** True for a lead, who agrees to the cards of the own cells. */
+  agrees: boolean;
 }) {
   const { from, to, cell } = filter;
   return (
@@ -45,6 +49,11 @@ export function HoursFilterSentence({
           {" to "}
           <input key={`to ${to}`} name="to" type="date" aria-label="Last day" defaultValue={to} />{" "}
           <button type="submit">Show</button>
+          {agrees && (
+            <Link className="hours-save ml-4" href="/hours/agreement">
+              Agree to cards
+            </Link>
+          )}
           {exports && (
             <a
               className="hours-save"

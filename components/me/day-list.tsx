@@ -1,6 +1,6 @@
 import Link from "next/link";
+import { plannedWords } from "@/components/me/planned-words";
 import { SeamGauge } from "@/components/seam/gauge";
-import { hourWords } from "@/components/seam/verdict-tag";
 import { Icon } from "@/components/ui/icon";
 import type { MeDay } from "@/lib/me/view";
 import { decimalHour, decimalHours } from "@/lib/time/format";
@@ -45,7 +45,7 @@ export function DayList({
               size="row"
               flush
               state={day.runs || day.tappedSeconds === null ? "live" : "finished"}
-              words={hourWords}
+              words={plannedWords}
               scaleSeconds={scaleSeconds}
               name={`${day.label}, planned and tapped`}
             />

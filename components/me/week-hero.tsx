@@ -1,6 +1,6 @@
 import Link from "next/link";
+import { plannedWords } from "@/components/me/planned-words";
 import { SeamGauge } from "@/components/seam/gauge";
-import { hourWords } from "@/components/seam/verdict-tag";
 import type { OwnSums, OwnWeek } from "@/lib/me/own-week";
 import { seamScale } from "@/lib/seam/scale";
 import { decimalHour } from "@/lib/time/format";
@@ -25,7 +25,7 @@ export function WeekHero({ week: { week, period } }: { week: OwnWeek }) {
         size="phone"
         flush
         state={week.isNow ? "live" : "finished"}
-        words={hourWords}
+        words={plannedWords}
         scaleSeconds={seamScale([pair])}
         name="The week, planned and tapped"
       />

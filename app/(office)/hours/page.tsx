@@ -58,6 +58,7 @@ export default async function HoursPage({ searchParams }: HoursProps) {
         filter={address}
         cells={reach === "self" ? [] : allCells.map(({ name }) => name)}
         exports={reachOf(person.held, "hours.export") !== null}
+        agrees={reachOf(person.held, "hours.agree") !== null}
       />
       {shown.length > 0 ? (
         <>
