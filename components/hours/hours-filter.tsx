@@ -55,6 +55,11 @@ export function HoursFilterSentence({
             </Link>
           )}
           {exports && (
+            <Link className="hours-save" href="/hours/cards">
+              Cards of a period
+            </Link>
+          )}
+          {exports && (
             <a
               className="hours-save"
               href={`/hours/csv?${new URLSearchParams({ from, to, cell })}`}

@@ -44,7 +44,7 @@ export async function readCards(scope: Scope, wanted: CardsWanted): Promise<Card
   const { from, to } = wanted;
   const book = await readPolicyBook(scope);
   const clock = zoneClock(wanted.timeZone);
-  const window = windowsOf(wanted, book, clock);
+  const window = windowsOf(wanted, book.versions, clock);
   const asked = { ...window, workers: wanted.workers ?? null, homeCells: wanted.homeCells ?? null };
   const people = await listCardWorkers(scope, asked, from);
   const times = await readTime(scope, people, window);
@@ -72,10 +72,13 @@ function weeksByWorker(
     worker !== null && apart.has(worker) ? governedWeeks(book, worker, dates, clock) : ofSite;
 }
 
-/** A workday may begin at any hour of its date, so the period reaches into the day after. */
-function windowsOf(
-  { from, to }: CardsWanted,
-  { versions }: PolicyBook,
+/**
+ * The windows of time that a period's cards need. A workday may begin at any hour of its date, so
+ * the period reaches into the day after.
+ */
+export function windowsOf(
+  { from, to }: { from: string; to: string },
+  versions: PolicyBook["versions"],
   clock: ZoneClock,
 ): Pick<TimeWanted, "period" | "around"> {
   const midnight = (date: string) => clock.secondOf(date, "00:00") * 1000;

@@ -153,3 +153,20 @@ async function periodsWhere(
     isClosed: revision !== null && reopened === null,
   }));
 }
+
+/** Sums what everybody was planned to attend on some dates, in seconds, by worker's id. */
+export async function sumPlanned(
+  { db, siteId }: Scope,
+  { from, to }: { from: string; to: string },
+): Promise<Map<string, number>> {
+  const { rows } = await db.execute<{ worker: string; seconds: number }>(sql`
+    select p.worker_id as worker, sum(p.seconds)::integer as seconds
+    from (
+      select distinct on (s.worker_id, s.work_on)
+        s.worker_id, extract(epoch from s.end_at - s.start_at) as seconds
+      from planned_shifts s
+      where s.site_id = ${siteId} and s.work_on >= ${from} and s.work_on < ${to}
+      order by s.worker_id, s.work_on, s.seq desc) p
+    group by p.worker_id`);
+  return new Map(rows.map(({ worker, seconds }) => [worker, seconds]));
+}
