@@ -138,6 +138,7 @@ function changesNote(count: number): string {
 }
 
 function openNote(adjustments: number, isOver: boolean): string {
-  const changes = adjustments === 0 ? "" : `, with ${adjustments} corrections of closed days`;
+  const corrections = adjustments === 1 ? "1 correction" : `${adjustments} corrections`;
+  const changes = adjustments === 0 ? "" : `, with ${corrections} of closed days`;
   return isOver ? `all cards as they are now${changes}` : `can be closed when it is over${changes}`;
 }
