@@ -1,6 +1,12 @@
 import { type CardState, cardState, isSignedByWorker } from "@/lib/agreement/card-state";
-import { type DayPart, dayText } from "@/lib/agreement/day-text";
-import { agreementOf, type Confirmed, type DayAgreement } from "@/lib/agreement/signatures";
+import { type AgreedDay, type DayPart, dayText } from "@/lib/agreement/day-text";
+import {
+  agreementOf,
+  type Confirmed,
+  type DayAgreement,
+  readAgreement,
+} from "@/lib/agreement/signatures";
+import { groupBy } from "@/lib/group";
 import type { Warning } from "@/lib/limits/shift-facts";
 import { spansOf } from "@/lib/periods/spans";
 import type { Dates, GovernedWeek } from "@/lib/policies/governed";
@@ -70,15 +76,18 @@ export function cardOf(time: WorkerTime, rules: CardRules): Card {
   const spans = spansOf(parts, rules.nowMs);
   const stated = workerStatement(spans, weeks, rules.dates, rules.clock);
   const bounds = workdays(weeks, rules.dates);
+  const statedOn = groupBy(stated.days, ({ date }) => date);
+  const confirmsOn = groupBy(confirms, ({ subject }) => readAgreement(subject)?.date);
   const days = bounds.flatMap(({ policy, ...day }) => {
-    const own = stated.days.filter(({ date }) => date === day.date);
-    const isTouched = parts.some(
+    const own = parts.filter(
       ({ startMs, endMs }) => startMs < day.endMs && (endMs ?? rules.nowMs) > day.startMs,
     );
-    if (own.length === 0 && !isTouched) return [];
-    const text = dayText(parts, { ...day, policy });
-    const agreement = text === null ? null : agreementTo(text, day.date, confirms, rules);
-    return [{ ...day, agreement, stated: own }];
+    const paid = statedOn.get(day.date) ?? [];
+    if (own.length === 0 && paid.length === 0) return [];
+    const about = confirmsOn.get(day.date) ?? [];
+    return [
+      { ...day, agreement: agreementTo(own, { ...day, policy }, about, rules), stated: paid },
+    ];
   });
   const [first, last] = [bounds[0], bounds.at(-1)];
   const ends = time.ends.filter(({ atMs }) => {
@@ -96,16 +105,18 @@ export function cardOf(time: WorkerTime, rules: CardRules): Card {
   };
 }
 
-/** Most days nobody agreed to yet: their digest is not worked out. */
+/** Null while some of the day runs. Where nobody agreed to it, no digest is worked out. */
 function agreementTo(
-  text: string,
-  date: string,
-  confirms: readonly Confirmed[],
+  parts: readonly DayPart[],
+  day: AgreedDay,
+  about: readonly Confirmed[],
   { digestOf }: CardRules,
-): DayAgreement {
-  const about = confirms.filter(({ subject }) => subject.startsWith(`workday:${date}:`));
-  const digest = about.length > 0 ? digestOf(text) : "";
-  return agreementOf(about, { date, digest });
+): DayAgreement | null {
+  const { date } = day;
+  if (parts.some(({ endMs }) => endMs === null)) return null;
+  if (about.length === 0) return agreementOf([], { date, digest: "" });
+  const text = dayText(parts, day);
+  return text === null ? null : agreementOf(about, { date, digest: digestOf(text) });
 }
 
 /** Every workday of the range once, with the policy that governs it; in a changed one the later. */
