@@ -5,7 +5,7 @@ import { isRoot } from "@/scripts/ground/place.mjs";
 export default defineConfig({
   testDir: "tests/browser",
   outputDir: "test-results",
-  workers: 2, // a shift at the bench is mostly waiting: files of two people share two cores
+  workers: 1, // two cores: the browser and the server that it talks to
   forbidOnly: true,
   timeout: 120_000,
   expect: { timeout: 10_000 },
