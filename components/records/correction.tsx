@@ -88,7 +88,7 @@ function CorrectionForm({
         required
       />
       <div className="record-ways">
-        {deeds.map(({ deed, label, tone }) => (
+        {deeds.map(({ deed, label, tone = "solid" }) => (
           <button
             key={deed}
             type="submit"

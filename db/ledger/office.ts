@@ -62,15 +62,16 @@ async function tryOnce(
       const within = { ...scope, db };
       const lost = await lockAnswered(within, deed.answers ?? []);
       const context = await readContext(within, askedByDeed(acts, deed.now));
-      const isSent = context.known.length > 0;
-      const refusal = isOutside(context, acts, deed) ?? (isSent ? null : deed.check?.(context));
-      if (refusal) return { ok: false, problem: refusal };
-      if (lost && !isSent) return no("conflict", SETTLED);
+      const outside = isOutside(context, acts, deed);
+      if (outside) return { ok: false, problem: outside };
       const entry = { by: deed.by, nowMs: deed.now.getTime() };
       const decided = decideOffice(acts, context, entry);
       if (!decided.ok) return decided;
       const { rows, timelines } = decided.value;
       if (rows.length === 0) return ok(undefined);
+      if (lost) return no("conflict", SETTLED);
+      const refusal = deed.check?.(context);
+      if (refusal) return { ok: false, problem: refusal };
       const booking = {
         siteId: scope.siteId,
         kioskId: null,

@@ -77,11 +77,11 @@ test("a lead puts a day right: takes a record out, settles the end, moves the st
   await page.goto(address);
   const day = new URL(address).searchParams.get("day")!;
   await correct(page, /^Correct: shift started/, {
-    time: `${day}T06:40`,
+    time: `${day}T05:40`,
     reason: "was in earlier",
     act: "Move it there",
   });
-  await expect(page.getByText("moved to 06:40:00")).toBeVisible();
+  await expect(page.getByText("moved to 05:40:00")).toBeVisible();
   await expectAccessible(page);
 });
 
