@@ -18,14 +18,14 @@ const WIDTHS = {
   unassigned: 7,
   earned: 6.5,
   gauge: 14,
-  actual: 5.5,
-  word: 8,
+  actual: 5,
+  word: 9,
   efficiency: 5,
-  without: 4.5,
-  rework: 5.5,
-  utilization: 3.5,
-  productivity: 4,
-  trend: 7,
+  without: 4.9,
+  rework: 6,
+  utilization: 3.8,
+  productivity: 3.8,
+  trend: 5.5,
 };
 
 /** Cells on one scale, with what their attendance was made of. Analytics stop at the cell. */
@@ -40,7 +40,10 @@ export function CellsLedger({
 }) {
   const scaleSeconds = seamScale(lines.flatMap(({ line }) => line.pair ?? []));
   return (
-    <Ledger caption="Attendance, standard and actual by cell" className="mirror-ledger">
+    <Ledger
+      caption="Attendance, standard and actual by cell"
+      className="mirror-ledger cells-ledger"
+    >
       <Columns widths={WIDTHS} />
       <thead>
         <tr>

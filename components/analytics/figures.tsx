@@ -6,7 +6,7 @@ import { countOf, finePercentOf, hoursOf } from "@/lib/analytics/words";
 export function SeamFigures({ totals, basis }: { totals: SeamTotals; basis: Basis }) {
   const work = totals[basis];
   return (
-    <div className="desk-figures">
+    <div className="desk-figures seam-figures">
       <div>
         <p className="desk-aside seam-aside">
           <b>{countOf(work.pieces)}</b>

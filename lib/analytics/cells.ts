@@ -7,7 +7,7 @@ import { UNKNOWN } from "@/lib/matching/parts";
 import { sum } from "@/lib/sum";
 
 /** What a cell's attendance was made of; attendance = direct + indirect + rest + unassigned. */
-export type CellTime = Omit<AttendanceRow, "place" | "cell"> & { attendanceSeconds: number };
+type CellTime = Omit<AttendanceRow, "place" | "cell"> & { attendanceSeconds: number };
 
 /** A cell with what it attended, took and earned. */
 export interface CellLine {
