@@ -24,7 +24,7 @@ function DayLine({ day, timeZone }: { day: ShownDay; timeZone: string }) {
         <td data-book="" colSpan={2} className="desk-cut text-right text-ink-2">
           {reference ? `changes ${reference}` : `by ${policy}`}
         </td>
-        <td className="hours-strip">
+        <td className="period-strip">
           {stretches.length > 0 ? (
             <DayStrip
               stretches={stretches}

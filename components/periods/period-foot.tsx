@@ -48,8 +48,11 @@ export function PeriodFoot({
               <th scope="row">{name}</th>
               <td data-standard="">{left}</td>
               <td data-actual="">{right}</td>
-              <td className={isMatched ? "text-ink-2" : "font-[650] text-over"}>
-                <Icon name={isMatched ? "good" : "over"} /> {isMatched ? "the same" : "differs"}
+              <td>
+                <span className={`tag ${isMatched ? "text-ink-2" : "font-[650] text-over"}`}>
+                  <Icon name={isMatched ? "good" : "over"} />
+                  {isMatched ? "the same" : "differs"}
+                </span>
               </td>
             </tr>
           ))}

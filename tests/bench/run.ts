@@ -1,6 +1,7 @@
 import { cpus, loadavg, totalmem } from "node:os";
 import { openPool, wrap } from "@/db/client";
 import { benchAnalytics } from "@/tests/bench/analytics";
+import { benchClose } from "@/tests/bench/close";
 import { fire, type Run } from "@/tests/bench/drive";
 import { FOLDER, given, onClone, onServer, STATE } from "@/tests/bench/ground";
 import { reportOf } from "@/tests/bench/report";
@@ -57,6 +58,7 @@ const measured = { empty, single, steady, batched, signedIn, replayed };
 process.stdout.write(`\n${await machine()}\n${reportOf(measured)}`);
 process.stdout.write(`\n${kioskWeight()}`);
 process.stdout.write(`\n${await benchAnalytics(server, say)}`);
+process.stdout.write(`\n${await benchClose(server, say)}`);
 
 /** What it was measured on, and how busy that was with other things as well. */
 async function machine(): Promise<string> {
