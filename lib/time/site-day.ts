@@ -64,10 +64,36 @@ export function rangeBounds(from: string, to: string, rules: readonly DayRule[])
 /** The production day that an instant belongs to, named by the date on which it begins. */
 export function productionDay(atMs: number, rules: readonly DayRule[]): string {
   const atSecond = Math.floor(atMs / 1000);
-  let date = addDays(localDate(atMs, ruleAt(rules, atMs).timeZone), 1);
-  while (dayStart(date, rules) > atSecond) date = addDays(date, -1);
-  return date;
+  const near = daysNear(Math.floor(atSecond / DAY_SECONDS), rules);
+  const day = near.findLast(({ start }) => start <= atSecond);
+  assert(day !== undefined, "productionDay: a day begins within two days before any instant");
+  return day.date;
 }
+
+const DAY_SECONDS = 86_400;
+
+/**
+ * The production days that may hold an instant of a day of UTC: a zone is at most 14 hours off, and a
+ * day may begin late in the evening before or after. Asked for each record and slow to find out.
+ */
+function daysNear(
+  utcDay: number,
+  rules: readonly DayRule[],
+): readonly { date: string; start: number }[] {
+  const days = near.get(rules) ?? new Map<number, { date: string; start: number }[]>();
+  near.set(rules, days);
+  const known = days.get(utcDay);
+  if (known) return known;
+  const date = localDate(utcDay * DAY_SECONDS * 1000, "UTC");
+  const found = [-3, -2, -1, 0, 1, 2].map((days) => {
+    const day = addDays(date, days);
+    return { date: day, start: dayStart(day, rules) };
+  });
+  days.set(utcDay, found);
+  return found;
+}
+
+const near = new WeakMap<readonly DayRule[], Map<number, { date: string; start: number }[]>>();
 
 /** The production days that a stretch of epoch seconds touches, each with its bounds; in order. */
 export function daysTouched(
