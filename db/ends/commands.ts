@@ -70,7 +70,7 @@ function receiptOf({ code, subject, workerId, kioskId, atMs }: EndFound) {
 }
 
 /** What decides the ways to settle a loose end at a moment. */
-export function endFacts(
+function endFacts(
   end: EndFound,
   { rules, now }: { rules: readonly SiteRules[]; now: Date },
 ): EndFacts {

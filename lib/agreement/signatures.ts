@@ -7,7 +7,7 @@ export interface Confirmed {
 }
 
 /** Somebody's agreement to a day. */
-export interface Signature {
+interface Signature {
   atMs: number;
   by: string | null;
 }

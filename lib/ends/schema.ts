@@ -4,7 +4,7 @@ import { formId, line } from "@/lib/forms";
 import { looseEndCode, workerNumber } from "@/lib/ledger/schema";
 
 /** Where a page of loose ends ended: rank, instant in epoch milliseconds, code and subject. */
-export const endPosition = z.tuple([
+const endPosition = z.tuple([
   z.number().int(),
   z.number().int(),
   z.string().max(40),
@@ -20,7 +20,6 @@ export const endsFilter = z.object({
   open: z.string().max(340).catch(""),
   after: cursor(endPosition).optional().catch(undefined),
 });
-export type EndsFilter = z.infer<typeof endsFilter>;
 
 /** A local date and time as a field sends it; empty where none was told. */
 export const localTime = z

@@ -12,7 +12,6 @@ export const objectForm = z.strictObject({
   date: dateField,
   message: line(500),
 });
-export type ObjectForm = z.infer<typeof objectForm>;
 
 /** The own answer to when a shift ended. */
 export const leftForm = z.strictObject({

@@ -25,7 +25,7 @@ export interface WeekFacts {
 }
 
 /** What one had on the bench on a day. */
-export interface OwnWork {
+interface OwnWork {
   key: string;
   what: string;
   /** The ticket as people read it; null for other work. */
