@@ -51,6 +51,6 @@ async function readOf(
 }
 
 /** The days of a card as they are paid. */
-export function statedDays({ days }: Card): PaidWorkday[] {
+function statedDays({ days }: Card): PaidWorkday[] {
   return days.flatMap(({ stated }) => stated);
 }

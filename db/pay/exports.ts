@@ -123,7 +123,7 @@ export async function readPayFile(
 }
 
 /** A closing by itself, also one that was reopened since. */
-export async function findRevision(
+async function findRevision(
   scope: Scope,
   { periodId, revision }: { periodId: string; revision: number },
 ) {

@@ -5,7 +5,7 @@ import type { Confirmed } from "@/lib/agreement/signatures";
 import type { CardWorker, WorkerTime } from "@/lib/periods/card";
 
 /** A stretch of instants, epoch milliseconds, half-open. */
-export interface Window {
+interface Window {
   startMs: number;
   endMs: number;
 }

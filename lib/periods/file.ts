@@ -26,7 +26,6 @@ const figures = z.object({
     premiums: z.record(z.string(), hours),
   }),
 });
-export type FileFigures = z.infer<typeof figures>;
 
 /** What stands beside a file, so that it can be checked against what a payroll office took in. */
 export const fileTotals = figures.extend({
@@ -50,7 +49,6 @@ export type FileDay = z.infer<typeof day>;
 
 /** The change of a day that an earlier period paid; with signs. */
 const adjustment = day.extend({ reference: z.string(), period: z.uuid() });
-export type FileAdjustment = z.infer<typeof adjustment>;
 
 const person = figures.extend({
   worker: workerNumber,
