@@ -57,6 +57,13 @@ export const clockEvents = pgTable(
     index("clock_events_corrections")
       .on(t.siteId, t.workerId)
       .where(sql`kind in ('void', 'move', 'insert', 'reassign', 'settle')`),
+    // a sheet asks for what was said of its ticket's steps; those few kinds only are indexed
+    index("clock_events_steps")
+      .on(t.siteId, sql`(body ->> 'ticket')`)
+      .where(sql`kind in ('step-done', 'step-open', 'step-skip', 'hand-over')`),
+    index("clock_events_inserted")
+      .on(t.siteId, sql`(body #>> '{event,ticket}')`)
+      .where(sql`kind = 'insert'`),
     // what may change a pay period that is closed already: few of all
     index("clock_events_late")
       .on(t.siteId, t.receivedAt, t.workerId)

@@ -7,6 +7,7 @@ import {
   operations,
   options,
   routingOperations,
+  routingSteps,
   routings,
   standards,
 } from "@/db/standards/tables";
@@ -15,6 +16,7 @@ import { cells as demoCells } from "@/lib/demo/cells";
 import { models as demoModels } from "@/lib/demo/models";
 import { operations as demoOperations, routingOf } from "@/lib/demo/operations";
 import { standards as demoStandards } from "@/lib/demo/standards";
+import { stepsOf } from "@/lib/demo/steps";
 import { addDays } from "@/lib/time/site-day";
 
 /** The ids under which the demo's factory was written, by the names of the scenario. */
@@ -99,15 +101,24 @@ async function writeRoutings({ db, siteId }: Scope, ids: FactoryIds): Promise<vo
     const routingId = uuidv7();
     const modelId = idOf(ids.models, model.name);
     await db.insert(routings).values({ siteId, id: routingId, modelId, revision: 1 });
+    const routing = routingOf(model).map(({ code }, position) => {
+      return { code, row: { siteId, id: uuidv7(), routingId, position } };
+    });
     await db.insert(routingOperations).values(
-      routingOf(model).map(({ code }, position) => ({
+      routing.map(({ code, row }) => ({ ...row, operationId: idOf(ids.operations, code) })),
+    );
+    const steps = routing.flatMap(({ code, row }) =>
+      stepsOf(model, code).map(({ step, name, minutes }, position) => ({
         siteId,
         id: uuidv7(),
-        routingId,
-        operationId: idOf(ids.operations, code),
+        routingOperationId: row.id,
         position,
+        step,
+        name,
+        seconds: minutes * 60,
       })),
     );
+    if (steps.length > 0) await db.insert(routingSteps).values(steps);
   }
 }
 

@@ -116,6 +116,35 @@ export const routingOperations = pgTable(
 );
 
 /**
+ * The steps in which an operation of a routing is built, as the cell sheet lists them. They are never
+ * changed: another revision of the routing has its own. `seconds` is what a step takes against the
+ * others: its part of the operation's standard, and its weight where steps are tapped off together.
+ */
+export const routingSteps = pgTable(
+  "routing_steps",
+  {
+    siteId: siteId(),
+    id: id(),
+    routingOperationId: uuid().notNull(),
+    position: integer().notNull(),
+    /** What an event names. */
+    step: text().notNull(),
+    name: text().notNull(),
+    seconds: integer().notNull(),
+  },
+  (t) => [
+    primaryKey({ columns: [t.siteId, t.id] }),
+    foreignKey({
+      columns: [t.siteId, t.routingOperationId],
+      foreignColumns: [routingOperations.siteId, routingOperations.id],
+    }),
+    unique().on(t.siteId, t.routingOperationId, t.position),
+    unique().on(t.siteId, t.routingOperationId, t.step),
+    check("routing_steps_seconds", sql`${t.seconds} > 0`),
+  ],
+);
+
+/**
  * Standard times in person-seconds, effective-dated and insert-only (CALCULATIONS.md 3).
  * `optionId` null is the base, otherwise an adder for that option. `seq` decides ties of one day.
  */

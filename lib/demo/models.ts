@@ -9,6 +9,8 @@ export interface DemoModel {
   build: Build;
   /** True where it carries pickups. */
   electric: boolean;
+  /** True where one technician assembles the whole instrument, step by step. */
+  whole: boolean;
   /** Work content against the ordinary instrument of its build: 1 is ordinary. */
   effort: number;
   /** Its share of new tickets; the seven sum to 1. */
@@ -28,6 +30,7 @@ export const models: readonly DemoModel[] = [
     kind: "Grand auditorium guitar",
     build: "flat-top",
     electric: false,
+    whole: false,
     effort: 1,
     share: 0.24,
     lots: [6, 8, 8, 12],
@@ -38,6 +41,7 @@ export const models: readonly DemoModel[] = [
     kind: "Parlour guitar",
     build: "flat-top",
     electric: false,
+    whole: false,
     effort: 0.9,
     share: 0.17,
     lots: [6, 6, 8],
@@ -48,6 +52,7 @@ export const models: readonly DemoModel[] = [
     kind: "Archtop guitar",
     build: "archtop",
     electric: true,
+    whole: true,
     effort: 1.35,
     share: 0.09,
     lots: [1, 1, 1, 2],
@@ -58,6 +63,7 @@ export const models: readonly DemoModel[] = [
     kind: "Cutaway guitar with pickup",
     build: "flat-top",
     electric: true,
+    whole: false,
     effort: 1.08,
     share: 0.14,
     lots: [1, 2, 4, 6],
@@ -68,6 +74,7 @@ export const models: readonly DemoModel[] = [
     kind: "Electric guitar",
     build: "solid",
     electric: true,
+    whole: false,
     effort: 0.96,
     share: 0.2,
     lots: [8, 8, 12],
@@ -78,6 +85,7 @@ export const models: readonly DemoModel[] = [
     kind: "Baritone guitar",
     build: "solid",
     electric: true,
+    whole: false,
     effort: 1.12,
     share: 0.07,
     lots: [1, 2, 4],
@@ -88,9 +96,10 @@ export const models: readonly DemoModel[] = [
     kind: "Bass guitar",
     build: "solid",
     electric: true,
+    whole: true,
     effort: 1.1,
     share: 0.09,
-    lots: [4, 4, 6],
+    lots: [1, 1, 1, 2],
     options: ["Tobacco burst", "Bone white"],
   },
 ];

@@ -23,6 +23,8 @@ export interface DemoOperation {
   builds: readonly Build[];
   /** Only on instruments with pickups. */
   electricOnly: boolean;
+  /** `whole` where one technician builds the instrument, `parts` where it goes by stations. */
+  assembly: "whole" | "parts" | "either";
   /** Person-minutes by standard: per ticket for make-ready, per piece for the work. */
   setupMinutes: number;
   runMinutes: number;
@@ -43,7 +45,10 @@ type Row = readonly [
   hazards?: string,
 ];
 
-/** `F` flat-top, `A` archtop, `S` solid body, `e` only with pickups, a figure: tickets at once. */
+/**
+ * `F` flat-top, `A` archtop, `S` solid body, `e` only with pickups, `w` only where one technician
+ * assembles the whole instrument, `p` only where it goes by parts, a figure: tickets at once.
+ */
 const table: Record<string, { cell: CellName; rows: readonly Row[] }[]> = {
   Timber: [
     {
@@ -145,9 +150,10 @@ const table: Record<string, { cell: CellName; rows: readonly Row[] }[]> = {
       rows: [
         ["460", "Set neck", "FA", 0, 15, 14],
         ["470", "Glue bridge", "F", 0, 13, 14],
-        ["480", "Bolt on neck", "S", 0, 8, 0],
-        ["490", "Fit hardware", "AS", 0, 18, 0],
-        ["500", "Fit harness and pickups", "FASe", 0, 16, 0, "hot-surface fumes"],
+        ["480", "Bolt on neck", "Sp", 0, 8, 0],
+        ["490", "Fit hardware", "Sp", 0, 18, 0],
+        ["495", "Assemble whole instrument", "ASw", 0, 42, 0, "hot-surface fumes"],
+        ["500", "Fit harness and pickups", "FSep", 0, 16, 0, "hot-surface fumes"],
       ],
     },
     { cell: "Inspection", rows: [["510", "Electrical test", "FASei", 0, 4, 0]] },
@@ -180,9 +186,10 @@ export const operations: readonly DemoOperation[] = Object.entries(table).flatMa
 
 /** The operations that an instrument of this model goes through, in order. */
 export function routingOf(model: DemoModel): DemoOperation[] {
+  const other = model.whole ? "parts" : "whole";
   return operations.filter(
-    ({ builds: fits, electricOnly }) =>
-      fits.includes(model.build) && (model.electric || !electricOnly),
+    ({ builds: fits, electricOnly, assembly }) =>
+      fits.includes(model.build) && (model.electric || !electricOnly) && assembly !== other,
   );
 }
 
@@ -196,6 +203,7 @@ function operationOf(stage: string, cell: CellName, row: Row): DemoOperation {
     activity: on.includes("i") ? "inspect" : "run",
     builds: [...on].flatMap((letter) => builds[letter] ?? []),
     electricOnly: on.includes("e"),
+    assembly: on.includes("w") ? "whole" : on.includes("p") ? "parts" : "either",
     setupMinutes,
     runMinutes,
     restsHours,

@@ -2,6 +2,7 @@ import { z } from "zod";
 import { role } from "@/lib/access/roles";
 import { languages } from "@/lib/kiosks/languages";
 import { activity, instant, looseEndCode, verdict, workerNumber } from "@/lib/ledger/schema";
+import { operationSheet } from "@/lib/sheet/schema";
 
 /** One of the languages in which a kiosk speaks. */
 export const language = z.enum(languages);
@@ -85,6 +86,8 @@ export const ticketOperation = z.object({
   hazards: z.array(z.string()),
   holds: z.array(z.object({ hold: z.string(), until: instant.nullable() })),
   qualification: z.string().nullable(),
+  /** Only where the operation is built in steps. */
+  sheet: operationSheet.optional(),
 });
 export type TicketOperation = z.infer<typeof ticketOperation>;
 

@@ -1,6 +1,9 @@
 import type { Act } from "@/lib/acts/act";
+import { effectiveEvents } from "@/lib/acts/effective";
+import { groupBy } from "@/lib/group";
 import { inOrder } from "@/lib/ledger/order";
 import type { Step } from "@/lib/sheet/cell-sheet";
+import type { LedgerEvent } from "@/lib/timeline/schema";
 
 /** What was said of a step: it is done, it is open again after all, it does not apply. */
 export type TapKind = "done" | "open" | "skip";
@@ -29,8 +32,23 @@ export interface HandOver {
   reason: string | null;
 }
 
-/** An act with whose it is and the word that came with it. */
+/** An event with whose it is (the worker's number) and the word that came with it. */
+export type SaidEvent = LedgerEvent & { worker: string; note: string | null };
+
+/** The same as an act, after all corrections. */
 export type SaidAct = Act & { worker: string; note: string | null };
+
+/** Carries out the corrections among some events, each worker's by themselves. */
+export function saidActs(events: readonly SaidEvent[]): SaidAct[] {
+  return [...groupBy(events, ({ worker }) => worker)].flatMap(([worker, own]) => {
+    const notes = new Map(own.map(({ id, note }) => [id, note]));
+    return effectiveEvents(own).acts.map((act) => ({
+      ...act,
+      worker,
+      note: notes.get(act.id) ?? null,
+    }));
+  });
+}
 
 const kinds: Partial<Record<Act["body"]["kind"], TapKind>> = {
   "step-done": "done",

@@ -1,10 +1,12 @@
 import { cautionVersion } from "@/lib/bench/cautions";
 import { faultAt } from "@/lib/demo/faults";
+import { stepsOf } from "@/lib/demo/steps";
 import type { Item } from "@/lib/ledger/schema";
 import { ask, type Bench, idle, otherWork, type Stretch, spend, tap } from "@/lib/simulation/bench";
 import { type InHand, type Job, waitingIn } from "@/lib/simulation/floor";
 import type { Stint } from "@/lib/simulation/tempo";
 import { countPieces, openPieces } from "@/lib/simulation/traveller";
+import { sum } from "@/lib/sum";
 
 /** Two machines or a rack: a piece takes this share of its time alone. */
 const TOGETHER_SHARE = 0.92;
@@ -112,13 +114,43 @@ function* workOn(
   const stint = stintOf(bench, piece);
   const whole = activity === "rework" ? tempo.reworkSeconds(stint) : tempo.pieceSeconds(stint);
   const seconds = whole * (inHand.length > 1 ? TOGETHER_SHARE : 1);
-  const left = yield* spend(bench, seconds * piece.share);
+  const left = yield* spendOn(bench, piece, seconds);
   if (left === 0) return "done";
   piece.step.inHand -= 1;
   if (activity === "rework") piece.step.toRework += 1;
   else piece.step.toDo.unshift(Math.min(1, left / seconds));
   return "shift over";
 }
+
+/**
+ * Lets a piece's time go by; on a single instrument that is built in steps each is tapped off as it is
+ * done, also where others were done in a shift before.
+ *
+ * @returns the seconds that were left when the shift came to its end; 0 if all went by
+ */
+function* spendOn(
+  bench: Bench,
+  piece: InHand & { share: number },
+  seconds: number,
+): Stretch<number> {
+  const { traveller, step, share } = piece;
+  const { code: operation } = step.operation;
+  const steps = traveller.quantity === 1 ? stepsOf(traveller.model, operation) : [];
+  const whole = sum(steps.map(({ minutes }) => minutes));
+  let [before, done] = [0, 1 - share];
+  for (const each of steps) {
+    before += each.minutes / whole;
+    if (before <= done + ALMOST) continue;
+    const left = yield* spend(bench, (before - done) * seconds);
+    if (left > 0) return left + (1 - before) * seconds;
+    done = before;
+    tap(bench, { kind: "step-done", ticket: traveller.number, operation, step: each.step });
+  }
+  return steps.length > 0 ? 0 : yield* spend(bench, seconds * share);
+}
+
+/** Shares are fractions that do not quite sum to one. */
+const ALMOST = 1e-6;
 
 /** A count that lets the work run on, or a call away from the bench and back. */
 function* betweenPieces(bench: Bench, job: Job, done: Map<InHand["step"], number>): Stretch {

@@ -3,6 +3,7 @@ import { kioskTicket } from "@/lib/kiosks/schema";
 import { kioskTicketOf } from "@/lib/kiosks/ticket-view";
 import { afterEight, makeBook, makeOperation, makeReport, makeWork } from "@/tests/make/book";
 import { siteRules } from "@/tests/make/events";
+import { makeSaidAct } from "@/tests/make/sheet";
 
 const from = { cells: ["mill"], rules: [siteRules], atMs: afterEight(100) };
 
@@ -75,5 +76,36 @@ describe("kioskTicketOf", () => {
 
   test("is null for a number that is no ticket's", () => {
     expect(kioskTicketOf(makeBook({ known: null, operations: [] }), from)).toBeNull();
+  });
+
+  test("an operation that is built in steps has its sheet, whose seconds sum to its actual", () => {
+    const steps = [{ operation: "010", step: "1", name: "Dry-fit", seconds: 300 }];
+    const done = makeSaidAct(
+      0,
+      { kind: "step-done", ticket: "26000017", operation: "010", step: "1" },
+      { atMs: afterEight(40) },
+    );
+    const stepped = { ticket: "26000017", steps, said: [done] };
+    const book = makeBook({ work: [makeWork(0, 30), makeWork(60, null)] });
+    const [first, second] = kioskTicketOf(book, from, stepped)?.operations ?? [];
+    expect(first?.sheet).toMatchObject({
+      steps: [{ step: "1", state: "done", actualSeconds: 30, standardSeconds: 2400 }],
+      notTappedSeconds: 40,
+    });
+    expect(first?.actualSeconds).toBe(70);
+    expect(second?.sheet).toBeUndefined();
+  });
+
+  test("time on a rework operation is not the sheet's, as it is not the operation's", () => {
+    const steps = [{ operation: "010", step: "1", name: "Dry-fit", seconds: 300 }];
+    const stepped = { ticket: "26000017", steps, said: [] };
+    const failed = makeReport(70, { operation: "020", good: 0, rework: 1, causedBy: "010" });
+    const book = makeBook({
+      work: [makeWork(0, 50), makeWork(80, 20, { activity: "rework" })],
+      reports: [makeReport(50), failed],
+    });
+    const [first] = kioskTicketOf(book, from, stepped)?.operations ?? [];
+    expect(first?.actualSeconds).toBe(50);
+    expect(first?.sheet?.notTappedSeconds).toBe(50);
   });
 });

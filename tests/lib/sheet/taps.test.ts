@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { handOverOf, tapsOf } from "@/lib/sheet/taps";
+import { handOverOf, type SaidEvent, saidActs, tapsOf } from "@/lib/sheet/taps";
 import { makeSaidAct, steps } from "@/tests/make/sheet";
 
 const item = { ticket: "26048176", operation: "495" };
@@ -58,5 +58,31 @@ describe("handOverOf", () => {
     expect(handOverOf([again, handed], item, [])?.to).toBe("1080");
     expect(handOverOf([handed], other, [])).toBeNull();
     expect(handOverOf([], item, [])).toBeNull();
+  });
+});
+
+describe("saidActs", () => {
+  const done = makeSaidAct(4, { kind: "step-done", ...item, step: "1" });
+  const said = (...events: SaidEvent[]) => tapsOf(saidActs(events), item, steps);
+
+  test("what is undone within 10 s is gone, by its own worker only", () => {
+    const undo = makeSaidAct(4, { kind: "undo", event: done.id }, { id: "undo", seq: 5 });
+    expect(said(done, undo)).toEqual([]);
+    expect(said(done, { ...undo, worker: "1077" })).toHaveLength(1);
+  });
+  test("what a lead voids is gone, what a lead moves counts at its new time", () => {
+    const by = { by: "2001", id: "lead", atMs: 9_000_000 };
+    expect(said(done, makeSaidAct(9, { kind: "void", event: done.id }, by))).toEqual([]);
+    const to = "1970-01-01T00:02:00Z";
+    expect(said(done, makeSaidAct(9, { kind: "move", event: done.id, to }, by))).toMatchObject([
+      { step: "1", atMs: 120_000 },
+    ]);
+  });
+  test("a step that a lead enters for somebody counts when it was, with the lead's word", () => {
+    const event = { ...item, kind: "step-skip", step: "2", at: "1970-01-01T00:03:00Z" };
+    const entered = makeSaidAct(9, { kind: "insert", event }, { by: "2001", note: "left-out" });
+    expect(said(entered)).toMatchObject([
+      { kind: "skip", step: "2", atMs: 180_000, reason: "left-out" },
+    ]);
   });
 });
