@@ -104,9 +104,11 @@ async function writeRoutings({ db, siteId }: Scope, ids: FactoryIds): Promise<vo
     const routing = routingOf(model).map(({ code }, position) => {
       return { code, row: { siteId, id: uuidv7(), routingId, position } };
     });
-    await db.insert(routingOperations).values(
-      routing.map(({ code, row }) => ({ ...row, operationId: idOf(ids.operations, code) })),
-    );
+    await db
+      .insert(routingOperations)
+      .values(
+        routing.map(({ code, row }) => ({ ...row, operationId: idOf(ids.operations, code) })),
+      );
     const steps = routing.flatMap(({ code, row }) =>
       stepsOf(model, code).map(({ step, name, minutes }, position) => ({
         siteId,

@@ -21,6 +21,8 @@ export interface ItemFacts {
   hazards: string[];
   /** The base and the adders of the ticket's own options. */
   standards: StandardRow[];
+  /** Where it is built in steps: what each weighs when it is tapped off. */
+  steps?: { step: string; seconds: number }[];
   good: number;
   scrap: number;
   /** Pieces lost at operations before this one. */

@@ -4,7 +4,7 @@ import type { BookingContext } from "@/lib/ledger/context";
 import { effectMs, type Placed } from "@/lib/ledger/place";
 import type { ClockEvent, EventBody, Item, LooseEndCode, Verdict } from "@/lib/ledger/schema";
 import { actOf, namedItems, sharedItems, targetOf } from "@/lib/ledger/target";
-import { weigh } from "@/lib/ledger/weigh";
+import { stepWeight, weigh } from "@/lib/ledger/weigh";
 import type { LedgerEvent } from "@/lib/timeline/schema";
 
 /** One record of a batch, read as far as it can be, with what identifies it. */
@@ -205,7 +205,9 @@ function rowOf(
       operationCell: (first && factsOf(first)?.cellId) ?? null,
       isByLead: event.by !== undefined,
     }),
-    weights: items.length ? weigh(items, factsOf, { ...context, atMs: placed.atMs }) : null,
+    weights: items.length
+      ? weigh(items, factsOf, { ...context, atMs: placed.atMs })
+      : stepWeight(act, first && factsOf(first)),
     keptFor: kept,
     questions: placed.isMeasured ? null : ["clock-unmeasured"],
     body: { v: event.v, clock: event.clock, ...bodyOf(event) },

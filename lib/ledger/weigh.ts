@@ -1,5 +1,5 @@
 import type { ItemFacts } from "@/lib/ledger/context";
-import type { Item } from "@/lib/ledger/schema";
+import type { EventBody, Item } from "@/lib/ledger/schema";
 import { type Standard, standardInForce } from "@/lib/standards/in-force";
 import { type DayRule, productionDay } from "@/lib/time/site-day";
 import { fairWeights } from "@/lib/timeline/weights";
@@ -49,6 +49,16 @@ export function weigh(
     }),
   );
   return items.map(({ weight }, place) => Math.min(weight ?? resolved[place] ?? 1, WEIGHT_MAX));
+}
+
+/**
+ * The weight of a step that is tapped off: what it takes, should it share time with others of a bunch.
+ * Null for every other act, and for a step that is not known.
+ */
+export function stepWeight(act: EventBody, facts: ItemFacts | undefined): number[] | null {
+  if (act.kind !== "step-done") return null;
+  const known = facts?.steps?.find(({ step }) => step === act.step);
+  return known ? [Math.min(known.seconds, WEIGHT_MAX)] : null;
 }
 
 const UNKNOWN = { shareBy: "standard", standard: null, openPieces: 0, setupEarned: false } as const;

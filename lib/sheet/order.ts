@@ -17,7 +17,10 @@ export function isOutOfOrder(sheet: Pick<CellSheet, "steps">, step: string): boo
 }
 
 /** How many steps are tapped off, of those that apply. */
-export function tappedOff({ steps }: Pick<CellSheet, "steps">): { done: number; of: number } {
+export function tappedOff({ steps }: { steps: readonly Pick<SheetStep, "state">[] }): {
+  done: number;
+  of: number;
+} {
   const applies = steps.filter(({ state }) => state !== "skipped");
   return { done: applies.filter(({ state }) => state === "done").length, of: applies.length };
 }

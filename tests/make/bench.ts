@@ -268,12 +268,25 @@ export class TestKiosk {
     this.send(ticket ? { on: "ticket", code, ticket } : { on: "no-ticket", code, away: false });
   }
 
-  private eventOf(body: EventBody, who: { worker: string; session: string }): ClockEvent {
+  private eventOf(
+    body: EventBody,
+    who: { worker: string; session: string; note?: string },
+  ): ClockEvent {
     this.made += 1;
     const clock = { offsetMs: 0, uncertaintyMs: 5, boot: "b", monotonicMs: 0, seq: this.made };
     const at = new Date(this.nowMs).toISOString();
-    const { worker, session } = who;
+    const { note, worker, session } = who;
+    const said = note === undefined ? {} : { note };
     // safe because the spread of a body keeps its kind and fields together
-    return { id: id(100 + this.made), v: 1, worker, session, at, clock, ...body } as ClockEvent;
+    return {
+      id: id(100 + this.made),
+      v: 1,
+      worker,
+      session,
+      at,
+      clock,
+      ...said,
+      ...body,
+    } as ClockEvent;
   }
 }

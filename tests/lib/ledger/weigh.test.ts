@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import type { Item } from "@/lib/ledger/schema";
-import { openPieces, standardOf, WEIGHT_MAX, weigh } from "@/lib/ledger/weigh";
+import { openPieces, standardOf, stepWeight, WEIGHT_MAX, weigh } from "@/lib/ledger/weigh";
 import { makeFacts, RECEIVED_MS } from "@/tests/make/context";
 import { siteRules } from "@/tests/make/events";
 
@@ -66,5 +66,21 @@ describe("weigh", () => {
 
   test("weighs nothing where there is nothing", () => {
     expect(weigh([], factsOf, around)).toEqual([]);
+  });
+});
+
+describe("stepWeight", () => {
+  const facts = makeFacts({ steps: [{ step: "1", seconds: 480 }] });
+  const ref = { ticket: "26000017", operation: "010" };
+
+  test("a step that is tapped off weighs what it takes, an unknown one nothing", () => {
+    expect(stepWeight({ kind: "step-done", ...ref, step: "1" }, facts)).toEqual([480]);
+    expect(stepWeight({ kind: "step-done", ...ref, step: "2" }, facts)).toBeNull();
+    expect(stepWeight({ kind: "step-done", ...ref, step: "1" }, undefined)).toBeNull();
+  });
+
+  test("what is taken back or left out has no weight", () => {
+    expect(stepWeight({ kind: "step-open", ...ref, step: "1" }, facts)).toBeNull();
+    expect(stepWeight({ kind: "step-skip", ...ref, step: "1" }, facts)).toBeNull();
   });
 });

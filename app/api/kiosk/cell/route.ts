@@ -3,7 +3,7 @@ import { database } from "@/app/_server/database";
 import { handle } from "@/app/_server/handle";
 import { findServedCells, listCellPeople, listCellQueue } from "@/db/kiosks/cell";
 import { findSite } from "@/db/sites/queries";
-import { listTicketBooks } from "@/db/tickets/books";
+import { listSteppedBooks } from "@/db/tickets/steps";
 import type { KioskCell } from "@/lib/kiosks/schema";
 import { kioskTicketOf } from "@/lib/kiosks/ticket-view";
 import { otherWorkCodes } from "@/lib/ledger/other-work";
@@ -30,7 +30,7 @@ export const GET = handle({ actor: "kiosk" }, async ({ actor, request, receivedA
     listCellPeople(scope, { cellIds, today }),
     listCellQueue(scope, cellIds),
   ]);
-  const books = await listTicketBooks(scope, [...new Set(queue.map(({ ticket }) => ticket))]);
+  const booked = await listSteppedBooks(scope, [...new Set(queue.map(({ ticket }) => ticket))]);
   const from = { cells: cellIds, rules: site.rules, atMs, isToKeep: true };
   const cell: KioskCell = {
     kiosk: { deviceId: actor.kioskId, name: served.kiosk },
@@ -42,7 +42,7 @@ export const GET = handle({ actor: "kiosk" }, async ({ actor, request, receivedA
       inSince: inSince?.toISOString() ?? null,
       qualifications: [],
     })),
-    tickets: books.flatMap((book) => kioskTicketOf(book, from) ?? []),
+    tickets: booked.flatMap(({ book, steps }) => kioskTicketOf(book, from, steps) ?? []),
     queue,
     otherWork: [...otherWorkCodes],
     notes: [],

@@ -2,7 +2,7 @@ import { database } from "@/app/_server/database";
 import { handle } from "@/app/_server/handle";
 import { findServedCells } from "@/db/kiosks/cell";
 import { findSite } from "@/db/sites/queries";
-import { listTicketBooks } from "@/db/tickets/books";
+import { listSteppedBooks } from "@/db/tickets/steps";
 import { decideTicketNumber } from "@/lib/codes/ticket-number";
 import { kioskTicketOf } from "@/lib/kiosks/ticket-view";
 import { no, ok } from "@/lib/result";
@@ -15,16 +15,16 @@ export const GET = handle({ actor: "worker" }, async ({ actor, params, receivedA
   const number = decideTicketNumber(params.code ?? "");
   if (!number.ok) return number;
   const scope = { db: database(), siteId: actor.siteId };
-  const [site, { cells }, [book]] = await Promise.all([
+  const [site, { cells }, [found]] = await Promise.all([
     findSite(scope),
     findServedCells(scope, actor.kioskId, receivedAt),
-    listTicketBooks(scope, [number.value]),
+    listSteppedBooks(scope, [number.value]),
   ]);
   const from = {
     cells: cells.map(({ id }) => id),
     rules: site?.rules ?? [],
     atMs: receivedAt.getTime(),
   };
-  const ticket = book ? kioskTicketOf(book, from) : null;
+  const ticket = found ? kioskTicketOf(found.book, from, found.steps) : null;
   return ticket ? ok(ticket) : no("notFound", `There is no ticket ${number.value} here.`);
 });
