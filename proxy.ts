@@ -1,5 +1,6 @@
 import { randomBytes } from "node:crypto";
 import { type NextRequest, NextResponse } from "next/server";
+import { ASKED_FOR } from "@/app/_server/asked-for";
 import { contentPolicy } from "@/app/_server/content-policy";
 import { drawnAhead } from "@/app/_server/drawn-ahead";
 import { problemResponse } from "@/app/_server/problem";
@@ -19,6 +20,8 @@ export function proxy(request: NextRequest): Response {
   const drawn = isDevelopment ? undefined : drawnAhead().get(request.nextUrl.pathname);
   const policy = drawn ? contentPolicy(drawn) : noncePolicy();
   const headers = new Headers(request.headers);
+  // a page does not know its own address; the sign-in needs it to lead on to it
+  headers.set(ASKED_FOR, request.nextUrl.pathname + request.nextUrl.search);
   // Next reads the nonce from here and puts it on its own scripts
   if (!drawn) headers.set("content-security-policy", policy);
   const response = NextResponse.next({ request: { headers } });

@@ -1,10 +1,13 @@
 import "server-only";
+import { headers } from "next/headers";
 import { forbidden, redirect } from "next/navigation";
 import type { PersonActor } from "@/app/_server/actor";
+import { ASKED_FOR } from "@/app/_server/asked-for";
 import { database } from "@/app/_server/database";
 import { personOf } from "@/app/_server/person";
 import type { Scope } from "@/db/client";
 import { type Action, cellsOf, type Reach, reachOf } from "@/lib/access/may";
+import { signInFor } from "@/lib/access/way-back";
 import { no, ok, type Result } from "@/lib/result";
 
 /** Who asks for a page, where they work, and how far the page's action reaches for them. */
@@ -18,7 +21,7 @@ export interface Visit {
 
 /**
  * Asks for the person behind a page. Each page of the office calls it first and names its action;
- * someone not signed in is sent to sign in, someone whose role does not open it is told so (403).
+ * someone not signed in is sent to sign in and comes back, someone whose role does not open it is told so (403).
  */
 export async function personFor(action: Action): Promise<Visit> {
   const visit = await visitFor(action);
@@ -29,7 +32,8 @@ export async function personFor(action: Action): Promise<Visit> {
 /** The same for a form: the no is the answer. Someone not signed in is sent to sign in. */
 export async function visitFor(action: Action): Promise<Result<Visit>> {
   const found = await personOf();
-  if (!found.ok && found.problem.code === "unauthenticated") redirect("/sign-in");
+  if (!found.ok && found.problem.code === "unauthenticated")
+    redirect(signInFor((await headers()).get(ASKED_FOR) ?? "/"));
   if (!found.ok) return found;
   const person = found.value;
   const reach = reachOf(person.held, action);

@@ -11,15 +11,16 @@ import { enterOffice, proveAccount } from "@/app/_server/sign-in";
 import { makeFirstAdmin, revokeSession } from "@/db/access/commands";
 import { passwordFault } from "@/lib/access/password";
 import { firstAdminForm, signInForm } from "@/lib/access/schema";
+import { wayBack } from "@/lib/access/way-back";
 import { noField } from "@/lib/result";
 
-/** Opens the office to an e-mail and its password. */
+/** Opens the office to an e-mail and its password, at the page that was asked for. */
 export const signIn = openAct(signInForm, async (input) => {
   const now = new Date();
   const proved = await proveAccount(database(), { ...input, now });
   if (!proved.ok) return proved;
   await enterOffice(proved.value.accountId, now);
-  redirect("/");
+  redirect(wayBack(input.to));
 });
 
 /** Makes the first admin from the one-time link of an empty installation, and lets them in. */

@@ -19,10 +19,13 @@ export interface DemoWorker {
 /** The demo's accounts, a button each, and whom to be at the kiosk. Never shown outside the demo. */
 export function DemoSignIns({
   action,
+  to,
   accounts,
   workers,
 }: {
   action: FormAction<unknown>;
+  /** The page to go on to. */
+  to: string;
   accounts: readonly DemoAccount[];
   workers: readonly DemoWorker[];
 }) {
@@ -35,13 +38,17 @@ export function DemoSignIns({
         {accounts.map(({ email, password, role }) => (
           <li key={email}>
             <form action={sent.send} className="desk-demo">
+              <input type="hidden" name="to" value={to} />
               <input type="hidden" name="email" value={email} />
               <input type="hidden" name="password" value={password} />
               <button type="submit" className="button" data-rim="left" disabled={sent.isSending}>
                 {role}
               </button>
               <span>
-                <code>{email}</code>
+                <code>
+                  {email.split("@")[0]}
+                  <wbr />@{email.split("@")[1]}
+                </code>
                 <br />
                 <code>{password}</code>
               </span>

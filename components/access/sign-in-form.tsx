@@ -5,10 +5,18 @@ import { FormFoot } from "@/components/shell/form-foot";
 import { type FormAction, useAnswer } from "@/components/shell/use-answer";
 
 /** E-mail and password; pasting and password managers work. */
-export function SignInForm({ action }: { action: FormAction<unknown> }) {
+export function SignInForm({
+  action,
+  to,
+}: {
+  action: FormAction<unknown>;
+  /** The page to go on to. */
+  to: string;
+}) {
   const sent = useAnswer(action);
   return (
     <form action={sent.send} className="desk-form">
+      <input type="hidden" name="to" value={to} />
       <FormField
         sent={sent}
         name="email"

@@ -8,7 +8,8 @@ const email = z.string().trim().toLowerCase().max(254).pipe(z.email("Give an e-m
 
 const password = z.string().min(1, "Fill this in.").max(1000);
 
-export const signInForm = z.strictObject({ email, password });
+/** `to` is the page that was asked for, whatever it is: `wayBack` judges it. */
+export const signInForm = z.strictObject({ email, password, to: z.string().default("/") });
 
 /** What the one-time link of an empty installation asks for. */
 export const firstAdminForm = z.strictObject({

@@ -1,5 +1,5 @@
 import { expect, expectAccessible, test } from "@/tests/setup/browser";
-import { enterOffice, signInAs } from "@/tests/setup/office";
+import { enterOffice, fillSignIn, signInAs } from "@/tests/setup/office";
 
 test("a wrong password and an unknown e-mail get the same words", async ({ page, signIns }) => {
   const words = "E-mail and password do not belong together";
@@ -15,8 +15,24 @@ test("a wrong password and an unknown e-mail get the same words", async ({ page,
 test("the office opens to nobody who is not signed in", async ({ page }) => {
   for (const path of ["/floor", "/tickets", "/people", "/kiosks", "/account"]) {
     await page.goto(path);
-    await expect(page).toHaveURL(/\/sign-in$/);
+    await expect(page).toHaveURL(`/sign-in?to=${encodeURIComponent(path)}`);
   }
+});
+
+test("signing in leads on to the page that was asked for, and never off the site", async ({
+  page,
+  signIns,
+}) => {
+  const planner = signIns.office.find(({ role }) => role === "planner")!;
+  await page.goto("/tickets?status=finished&model=Heron");
+  await fillSignIn(page, planner);
+  await expect(page).toHaveURL("/tickets?status=finished&model=Heron");
+  await page.goto("/sign-in?to=/floor");
+  await expect(page).toHaveURL("/floor");
+  await page.context().clearCookies();
+  await page.goto("/sign-in?to=https://elsewhere.example/tickets");
+  await fillSignIn(page, planner);
+  await expect(page).toHaveURL("/floor");
 });
 
 test("an admin adds a worker, whose PIN is shown once, and prints the badge", async ({
@@ -98,5 +114,5 @@ test("signing out ends the session on the server too", async ({ page, context, s
   await expect(page).toHaveURL(/\/sign-in$/);
   await context.addCookies(cookies);
   await page.goto("/people");
-  await expect(page).toHaveURL(/\/sign-in$/);
+  await expect(page).toHaveURL("/sign-in?to=%2Fpeople");
 });
