@@ -5,21 +5,22 @@ import { otherWorkWords } from "@/lib/ledger/other-work-words";
 import { actualMinutes } from "@/lib/seam/verdict";
 import { clockText } from "@/lib/time/format";
 
-/** Someone who is in and on no ticket: other work, a break, or nothing yet. */
+/** People who are in and on no ticket: one on other work, or all who are on the same break. */
 export function ElsewhereRow({
-  person,
+  people,
   now,
   scaleSeconds,
   timeZone,
   forgotten,
 }: {
-  person: PresentElsewhere;
+  /** At least one, all doing the same. */
+  people: readonly PresentElsewhere[];
   now: number;
   scaleSeconds: number;
   timeZone: string;
   forgotten: Forgotten | null;
 }) {
-  const { doing, code, since } = person;
+  const { doing, code, since } = people[0]!;
   const seconds = Math.max(0, now - since);
   return (
     <tr className="text-ink-2">
@@ -38,18 +39,25 @@ export function ElsewhereRow({
           />
         )}
       </td>
-      <td data-day="">{actualMinutes(seconds)} min</td>
       <td data-day="">
-        <span className="text-ink">
-          <PersonName
-            person={person}
-            deed="shift-end"
-            proposedSecond={now}
-            timeZone={timeZone}
-            forgotten={forgotten}
-          />
-        </span>
-        , since {clockText(since * 1000, timeZone)}
+        {people.length === 1 ? `${actualMinutes(seconds)} min` : `${people.length} people`}
+      </td>
+      <td data-day="" className="desk-wrap">
+        {people.map((person, index) => (
+          <span key={person.worker}>
+            {index > 0 && "; "}
+            <span className="text-ink">
+              <PersonName
+                person={person}
+                deed="shift-end"
+                proposedSecond={now}
+                timeZone={timeZone}
+                forgotten={forgotten}
+              />
+            </span>
+            , since {clockText(person.since * 1000, timeZone)}
+          </span>
+        ))}
       </td>
     </tr>
   );

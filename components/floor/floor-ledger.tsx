@@ -6,11 +6,12 @@ import { SeamAxis } from "@/components/seam/axis";
 import { Columns } from "@/components/shell/columns";
 import { Head, Ledger, NumberHead } from "@/components/ui/table";
 import { actualSeconds } from "@/lib/floor/actual";
+import { gatherElsewhere } from "@/lib/floor/gather";
 import type { FloorCell, FloorView } from "@/lib/floor/schema";
 import { seamScale } from "@/lib/seam/scale";
 import { clockText } from "@/lib/time/format";
 
-const WIDTHS = { operation: 21, ticket: 9, standard: 7, gauge: 26, word: 11, who: 26 };
+const WIDTHS = { operation: 24, ticket: 9, standard: 6, gauge: 22, word: 10, who: 29 };
 
 /** The floor cell by cell, all gauges on one scale, so that they compare. */
 export function FloorLedger({
@@ -60,8 +61,8 @@ export function FloorLedger({
           {cell.work.map((work) => (
             <WorkRow key={`${work.operation} ${work.ticket}`} work={work} {...row} />
           ))}
-          {cell.elsewhere.map((person) => (
-            <ElsewhereRow key={person.worker} person={person} {...row} />
+          {gatherElsewhere(cell.elsewhere).map((people) => (
+            <ElsewhereRow key={people[0]!.worker} people={people} {...row} />
           ))}
         </tbody>
       ))}

@@ -29,7 +29,7 @@ export function WorkRow({
   const rework = work.people.every(({ activity }) => activity === "rework");
   return (
     <tr>
-      <td data-book="" className="desk-cut" title={work.options.join(", ") || undefined}>
+      <td data-book="" className="desk-wrap" title={work.options.join(", ") || undefined}>
         <span className="font-[650]">{work.name}</span>{" "}
         <span className="text-ink-2">{work.model}</span>
       </td>

@@ -5,22 +5,22 @@ import type { DecimalDay } from "@/lib/hours/decimal";
 export function HoursCells({ hours }: { hours: DecimalDay }) {
   return (
     <>
-      <NumberCell data-day="" data-label="attended" className="font-[650]">
+      <NumberCell data-day="" data-half="right" data-label="attended" className="font-[650]">
         {hours.attended}
       </NumberCell>
-      <NumberCell data-day="" data-label="direct">
+      <NumberCell data-day="" data-half="left" data-label="direct">
         {hours.direct}
       </NumberCell>
-      <NumberCell data-day="" data-label="indirect">
+      <NumberCell data-day="" data-half="right" data-label="indirect">
         {hours.indirect}
       </NumberCell>
-      <NumberCell data-day="" data-label="rest">
+      <NumberCell data-day="" data-half="left" data-label="rest">
         {hours.rest}
       </NumberCell>
-      <NumberCell data-day="" data-label="unassigned">
+      <NumberCell data-day="" data-half="right" data-label="unassigned">
         {hours.unassigned}
       </NumberCell>
-      <NumberCell data-day="" data-label="meal">
+      <NumberCell data-day="" data-half="left" data-label="meal">
         {hours.meal}
       </NumberCell>
     </>

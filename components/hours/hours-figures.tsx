@@ -1,5 +1,5 @@
 import type { HoursPageView } from "@/lib/hours/page";
-import { hoursText, roundedHundredths, shareHundredths } from "@/lib/time/format";
+import { groupedHours as grouped, roundedHundredths, shareHundredths } from "@/lib/time/format";
 
 /** The sums of the page about the seam: planned on the left, present and attended on the right. */
 export function HoursFigures({
@@ -17,7 +17,7 @@ export function HoursFigures({
     total.restSeconds,
     total.unassignedSeconds,
   ];
-  const [direct, indirect, rest, unassigned] = shareHundredths(attended, parts).map(hoursText);
+  const [direct, indirect, rest, unassigned] = shareHundredths(attended, parts).map(grouped);
   return (
     <div className="desk-figures">
       <div>
@@ -30,19 +30,19 @@ export function HoursFigures({
             planned
             <br /> hours
           </span>
-          <b>{hoursText(roundedHundredths(total.plannedSeconds))}</b>
+          <b>{grouped(roundedHundredths(total.plannedSeconds))}</b>
         </p>
       </div>
       <div>
         <p className="desk-figure text-actual">
-          <b>{hoursText(roundedHundredths(total.spanSeconds))}</b>
+          <b>{grouped(roundedHundredths(total.spanSeconds))}</b>
           <span>
             present
             <br /> hours
           </span>
         </p>
         <p className="desk-aside">
-          <b>{hoursText(attended)} attended</b>
+          <b>{grouped(attended)} attended</b>
           <br />
           {direct} direct + {indirect} indirect + {rest} rest + {unassigned} unassigned
         </p>

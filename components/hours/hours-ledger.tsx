@@ -10,9 +10,10 @@ import { Columns } from "@/components/shell/columns";
 import type { FormAction } from "@/components/shell/use-answer";
 import { Icon } from "@/components/ui/icon";
 import { Head, Ledger, NumberCell, NumberHead } from "@/components/ui/table";
+import { daySpans } from "@/lib/hours/day-spans";
 import { decimalDays } from "@/lib/hours/decimal";
 import type { HoursFilter } from "@/lib/hours/filter";
-import type { OpenWorker } from "@/lib/hours/page";
+import type { OpenDay, OpenWorker } from "@/lib/hours/page";
 import { seamScale } from "@/lib/seam/scale";
 import { decimalHour } from "@/lib/time/format";
 
@@ -52,6 +53,7 @@ export function HoursLedger({
   correct,
 }: LedgerProps) {
   const scaleSeconds = seamScale(workers.map(pairOf));
+  const row = { filter, timeZone, nowSecond, linksTickets, correct };
   return (
     <Ledger caption="Hours by worker" className="mirror-ledger">
       <Columns widths={WIDTHS} />
@@ -81,32 +83,51 @@ export function HoursLedger({
         {workers.map((worker) => (
           <Fragment key={worker.worker}>
             <WorkerRow worker={worker} filter={filter} scaleSeconds={scaleSeconds} />
-            {worker.days?.map((day, index) => (
-              <Fragment key={day.date}>
-                <DayRow
-                  day={day}
-                  hours={decimalDays(worker.days!.map(({ sums }) => sums))[index]!}
-                  filter={filter}
-                  timeZone={timeZone}
-                  nowSecond={nowSecond}
-                />
-                {day.taps.map((line) => (
-                  <TapRow
-                    key={line.tap.id}
-                    line={line}
-                    correcting={correct && { worker: worker.worker, action: correct }}
-                    timeZone={timeZone}
-                    nowSecond={nowSecond}
-                    linksTickets={linksTickets}
-                  />
-                ))}
-              </Fragment>
-            ))}
+            {worker.days && <DayRows worker={worker.worker} days={worker.days} {...row} />}
           </Fragment>
         ))}
       </tbody>
     </Ledger>
   );
+}
+
+/** The days of the worker that is open, their strips on the same hours, and the open day's taps. */
+function DayRows({
+  worker,
+  days,
+  filter,
+  timeZone,
+  nowSecond,
+  linksTickets,
+  correct,
+}: Omit<LedgerProps, "workers"> & { worker: string; days: readonly OpenDay[] }) {
+  const hours = decimalDays(days.map(({ sums }) => sums));
+  const cut = days.map((day) => ({
+    ...day,
+    stretches: day.stretches.map((each) => ({ ...each, end: Math.min(each.end, nowSecond) })),
+  }));
+  const spans = daySpans(cut);
+  return cut.map((day, index) => (
+    <Fragment key={day.date}>
+      <DayRow
+        day={day}
+        hours={hours[index]!}
+        filter={filter}
+        span={spans[index]!}
+        timeZone={timeZone}
+      />
+      {day.taps.map((line) => (
+        <TapRow
+          key={line.tap.id}
+          line={line}
+          correcting={correct && { worker, action: correct }}
+          timeZone={timeZone}
+          nowSecond={nowSecond}
+          linksTickets={linksTickets}
+        />
+      ))}
+    </Fragment>
+  ));
 }
 
 function WorkerRow({
@@ -126,13 +147,14 @@ function WorkerRow({
         {worker.worker}
       </td>
       <td data-book="" className="desk-cut">
-        <span className="font-[650]">{worker.name}</span>
-        {worker.runs && <span className="text-ink-2"> in now</span>}
         {worker.looseEnds > 0 && (
-          <span className="tag pl-2 text-danger" title="Records or gaps that a person must settle">
-            <Icon name="loose" /> {worker.looseEnds} to look at
+          <span className="tag pr-2 text-danger" title="Records or gaps that a person must settle">
+            <Icon name="loose" /> {worker.looseEnds}
+            <span className="sr-only"> to look at, </span>
           </span>
         )}
+        <span className="font-[650]">{worker.name}</span>
+        {worker.runs && <span className="text-ink-2"> in now</span>}
       </td>
       <td data-book="" className="desk-cut text-ink-2">
         {worker.cell}
@@ -151,11 +173,11 @@ function WorkerRow({
           name={`${worker.name}, planned and present`}
         />
       </td>
-      <NumberCell data-day="" data-actual="" data-label="present">
+      <NumberCell data-day="" data-actual="" data-half="left" data-label="present">
         {decimalHour(worker.sums.spanSeconds)}
       </NumberCell>
       <HoursCells hours={hours!} />
-      <td data-day="">
+      <td data-day="" data-half="right">
         <Opener
           filter={{ ...filter, worker: isOpen ? "" : worker.worker, day: "" }}
           isOpen={isOpen}

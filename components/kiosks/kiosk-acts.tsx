@@ -54,7 +54,7 @@ export function KioskRevocation({ action, kiosk }: { action: FormAction<unknown>
         A lost or broken tablet books nothing from now on. What it still keeps from before can be
         handed in and looked at.
       </p>
-      <FormFoot sent={sent} submit="Take it out of use" />
+      <FormFoot sent={sent} submit="Take it out of use" tone="danger" />
     </form>
   );
 }

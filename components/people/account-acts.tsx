@@ -40,7 +40,7 @@ export function PasswordReset({ action, account }: ActProps<GivenPassword>) {
     <form action={sent.send} className="desk-form">
       <input type="hidden" name="account" value={account} />
       <p>The old password ends at once, and so do its sessions.</p>
-      <FormFoot sent={sent} submit="Give a new password" />
+      <FormFoot sent={sent} submit="Give a new password" tone="plain" />
     </form>
   );
 }
@@ -60,7 +60,11 @@ export function ClosingAct({
           ? "Nobody signs in with it now."
           : "Nobody signs in with a closed account; what it did stays on record."}
       </p>
-      <FormFoot sent={sent} submit={isClosed ? "Open the account again" : "Close the account"} />
+      <FormFoot
+        sent={sent}
+        submit={isClosed ? "Open the account again" : "Close the account"}
+        tone={isClosed ? "plain" : "danger"}
+      />
     </form>
   );
 }

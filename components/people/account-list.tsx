@@ -23,20 +23,19 @@ export function AccountList({
     <Ledger caption="Accounts" className="desk-inset">
       <thead>
         <tr>
-          <Head>Name</Head>
-          <Head>E-mail</Head>
+          <Head>Name, e-mail</Head>
           <Head>Roles</Head>
         </tr>
       </thead>
       <tbody>
         {accounts.map(({ id, name, email, isClosed, held }) => (
           <tr key={id}>
-            <td>
+            <td className="py-1">
               <Link href={`/people/accounts/${id}`} className="font-[650]">
                 {name}
               </Link>
+              <span className="block text-t-2 text-ink-2 wrap-anywhere">{email}</span>
             </td>
-            <td className="break-all">{email}</td>
             <td>{isClosed ? "closed" : rolesOf(held, cells)}</td>
           </tr>
         ))}

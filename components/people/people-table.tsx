@@ -3,7 +3,7 @@ import { Columns } from "@/components/shell/columns";
 import { Head, Ledger, NumberHead } from "@/components/ui/table";
 import { dayText } from "@/lib/time/format";
 
-const WIDTHS = { number: 9, name: 25, cell: 16, language: 14, pin: 16, account: 20 };
+const WIDTHS = { number: 9, name: 25, cell: 16, language: 12, pin: 12, account: 26 };
 
 /** A worker as People lists one. */
 export interface PersonRow {
@@ -49,7 +49,7 @@ export function PeopleTable({ workers, today }: { workers: readonly PersonRow[];
               {languages[worker.language] ?? worker.language}
             </td>
             <td data-day="">{leavingOf(worker, today) ?? pinOf(worker)}</td>
-            <td data-day="" className="desk-cut text-ink-2">
+            <td data-day="" className="desk-wrap text-ink-2">
               {worker.email}
             </td>
           </tr>

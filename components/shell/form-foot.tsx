@@ -9,19 +9,27 @@ export function FormFoot({
   sent,
   submit,
   done,
+  tone = "solid",
   children,
 }: {
   sent: Pick<Sent<unknown>, "problem" | "isSending" | "isDone">;
   submit: string;
   /** Said after a yes, where the form stays. */
   done?: string;
+  /** `plain` where the page is first for something else, `danger` where something is taken away. */
+  tone?: "solid" | "plain" | "danger";
   children?: ReactNode;
 }) {
   const { problem, isSending, isDone } = sent;
   const said = problem?.errors ? "Look at what is marked." : problem?.detail;
   return (
     <div className="flex flex-wrap items-center gap-4">
-      <Button type="submit" tone="solid" rim="right" disabled={isSending}>
+      <Button
+        type="submit"
+        rim="right"
+        {...(tone === "plain" ? {} : { tone })}
+        disabled={isSending}
+      >
         {submit}
       </Button>
       {children}

@@ -94,7 +94,7 @@ function OperationRow({
       <td data-book="" className="code text-ink-2">
         {operation.operation}
       </td>
-      <td data-book="" className="desk-cut">
+      <td data-book="" className="desk-wrap">
         <span className="font-[650]">{operation.name}</span>
       </td>
       <td data-book="" className="text-ink-2">

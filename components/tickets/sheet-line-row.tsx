@@ -21,8 +21,10 @@ export function SheetLineRow({ line, timeZone }: { line: SheetLine; timeZone: st
         {line.line === "segment" ? line.activity : "counted"}
       </td>
       <td className="desk-line-day">
-        {day}, {clockText(startMs, timeZone)}
-        {line.line === "segment" && ` to ${endOf(line.end, timeZone)}`}
+        <span>
+          {day}, {clockText(startMs, timeZone)}
+          {line.line === "segment" && ` to ${endOf(line.end, timeZone)}`}
+        </span>
       </td>
       <td data-day="" data-number="" data-actual="">
         {line.line === "segment" && line.seconds !== null && actualMinutes(line.seconds)}

@@ -54,10 +54,8 @@ export function TicketHead({
             hours
           </span>
         </p>
-        <p className="desk-aside">
-          finished work:
-          <br />
-          {sheet.done} of {sheet.operations.length} operations
+        <p className="desk-aside desk-aside-wide">
+          {sheet.done} of {sheet.operations.length} operations finished
           <br />
           {placeOf(record)}
         </p>

@@ -10,13 +10,13 @@ import { dayText } from "@/lib/time/format";
 
 const WIDTHS = {
   ticket: 10,
-  model: 17,
-  lot: 4,
+  model: 18,
+  lot: 5,
   due: 7,
-  gauge: 24,
-  word: 10,
-  done: 8,
-  next: 20,
+  gauge: 20,
+  word: 9,
+  done: 7,
+  next: 24,
 };
 
 /** A ticket of the list, with what its finished work took. */
@@ -96,7 +96,7 @@ function TicketsRow({ row, scaleSeconds }: { row: TicketRow; scaleSeconds: numbe
       <NumberCell data-day="" data-label="done">
         {progress.done} of {progress.of}
       </NumberCell>
-      <td data-day="" className="desk-cut">
+      <td data-day="" className="desk-wrap">
         {status === "open" ? (
           <>
             <span className="font-[650]">{cell}</span>{" "}

@@ -1,4 +1,4 @@
-import { and, asc, eq, exists, gt, isNull, type SQL, sql } from "drizzle-orm";
+import { and, asc, eq, exists, gt, ilike, isNull, or, type SQL, sql } from "drizzle-orm";
 import {
   accountRoles,
   accounts,
@@ -101,9 +101,22 @@ export interface Account {
   worker: string | null;
 }
 
-/** Lists the accounts that hold a role at the site, by name; at most `limit`. */
-export async function listAccounts(scope: Scope, limit: number): Promise<Account[]> {
-  return accountsOf(scope, undefined, limit);
+/**
+ * Lists the accounts that hold a role at the site, by name, those with `text` in name or e-mail.
+ * `after` is the id of the last account of the page before; null begins.
+ */
+export async function listAccounts(
+  scope: Scope,
+  text: string,
+  page: { after: string | null; limit: number },
+): Promise<Account[]> {
+  const part = `%${text.replace(/[\\%_]/g, "\\$&")}%`;
+  const named = text && or(ilike(accounts.name, part), ilike(accounts.email, part));
+  const later =
+    page.after &&
+    sql`(${accounts.name}, ${accounts.id}) > (
+      select a.name, a.id from accounts a where a.id = ${page.after})`;
+  return accountsOf(scope, and(named || undefined, later || undefined), page.limit);
 }
 
 /** Finds an account that holds a role at the site; null for any other. */

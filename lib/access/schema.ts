@@ -42,6 +42,12 @@ export type RolesForm = z.infer<typeof rolesForm>;
 /** An account that is closed, opened again, or given a new password. */
 export const accountChoice = z.strictObject({ account: formId });
 
+/** Which accounts the list shows: part of a name or e-mail, and where the page before ended. */
+export const accountsQuery = z.object({
+  q: z.string().trim().max(80).catch(""),
+  after: z.uuid().or(z.literal("")).catch(""),
+});
+
 /** What is shown once: the password that the system made, and for whom. */
 export interface GivenPassword {
   name: string;

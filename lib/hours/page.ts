@@ -46,6 +46,8 @@ export interface TapLine {
 }
 
 export interface OpenDay extends HoursDay {
+  /** When the production day begins, in epoch seconds. */
+  start: number;
   planned: StripSpan | null;
   /** One stretch an interval, cut to the day, for the strip. */
   stretches: readonly (Stretch & { activity: Activity })[];
@@ -117,6 +119,7 @@ function openDay(
   const own = stretches.flatMap((row) => cutTo(row, bounds));
   return {
     ...day,
+    start: bounds.start,
     isOpen,
     planned: plan ? { from: plan.start, to: plan.end } : null,
     stretches: own

@@ -53,6 +53,11 @@ export function hoursText(hundredths: number): string {
   return `${Math.floor(hundredths / 100)}.${String(hundredths % 100).padStart(2, "0")}`;
 }
 
+/** Hundredths of an hour as a figure to be read, thousands apart: 257350 is "2,573.50". */
+export function groupedHours(hundredths: number): string {
+  return hoursText(hundredths).replace(/\B(?=(\d{3})+\.)/g, ",");
+}
+
 /** One length as decimal hours with two places, half up on exact seconds: 6300 is "1.75". */
 export function decimalHour(seconds: number): string {
   return decimalHours([seconds]).total;

@@ -37,6 +37,36 @@ async function signedIn(db: Db, accountId: string) {
   return id;
 }
 
+describe("listAccounts", () => {
+  test("pages by name and finds a part of a name or e-mail, signs of a pattern taken as they are", () =>
+    withDb(async (db) => {
+      const { admin, cellIds: _cells, ...scope } = await withAdmin(db);
+      for (const [name, email] of [
+        ["Ilo Varn", "varn@larkmoor.example"],
+        ["Ilo Varn", "other.varn@larkmoor.example"],
+        ["Zora 100%", "zora_b@larkmoor.example"],
+      ])
+        await addAccount(scope, form({ id: uuid(), name: name!, email: email! }), hand);
+      const emails: string[] = [];
+      for (let after: string | null = null; ; ) {
+        const page = await listAccounts(scope, "", { after, limit: 2 });
+        emails.push(...page.map(({ email }) => email));
+        if (page.length < 2) break;
+        after = page.at(-1)!.id;
+      }
+      expect(emails).toHaveLength(4);
+      expect(new Set(emails).size).toBe(4);
+      expect(emails.at(-1)).toBe("zora_b@larkmoor.example");
+      const found = async (text: string) =>
+        (await listAccounts(scope, text, { after: null, limit: 9 })).map(({ email }) => email);
+      expect(await found("VARN")).toHaveLength(2);
+      expect(await found("0%")).toEqual(["zora_b@larkmoor.example"]);
+      expect(await found("a_b")).toEqual(["zora_b@larkmoor.example"]);
+      expect(await found("%%")).toEqual([]);
+      expect(await found(admin.email)).toEqual([admin.email]);
+    }));
+});
+
 describe("addAccount", () => {
   test("gives the roles, a lead's by cell, and the worker that the person is", () =>
     withDb(async (db) => {
@@ -49,7 +79,7 @@ describe("addAccount", () => {
         worker: "1042",
       });
       expect(await addAccount(scope, lead, hand)).toEqual({ ok: true });
-      expect(await listAccounts(scope, 10)).toMatchObject([
+      expect(await listAccounts(scope, "", { after: null, limit: 10 })).toMatchObject([
         { email: admin.email, isClosed: false, held: [{ role: "admin", cells: [] }], worker: null },
         {
           email: lead.email,
@@ -69,7 +99,7 @@ describe("addAccount", () => {
         problem: { errors: [{ path: "email" }] },
       });
       expect(await addAccount(scope, admin, hand)).toEqual({ ok: true });
-      expect(await listAccounts(scope, 10)).toHaveLength(1);
+      expect(await listAccounts(scope, "", { after: null, limit: 10 })).toHaveLength(1);
     }));
 
   test.each<[string, Partial<AccountForm>, string]>([
@@ -82,7 +112,7 @@ describe("addAccount", () => {
       expect(await addAccount(scope, account, hand)).toMatchObject({
         problem: { errors: [{ path }] },
       });
-      expect(await listAccounts(scope, 10)).toHaveLength(1);
+      expect(await listAccounts(scope, "", { after: null, limit: 10 })).toHaveLength(1);
     }),
   );
 
@@ -176,12 +206,12 @@ describe("makeFirstAdmin", () => {
       await withLink(db, new Date(now.getTime() + 1));
       const made = await makeFirstAdmin(db, { ...first, tokenHash: "token" });
       expect(made).toMatchObject({ ok: true });
-      expect(await listAccounts(scope, 9)).toMatchObject([
+      expect(await listAccounts(scope, "", { after: null, limit: 9 })).toMatchObject([
         { email: first.email, held: [{ role: "admin", cells: [] }] },
       ]);
       const again = { ...first, email: "eve@x.example", tokenHash: "token" };
       expect(await makeFirstAdmin(db, again)).toMatchObject({ problem: { code: "gone" } });
-      expect(await listAccounts(scope, 9)).toHaveLength(1);
+      expect(await listAccounts(scope, "", { after: null, limit: 9 })).toHaveLength(1);
     }));
 
   test("a link that is over or unknown makes nobody", () =>
@@ -209,6 +239,6 @@ describe("makeFirstAdmin", () => {
       const back = { ...first, email: admin.email, tokenHash: "token" };
       expect(await makeFirstAdmin(db, back)).toEqual({ ok: true, value: { accountId: admin.id } });
       expect(await listSessionRoles(db, session, now)).toEqual([]);
-      expect(await listAccounts(scope, 9)).toHaveLength(1);
+      expect(await listAccounts(scope, "", { after: null, limit: 9 })).toHaveLength(1);
     }));
 });

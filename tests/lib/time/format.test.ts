@@ -1,7 +1,14 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { sum } from "@/lib/sum";
-import { clockText, dayText, decimalHour, decimalHours, hoursAndMinutes } from "@/lib/time/format";
+import {
+  clockText,
+  dayText,
+  decimalHour,
+  decimalHours,
+  groupedHours,
+  hoursAndMinutes,
+} from "@/lib/time/format";
 import { wallClock } from "@/lib/time/zone";
 
 describe("decimalHours", () => {
@@ -95,4 +102,16 @@ describe("dayText", () => {
     expect(dayText("2026-05-14", "en")).toBe("Thu 14 May");
     expect(dayText("2026-05-14", "es")).toBe("jue 14 may");
   });
+});
+
+describe("groupedHours", () => {
+  test.each([
+    [0, "0.00"],
+    [99_999, "999.99"],
+    [100_000, "1,000.00"],
+    [257_350, "2,573.50"],
+    [123_456_789, "1,234,567.89"],
+  ])("writes %i hundredths as %s", (hundredths, text) =>
+    expect(groupedHours(hundredths)).toBe(text),
+  );
 });
