@@ -15,6 +15,7 @@ export interface Room {
 const rooms: readonly Room[] = [
   { name: "People", path: "/people", may: "people.see", leaf: "book" },
   { name: "Tickets", path: "/tickets", may: "tickets.see", leaf: "book" },
+  { name: "Standards", path: "/standards", may: "standards.see", leaf: "book" },
   { name: "Kiosks", path: "/kiosks", may: "kiosks.see", leaf: "book" },
   { name: "Floor", path: "/floor", may: "floor.see", leaf: "day" },
   {

@@ -107,6 +107,11 @@ export function secondsText(seconds: number): string {
   return `${Math.floor(minutes / 60)}:${pad(minutes % 60)}:${pad(seconds % 60)}`;
 }
 
+/** A date whose year matters, "14 May 2026". */
+export function dateText(date: string): string {
+  return `${dayText(date, "en-GB").slice(4)} ${date.slice(0, 4)}`;
+}
+
 /** A date as the desk writes it, "Thu 14 May", with the language's own words in that order. */
 export function dayText(date: string, language: string): string {
   const atMs = Date.parse(date); // a date alone is read as UTC (ECMA-262)

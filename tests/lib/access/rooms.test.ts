@@ -8,7 +8,7 @@ describe("roomsFor", () => {
   test("shows each role its own rooms only", () => {
     expect(names("admin")).toEqual(["People", "Tickets", "Kiosks", "Floor", "Seam", "Loose ends"]);
     expect(names("payroll")).toEqual(["People", "Floor", "Loose ends", "Hours"]);
-    expect(names("planner")).toEqual(["Tickets", "Floor", "Seam"]);
+    expect(names("planner")).toEqual(["Tickets", "Standards", "Floor", "Seam"]);
     expect(names("worker")).toEqual(["Hours"]);
     expect(roomsFor([])).toEqual([]);
   });

@@ -3,6 +3,7 @@ import { describe, expect, test } from "vitest";
 import { sum } from "@/lib/sum";
 import {
   clockText,
+  dateText,
   dayText,
   decimalHour,
   decimalHours,
@@ -114,4 +115,11 @@ describe("groupedHours", () => {
   ])("writes %i hundredths as %s", (hundredths, text) =>
     expect(groupedHours(hundredths)).toBe(text),
   );
+});
+
+describe("dateText", () => {
+  test.each([
+    ["2026-05-04", "4 May 2026"],
+    ["2025-12-31", "31 Dec 2025"],
+  ])("writes %s as %s", (date, text) => expect(dateText(date)).toBe(text));
 });
