@@ -10,6 +10,7 @@ import { benchQuery, enrolRequest, signInRequest, timeQuery } from "@/lib/kiosks
 import { eventBatch } from "@/lib/ledger/schema";
 import { payRequest } from "@/lib/pay/request";
 import { exportQuery, periodsQuery } from "@/lib/periods/schema";
+import { standardEntry, standardsListQuery } from "@/lib/standards/schema";
 
 /** A route of the contract: who may call it, what it takes and gives. */
 export interface ApiRoute {
@@ -154,6 +155,30 @@ const integrationRoutes: ApiRoute[] = [
     may: "analytics.read",
     query: cellsQuery,
     answer: "CellsAnswer",
+  },
+  {
+    method: "get",
+    path: "/api/v1/standards",
+    name: "listStandards",
+    summary:
+      "Lists every standard ever entered, in the order of entry: of two for one day the later counts.",
+    actor: "key",
+    may: "standards.read",
+    query: standardsListQuery,
+    answer: "StandardPage",
+  },
+  {
+    method: "post",
+    path: "/api/v1/standards",
+    name: "setStandard",
+    summary:
+      "Sets a standard from a day on; rows are only added. With an `Idempotency-Key` header the same " +
+      "request again is the same row.",
+    actor: "key",
+    may: "standards.set",
+    body: standardEntry,
+    answer: "Standard",
+    also: { 409: "The `Idempotency-Key` has set another standard already." },
   },
   {
     method: "post",

@@ -17,6 +17,7 @@ import { instant } from "@/lib/ledger/schema";
 import { payAnswer } from "@/lib/pay/answer";
 import { payFile } from "@/lib/periods/file";
 import { periodPage } from "@/lib/periods/schema";
+import { standardItem, standardPage } from "@/lib/standards/schema";
 
 /** RFC 9457, as every refusal is answered; `errors` names the fields of invalid input. */
 const problem = z.object({
@@ -50,6 +51,8 @@ export const answers = {
   SegmentPage: segmentPage,
   OperationsAnswer: operationsAnswer,
   CellsAnswer: cellsAnswer,
+  StandardPage: standardPage,
+  Standard: standardItem,
   Split: splitAnswer,
   CodeReading: codeReading,
   PayAnswer: payAnswer,

@@ -11,18 +11,21 @@ export interface Asked {
   /** An integration key or a worker's token. */
   bearer?: string;
   cookie?: string;
+  /** Any others, by their names in small letters. */
+  headers?: Record<string, string>;
   /** Sent as JSON, or as it is where it is text. */
   body?: unknown;
 }
 
 /** Calls a route handler as a request would, and reads its JSON answer. */
 export async function call(handler: Handler, asked: Asked) {
-  const { path, params = {}, bearer, cookie, body } = asked;
+  const { path, params = {}, bearer, cookie, headers = {}, body } = asked;
   const request = new Request(`http://localhost${path}`, {
     method: body === undefined ? "GET" : "POST",
     headers: {
       ...(bearer ? { authorization: `Bearer ${bearer}` } : {}),
       ...(cookie ? { cookie } : {}),
+      ...headers,
     },
     ...(body === undefined ? {} : { body: typeof body === "string" ? body : JSON.stringify(body) }),
   });
