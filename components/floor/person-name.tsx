@@ -24,7 +24,7 @@ export function PersonName({
   timeZone: string;
   forgotten: Forgotten | null;
 }) {
-  if (!forgotten || forgotten.workers?.includes(worker) === false) return <>{name}</>;
+  if (!forgotten || forgotten.workers?.includes(worker) === false) return <bdi>{name}</bdi>;
   const isEnd = deed === "shift-end";
   const day = localDate(proposedSecond * 1000, timeZone);
   const hours = new URLSearchParams({ worker, from: day, to: day, day });
@@ -39,7 +39,7 @@ export function PersonName({
       deeds={[{ deed, label: isEnd ? "End the shift" : "Start the shift" }]}
       more={{ href: `/hours?${hours}`, label: "Every record of that day" }}
     >
-      {name}
+      <bdi>{name}</bdi>
     </Correction>
   );
 }

@@ -153,7 +153,7 @@ function WorkerRow({
             <span className="sr-only"> to look at, </span>
           </span>
         )}
-        <span className="font-[650]">{worker.name}</span>
+        <bdi className="font-[650]">{worker.name}</bdi>
         {worker.runs && <span className="text-ink-2"> in now</span>}
       </td>
       <td data-book="" className="desk-cut text-ink-2">

@@ -41,7 +41,7 @@ export function PeopleTable({ workers, today }: { workers: readonly PersonRow[];
             </td>
             <td data-book="" className="desk-cut">
               <Link href={`/people/${worker.number}`} className="font-[650]">
-                {worker.name}
+                <bdi>{worker.name}</bdi>
               </Link>
             </td>
             <td data-book="">{worker.cell}</td>

@@ -12,7 +12,7 @@ export function SheetLineRow({ line, timeZone }: { line: SheetLine; timeZone: st
     <tr data-line="">
       <td data-book="" data-spare="" />
       <td data-book="" className="desk-cut">
-        {line.worker?.name}
+        <bdi>{line.worker?.name}</bdi>
       </td>
       <td data-book="" className="text-ink-2">
         {line.worker?.worker}

@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { role } from "@/lib/access/roles";
-import { chosen, formId, line } from "@/lib/forms";
+import { chosen, formId, line, sought } from "@/lib/forms";
 import { workerNumber } from "@/lib/ledger/schema";
 
 /** An e-mail as an account has it: small letters, no spaces around it. */
@@ -44,7 +44,7 @@ export const accountChoice = z.strictObject({ account: formId });
 
 /** Which accounts the list shows: part of a name or e-mail, and where the page before ended. */
 export const accountsQuery = z.object({
-  q: z.string().trim().max(80).catch(""),
+  q: sought(80),
   after: z.uuid().or(z.literal("")).catch(""),
 });
 

@@ -2,6 +2,7 @@ import { z } from "zod";
 import { cursor } from "@/lib/api/cursor";
 import { filterName, page, pageLimit } from "@/lib/api/page";
 import { bookedSegment } from "@/lib/api/segments";
+import { afterSeq } from "@/lib/forms";
 import { kioskTicket, ticketOperation } from "@/lib/kiosks/schema";
 import { instant } from "@/lib/ledger/schema";
 
@@ -12,7 +13,7 @@ export const ticketsQuery = z.strictObject({
   status: status.optional(),
   cell: filterName.optional(),
   model: filterName.optional(),
-  cursor: cursor(z.number().int().min(0)).optional(),
+  cursor: cursor(afterSeq).optional(),
   limit: pageLimit,
 });
 

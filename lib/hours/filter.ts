@@ -1,11 +1,16 @@
 import { z } from "zod";
-import { addDays, listDays } from "@/lib/time/site-day";
+import { sought } from "@/lib/forms";
+import { addDays } from "@/lib/time/site-day";
 
 /** The most days that one look at hours spans: a quarter of a year. */
 const DAYS_MAX = 92;
 
-const date = z.iso.date().catch("");
-const name = z.string().max(200).catch("");
+/** Days of a factory's time: sums over any others are nobody's, and cost as much. */
+const date = z.iso
+  .date()
+  .refine((day) => day >= "1990-01-01" && day < "2200-01-01")
+  .catch("");
+const name = sought(200);
 
 /** What the address says of the hours wanted; anything odd in it counts as not said. */
 export const hoursFilter = z.object({
@@ -37,6 +42,7 @@ export function rangeOf({ from, to }: Pick<HoursFilter, "from" | "to">, today: s
   const last = to || (from > today ? from : today);
   const first = from || addDays(last, -6);
   const [start, end] = first <= last ? [first, last] : [last, first];
-  const isTooLong = listDays(start, end).length >= DAYS_MAX;
-  return { from: isTooLong ? addDays(end, 1 - DAYS_MAX) : start, to: end };
+  const earliest = addDays(end, 1 - DAYS_MAX);
+  const isTooLong = start < earliest;
+  return { from: isTooLong ? earliest : start, to: end };
 }

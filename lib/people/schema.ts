@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { chosen, dateOrNone, formId, line, lineOrNone } from "@/lib/forms";
+import { chosen, dateOrNone, formId, line, lineOrNone, sought } from "@/lib/forms";
 import { language } from "@/lib/kiosks/schema";
 import { workerNumber } from "@/lib/ledger/schema";
 
@@ -27,7 +27,7 @@ export interface GivenPin {
 
 /** Which workers People lists: part of a name or number, a cell, those who left too. */
 export const peopleQuery = z.object({
-  q: z.string().trim().max(80).catch(""),
+  q: sought(80),
   cell: z.uuid().or(z.literal("")).catch(""),
   left: z.literal("1").or(z.literal("")).catch(""),
   after: workerNumber.or(z.literal("")).catch(""),

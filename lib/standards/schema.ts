@@ -1,7 +1,7 @@
 import { z } from "zod";
 import { cursor } from "@/lib/api/cursor";
 import { filterName, page, pageLimit } from "@/lib/api/page";
-import { formId, line } from "@/lib/forms";
+import { afterSeq, formId, line, sought } from "@/lib/forms";
 import { STANDARD_MAX_SECONDS, secondsOfMinutes } from "@/lib/standards/minutes";
 
 const tooLong = `Give at most ${STANDARD_MAX_SECONDS / 3600} hours.`;
@@ -43,19 +43,17 @@ export const standardForm = z.strictObject({
   reason,
 });
 
-const said = (max: number) => z.string().trim().max(max).catch("");
-
 /** What the address says of the page: model, stage, day, and the change that is drafted, if any. */
 export const standardsQuery = z.object({
-  model: said(200),
-  stage: said(200),
+  model: sought(200),
+  stage: sought(200),
   on: z.iso.date().catch(""),
-  op: said(40),
-  option: said(200),
-  setup: said(20),
-  run: said(20),
-  from: said(20),
-  reason: said(300),
+  op: sought(40),
+  option: sought(200),
+  setup: sought(20),
+  run: sought(20),
+  from: sought(20),
+  reason: sought(300),
 });
 export type StandardsQuery = z.infer<typeof standardsQuery>;
 
@@ -63,7 +61,7 @@ export type StandardsQuery = z.infer<typeof standardsQuery>;
 export const standardsListQuery = z.strictObject({
   model: filterName.optional(),
   operation: filterName.optional(),
-  cursor: cursor(z.int().min(0)).optional(),
+  cursor: cursor(afterSeq).optional(),
   limit: pageLimit,
 });
 

@@ -41,4 +41,10 @@ describe("hoursFilter", () => {
     const odd = { from: "yesterday", to: ["2026-05-14"], worker: "Ilo", day: "14", cell: 3 };
     expect(hoursFilter.parse(odd)).toEqual({ from: "", to: "", cell: "", worker: "", day: "" });
   });
+
+  test("days that no factory has hours on count as not said, so that nobody sums for ever", () => {
+    const far = { from: "0001-01-01", to: "9999-12-31" };
+    expect(rangeOf(hoursFilter.parse(far), today)).toEqual({ from: "2026-05-08", to: today });
+    expect(hoursFilter.parse({ cell: "Ne\0ck" }).cell).toBe("");
+  });
 });

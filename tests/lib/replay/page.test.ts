@@ -53,7 +53,10 @@ describe("standardsPage", () => {
       model: "Curlew",
       day: today,
       stages: ["Body", "Neck"],
-      lines: [{ operation: "010", inForce: null }, { operation: "110", inForce: { seq: 1 } }],
+      lines: [
+        { operation: "010", inForce: null },
+        { operation: "110", inForce: { seq: 1 } },
+      ],
       open: null,
     });
   });
