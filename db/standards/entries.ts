@@ -74,12 +74,13 @@ export async function listStandardEntries(
 }
 /** Lists the models that have a routing, by name, each with its options and since when it is known. */
 export async function listModels({ db, siteId }: Scope) {
+  // "models.id" by hand: with one table to select from, a column is written without its table
   const firstDay = sql<string | null>`(
     select min(s.effective_from)::text from ${standards} s
-    where s.site_id = ${siteId} and s.model_id = ${models.id})`;
+    where s.site_id = ${siteId} and s.model_id = models.id)`;
   const optionNames = sql<string[]>`array(
     select o.name from ${options} o
-    where o.site_id = ${siteId} and o.model_id = ${models.id} order by o.name)`;
+    where o.site_id = ${siteId} and o.model_id = models.id order by o.name)`;
   return db
     .select({
       id: models.id,
