@@ -12,7 +12,7 @@ export function StandardsTable({ view }: { view: StandardsView }) {
   const { query, model, open } = view;
   const { stage, on } = query;
   return (
-    <section>
+    <section className={open ? "standards-beside" : undefined}>
       <Ledger caption={`Standards of ${model}`} tight className="standards-table">
         <thead>
           <tr>

@@ -56,7 +56,7 @@ export default async function StandardsPage({ searchParams }: StandardsProps) {
             : "No operation is like that. Choose another model or stage."}
         </Empty>
       ) : (
-        <div className="desk-pair standards-pair">
+        <div className="desk-pair standards-pair" data-open={view.open ? "" : undefined}>
           <StandardsTable view={view} />
           <StandardPanel view={view} maySet={maySet} id={uuidv7()} action={setStandard} />
         </div>
