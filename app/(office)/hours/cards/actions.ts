@@ -1,5 +1,6 @@
 "use server";
 
+import { redirect } from "next/navigation";
 import { act } from "@/app/_server/act";
 import { siteOf } from "@/app/_server/site";
 import { closePeriod as close, reopenPeriod as reopen } from "@/db/pay/close";
@@ -15,7 +16,11 @@ export const closePeriod = act(
     const { rules } = await siteOf(scope.siteId);
     const { timeZone } = ruleAt(rules, now.getTime());
     const { period: periodId, ...said } = input;
-    return close(scope, { periodId, timeZone, now, ...said }, { by, name: person.name });
+    const asked = { periodId, timeZone, now, ...said };
+    const closed = await close(scope, asked, { by, name: person.name });
+    // the page by itself would go on to the next open period
+    if (closed.ok) redirect(`/hours/cards?${new URLSearchParams({ period: periodId })}`);
+    return closed;
   },
 );
 
