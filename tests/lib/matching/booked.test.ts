@@ -50,6 +50,20 @@ describe("bookedParts", () => {
       { operation: "990", cell: UNKNOWN, seconds: 60, noStandardSeconds: 60 },
     ]);
   });
+  test("the time of a rework operation earns nothing by rule: that is no want of a standard", () => {
+    const operations = [
+      { ...makeOperation("010", "mill"), standards: [] },
+      makeOperation("020", "neck"),
+    ];
+    const work = [makeWork(0, 60), makeWork(200, 50, { activity: "rework" })];
+    const failed = { operation: "020", good: 0, rework: 1, causedBy: "010", cell: "neck" };
+    const reports = [makeReport(60), makeReport(100, failed)];
+    const time = parts({ operations, work, reports }).filter(({ seconds }) => seconds > 0);
+    expect(time.map((one) => [one.activity, one.noStandardSeconds])).toEqual([
+      ["run", 60],
+      ["rework", 0],
+    ]);
+  });
   test("rework says whether another cell caused it", () => {
     const work = [
       makeWork(0, 60),
