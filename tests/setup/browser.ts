@@ -1,7 +1,7 @@
 import path from "node:path";
 import AxeBuilder from "@axe-core/playwright";
 import { type BrowserContext, test as base, chromium, expect, type Page } from "@playwright/test";
-import { isRoot, root } from "@/scripts/ground/place.mjs";
+import { isRoot } from "@/scripts/ground/place.mjs";
 import { type Shot, writeClip } from "@/tests/setup/camera";
 import { type Installation, openInstallation, type SignIns } from "@/tests/setup/installation";
 
@@ -88,19 +88,17 @@ function watch(context: BrowserContext): void {
   context.on("weberror", (error) => noise.push(String(error.error())));
 }
 
-/** Expects no fault that axe finds (WCAG 2.2 A and AA) on the page as it is now. */
+/** Expects no fault that axe finds on the page as it is now. */
 export async function expectAccessible(page: Page): Promise<void> {
+  expect(await axeFaults(page)).toEqual([]);
+}
+
+/** What axe finds wrong with the page as it is now (WCAG 2.2 A and AA), in sentences. */
+export async function axeFaults(page: Page): Promise<string[]> {
   const tags = ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"];
   const { violations } = await new AxeBuilder({ page }).withTags(tags).analyze();
-  const faults = violations.map(({ id, help, nodes }) => {
+  return violations.map(({ id, help, nodes }) => {
     const where = nodes.map(({ target }) => target.join(" ")).join(", ");
     return `${id}: ${help}: ${where}`;
   });
-  expect(faults).toEqual([]);
-}
-
-/** Keeps a picture for the README or a look; only when `BOOKMATCH_PICTURES` is set. */
-export async function picture(page: Page, name: string): Promise<void> {
-  if (!process.env.BOOKMATCH_PICTURES) return;
-  await page.screenshot({ path: path.join(root, "screenshots", `${name}.png`) });
 }
