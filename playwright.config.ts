@@ -3,7 +3,11 @@ import { isRoot } from "@/scripts/ground/place.mjs";
 
 /** Runs after `scripts/test.mjs` made the build and the demo data: `npm run test:browser`. */
 export default defineConfig({
-  testDir: "tests/browser",
+  // `npm test` runs the first; pictures of every screen are taken when asked for
+  projects: [
+    { name: "browser", testDir: "tests/browser" },
+    { name: "pictures", testDir: "tests/pictures" },
+  ],
   outputDir: "test-results",
   workers: 1, // two cores: the browser and the server that it talks to
   forbidOnly: true,

@@ -23,7 +23,8 @@ const [mode = "all", ...args] = process.argv.slice(2);
 
 /**
  * `npm test`: installs what the tests need, then checks, tests, builds, and drives the build in a
- * browser. `browser [spec]` does only the last two, `deep` the laws with many more cases.
+ * browser. `browser [spec]` does only the last two, `pictures [spec]` too, taking every screen into
+ * `screenshots/` and the README's into `docs/`; `deep` the laws with many more cases.
  */
 await main(async () => {
   checkNode();
@@ -66,8 +67,9 @@ async function buildAndDrive(tally, server) {
   });
   if (!isReady) return;
   const env = { ...process.env, BOOKMATCH_TEST_SERVER: server, BOOKMATCH_SEEDED: seeded };
-  const chosen = mode === "browser" ? args : [];
-  await stage(tally, "browser tests", () => runPlaywright(chosen, env));
+  const project = mode === "pictures" ? "pictures" : "browser";
+  const chosen = mode === "all" ? [] : args;
+  await stage(tally, `${project} tests`, () => runPlaywright(project, chosen, env));
 }
 
 async function makeSeeded() {

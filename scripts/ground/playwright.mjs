@@ -3,12 +3,14 @@ import path from "node:path";
 import { root } from "./place.mjs";
 import { run } from "./run.mjs";
 
+const again = { browser: "test:browser", pictures: "pictures" };
+
 /** Runs Playwright's tests and counts from its own report. */
-export async function runPlaywright(args, env) {
+export async function runPlaywright(project, args, env) {
   const file = path.join(root, ".test/playwright.json");
   rmSync(file, { force: true });
   const playwright = path.join(root, "node_modules/@playwright/test/cli.js");
-  const { code } = await run(process.execPath, [playwright, "test", ...args], {
+  const { code } = await run(process.execPath, [playwright, "test", "--project", project, ...args], {
     cwd: root,
     env: { ...env, PLAYWRIGHT_JSON_OUTPUT_FILE: file },
     show: true,
@@ -17,19 +19,19 @@ export async function runPlaywright(args, env) {
   });
   if (!existsSync(file)) throw new Error("Playwright ended before it could report; see above");
   const { stats, suites, errors } = JSON.parse(readFileSync(file, "utf8"));
-  const failures = suites.flatMap((suite) => failuresOf(suite));
+  const failures = suites.flatMap((suite) => failuresOf(suite, project));
   failures.push(...errors.map(({ message }) => `Playwright: ${message}`));
   if (code !== 0 && failures.length === 0) failures.push("Playwright: see above");
   return { passed: stats.expected, failed: failures.length, failures };
 }
 
-function failuresOf(suite) {
+function failuresOf(suite, project) {
   const own = (suite.specs ?? [])
     .filter((spec) => !spec.ok)
     .map(
       (spec) =>
-        `tests/browser/${spec.file}: ${spec.title}\n      again: ` +
-        `npm run test:browser -- ${spec.file}:${spec.line}; its trace is in test-results/`,
+        `tests/${project}/${spec.file}: ${spec.title}\n      again: ` +
+        `npm run ${again[project]} -- ${spec.file}:${spec.line}; its trace is in test-results/`,
     );
-  return [...own, ...(suite.suites ?? []).flatMap((inner) => failuresOf(inner))];
+  return [...own, ...(suite.suites ?? []).flatMap((inner) => failuresOf(inner, project))];
 }
