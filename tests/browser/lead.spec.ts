@@ -1,4 +1,4 @@
-import { expect, expectAccessible, test } from "@/tests/setup/browser";
+import { expect, expectAccessible, picture, test } from "@/tests/setup/browser";
 import { enterOffice } from "@/tests/setup/office";
 
 test("a lead sees who is on what, and opens a ticket to every segment behind it", async ({
@@ -9,6 +9,7 @@ test("a lead sees who is on what, and opens a ticket to every segment behind it"
   await expect(page).toHaveURL(/\/floor$/);
   await expect(page.getByText(/\d+ in/).first()).toBeVisible();
   await expectAccessible(page);
+  await picture(page, "floor");
   await page.goto("/tickets");
   await expectAccessible(page);
   const ticket = page.getByRole("table").getByRole("link").first();
@@ -16,6 +17,7 @@ test("a lead sees who is on what, and opens a ticket to every segment behind it"
   await ticket.click();
   await expect(page.getByRole("heading", { name: number })).toBeVisible();
   await expectAccessible(page);
+  await picture(page, "ticket");
   await page
     .getByRole("link", { name: /^Who worked on/ })
     .first()

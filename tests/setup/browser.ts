@@ -1,7 +1,7 @@
 import path from "node:path";
 import AxeBuilder from "@axe-core/playwright";
 import { type BrowserContext, test as base, chromium, expect, type Page } from "@playwright/test";
-import { isRoot } from "@/scripts/ground/place.mjs";
+import { isRoot, root } from "@/scripts/ground/place.mjs";
 import { type Shot, writeClip } from "@/tests/setup/camera";
 import { type Installation, openInstallation, type SignIns } from "@/tests/setup/installation";
 
@@ -101,4 +101,10 @@ export async function axeFaults(page: Page): Promise<string[]> {
     const where = nodes.map(({ target }) => target.join(" ")).join(", ");
     return `${id}: ${help}: ${where}`;
   });
+}
+
+/** Keeps a picture for the README or a look; only when `BOOKMATCH_PICTURES` is set. */
+export async function picture(page: Page, name: string): Promise<void> {
+  if (!process.env.BOOKMATCH_PICTURES) return;
+  await page.screenshot({ path: path.join(root, "screenshots", `${name}.png`) });
 }
