@@ -10,7 +10,8 @@ export async function runPlaywright(project, args, env) {
   const file = path.join(root, ".test/playwright.json");
   rmSync(file, { force: true });
   const playwright = path.join(root, "node_modules/@playwright/test/cli.js");
-  const { code } = await run(process.execPath, [playwright, "test", "--project", project, ...args], {
+  const tests = ["test", `--project=${project}`, ...args];
+  const { code } = await run(process.execPath, [playwright, ...tests], {
     cwd: root,
     env: { ...env, PLAYWRIGHT_JSON_OUTPUT_FILE: file },
     show: true,
