@@ -10,9 +10,9 @@ import type { Effect } from "@/lib/taps/inputs";
  */
 export async function recordActs(
   world: World,
-  { bodies, worker, session }: Extract<Effect, { do: "record" }>,
+  { bodies, worker, session, note }: Extract<Effect, { do: "record" }>,
 ): Promise<void> {
-  const drafts = bodies.map((body) => draftOf(world, body, { worker, session }));
+  const drafts = bodies.map((body) => draftOf(world, body, { worker, session, note }));
   try {
     const events = await world.outbox.add(drafts);
     world.send({ on: "recorded", events });
@@ -22,7 +22,11 @@ export async function recordActs(
   }
 }
 
-function draftOf(world: World, body: EventBody, who: { worker: string; session: string }): Draft {
+function draftOf(
+  world: World,
+  body: EventBody,
+  { note, ...who }: { worker: string; session: string; note: string | undefined },
+): Draft {
   const { atMs, clock } = world.clock.stamp();
   const state = world.state();
   const weighed = state.link.is === "connected" ? body : withWeights(state, body);
@@ -32,6 +36,7 @@ function draftOf(world: World, body: EventBody, who: { worker: string; session: 
     ...who,
     at: new Date(atMs).toISOString(),
     clock,
+    ...(note === undefined ? {} : { note }),
     ...weighed,
   } as Draft; // safe because the spread of a body keeps its kind and fields together
 }

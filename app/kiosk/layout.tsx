@@ -1,6 +1,7 @@
 import type { Metadata, Viewport } from "next";
 import type { ReactNode } from "react";
 import "./kiosk.css";
+import "./sheet.css";
 
 export const metadata: Metadata = { title: "Kiosk" };
 

@@ -4,7 +4,7 @@ import type { ReactNode } from "react";
 import { useTranslations } from "use-intl";
 import { Ask } from "@/components/bench/ask";
 import { useClock } from "@/components/bench/seen";
-import { itemName, useOtherWork } from "@/components/bench/words";
+import { itemName, personName, useOtherWork } from "@/components/bench/words";
 import type { Deed, ItemKey, KioskState } from "@/lib/bench/schema";
 
 interface Line {
@@ -67,6 +67,19 @@ function useDeedLine(state: KioskState, deed: Deed): Line {
       return { book: names(state, [deed.item]), day: t("put-aside"), how: t("put-asideHow") };
     case "break":
       return { book: time, day: t(deed.break), how: t("breakHow", { time }) };
+    case "hand-over": {
+      const name = personName(state, deed.to) ?? deed.to;
+      return {
+        book: names(state, [deed.item]),
+        day: t("hand-over"),
+        how: t("hand-overHow", { name }),
+      };
+    }
+    case "step-done":
+    case "step-open":
+    case "step-skip":
+    case "step-undo":
+      return { book: names(state, [deed.item]), day: t("undo"), how: t("undoHow") };
     case "other-work":
       return { book: otherWork(deed.code), day: t("other-work"), how: bench("since", { time }) };
   }

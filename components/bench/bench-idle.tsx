@@ -8,6 +8,8 @@ import { type SeenBench, useClock } from "@/components/bench/seen";
 import { itemName, modelName } from "@/components/bench/words";
 import { AcrossPlate, Board, Plate } from "@/components/ui/plate";
 import { showTicket } from "@/lib/codes/ticket-code";
+import { sheetsToGoOn } from "@/lib/sheet/on-bench";
+import { tappedOff } from "@/lib/sheet/order";
 
 /** As many as fit above the primary act without scrolling. */
 const NEXT_SHOWN = 3;
@@ -58,10 +60,14 @@ export function BenchIdle(seen: SeenBench) {
 /** What one could go back to, and the tickets that this cell could take next. */
 function NextTickets({ state, view, tap }: SeenBench) {
   const t = useTranslations("bench");
+  const stop = useTranslations("stop");
   const cell = state.cell?.cells[0] ?? state.device?.cell ?? "";
   const [back] = view.previous?.items ?? [];
-  const shown = view.next.slice(0, back ? NEXT_SHOWN - 1 : NEXT_SHOWN);
-  if (!back && shown.length === 0) {
+  const begun = sheetsToGoOn(state, state.visit?.worker ?? "", view)
+    .filter((one) => one.ticket !== back?.ticket)
+    .slice(0, back ? NEXT_SHOWN - 1 : NEXT_SHOWN);
+  const shown = view.next.slice(0, NEXT_SHOWN - begun.length - (back ? 1 : 0));
+  if (!back && begun.length + shown.length === 0) {
     return <p className="text-right text-k-3 font-semibold">{t("nothingNext", { cell })}</p>;
   }
   return (
@@ -72,6 +78,17 @@ function NextTickets({ state, view, tap }: SeenBench) {
           <small className="truncate">{itemName(state, back).operation}</small>
         </Plate>
       )}
+      {begun.map((one) => (
+        <Plate
+          key={`${one.ticket} ${one.operation}`}
+          icon="go"
+          iconLast
+          onClick={() => tap({ on: "go-on", item: one })}
+        >
+          <code>{showTicket(one.ticket)}</code> {modelName(one)}
+          <small className="truncate">{stop("tapped", tappedOff(one.sheet))}</small>
+        </Plate>
+      ))}
       {shown.map((next) => (
         <Plate
           key={`${next.ticket} ${next.operation}`}

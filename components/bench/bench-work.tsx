@@ -10,6 +10,7 @@ import { SeamAxis } from "@/components/seam/axis";
 import { SeamGauge } from "@/components/seam/gauge";
 import { AcrossPlate } from "@/components/ui/plate";
 import type { ItemView } from "@/lib/bench/item-view";
+import { findOperation } from "@/lib/bench/offers";
 import { showTicket } from "@/lib/codes/ticket-code";
 import { seamScale } from "@/lib/seam/scale";
 import { actualMinutes, standardMinutes } from "@/lib/seam/verdict";
@@ -104,13 +105,26 @@ function Figures({ item }: { item: ItemView }) {
   );
 }
 
-/** The act that closes the work; while setting up, it opens the run. */
-export function DoneBar({ view, tap }: SeenBench) {
+/** The act that closes the work; while setting up it opens the run, in a cell the sheet. */
+export function DoneBar({ state, view, tap }: SeenBench) {
   const t = useTranslations("bench");
+  const sheet = useTranslations("sheet");
   if (view.activity === "setup") {
     return (
       <AcrossPlate icon="run" then={t("setupThen")} onClick={() => tap({ on: "run" })}>
         {t("setupDone")}
+      </AcrossPlate>
+    );
+  }
+  const stepped = view.items.some((item) => findOperation(state, item)?.sheet);
+  if (stepped) {
+    return (
+      <AcrossPlate
+        icon="ticket"
+        then={sheet("openThen")}
+        onClick={() => tap({ on: "show-sheet", item: null })}
+      >
+        {sheet("open")}
       </AcrossPlate>
     );
   }

@@ -11,6 +11,8 @@ import type { Screen } from "@/lib/bench/schema";
 import { showTicket } from "@/lib/codes/ticket-code";
 import { keyOf } from "@/lib/taps/moves";
 
+const asks = { count: "whichDone", reassign: "whichWrong", sheet: "whichSheet" } as const;
+
 /** Of several tickets on the bench, which one? */
 export function PickItemScreen({
   state,
@@ -23,7 +25,7 @@ export function PickItemScreen({
   return (
     <KioskFrame state={state}>
       <div className="grid min-h-0 grid-rows-[84px_minmax(0,1fr)_auto]">
-        <Ask book={screen.to === "count" ? t("whichDone") : t("whichWrong")} />
+        <Ask book={t(asks[screen.to])} />
         <Pages
           size={8}
           page={0}

@@ -18,6 +18,11 @@ import { CountScreen } from "@/components/count/count-screen";
 import { PickItemScreen } from "@/components/count/pick-item-screen";
 import { ScrapScreen } from "@/components/count/scrap-screen";
 import { StartShiftScreen } from "@/components/door/start-shift-screen";
+import { HandedScreen, HandOverScreen } from "@/components/sheet/hand-over-screen";
+import { OtherSheetsScreen } from "@/components/sheet/other-sheets-screen";
+import { SheetScreen } from "@/components/sheet/sheet-screen";
+import { SkipStepScreen } from "@/components/sheet/skip-step-screen";
+import { StopHereScreen } from "@/components/sheet/stop-here-screen";
 import { type BenchView, benchView } from "@/lib/bench/view";
 
 interface KioskScreenProps extends Seen {
@@ -52,6 +57,18 @@ function Screen({ onText, ...seen }: KioskScreenProps & { view: BenchView }) {
       return <CautionScreen {...seen} screen={screen} />;
     case "pick-item":
       return <PickItemScreen {...seen} screen={screen} />;
+    case "sheet":
+      return <SheetScreen {...seen} screen={screen} />;
+    case "skip-step":
+      return <SkipStepScreen {...seen} screen={screen} />;
+    case "stop-here":
+      return <StopHereScreen {...seen} screen={screen} />;
+    case "other-sheets":
+      return <OtherSheetsScreen {...seen} screen={screen} />;
+    case "hand-over":
+      return <HandOverScreen {...seen} screen={screen} />;
+    case "handed":
+      return <HandedScreen {...seen} screen={screen} />;
     case "count":
       return <CountScreen {...seen} screen={screen} />;
     case "cause":

@@ -67,6 +67,8 @@ export type Deed =
   | { what: "work" | "add" | "run" | "reassign"; items: readonly ItemKey[] }
   | { what: "count" | "finish"; item: ItemKey; counts: Counts; open: number; time: DeedTime }
   | { what: "put-aside"; item: ItemKey }
+  | { what: "step-done" | "step-open" | "step-skip" | "step-undo"; item: ItemKey }
+  | { what: "hand-over"; item: ItemKey; to: string }
   | { what: "break"; break: "meal" | "rest" }
   | { what: "other-work"; code: string };
 
@@ -108,7 +110,13 @@ export type Screen =
   | { at: "offer"; purpose: Purpose; ticket: string; page: number }
   | { at: "refused"; purpose: Purpose; ticket: string; choice: Choice | null; why: Refusal }
   | { at: "caution"; purpose: Purpose; choice: Choice }
-  | { at: "pick-item"; to: "count" | "reassign" }
+  | { at: "pick-item"; to: "count" | "reassign" | "sheet" }
+  | { at: "sheet"; item: ItemKey; picked: string | null; isLocked: boolean }
+  | { at: "skip-step"; item: ItemKey; step: string }
+  | { at: "stop-here"; item: ItemKey }
+  | { at: "other-sheets"; page: number }
+  | { at: "hand-over"; item: ItemKey; to: string | null; page: number }
+  | { at: "handed"; item: ItemKey; event: string }
   | { at: "count"; item: ItemKey; counts: Counts; open: number; keying: Keying | null }
   | { at: "cause"; item: ItemKey; counts: Counts; open: number; stop: boolean; page: number }
   | { at: "scrap"; item: ItemKey; counts: Counts; open: number; stop: boolean; cause: string }
@@ -130,6 +138,8 @@ interface Visit {
   worker: string;
   /** True where the worker said "I am already in" to a kiosk that knew of no shift. */
   saidIn: boolean;
+  /** Hand-overs that the worker answered with "not now" in this visit. */
+  notNow?: readonly string[];
 }
 
 export interface Link {

@@ -23,6 +23,13 @@ const stays: Record<Screen["at"], keyof typeof seconds | null> = {
   refused: "card",
   caution: "card",
   "pick-item": "busy",
+  // work goes on beside it: it stays, and asks for a badge after a while
+  sheet: null,
+  "skip-step": "busy",
+  "stop-here": "busy",
+  "other-sheets": "busy",
+  "hand-over": "busy",
+  handed: "card",
   count: "busy",
   cause: "busy",
   scrap: "card",

@@ -4,6 +4,7 @@ import type { ItemKey, KioskState } from "@/lib/bench/schema";
 import { weightsHere } from "@/lib/bench/weights";
 import type { Bench, DaySums } from "@/lib/kiosks/schema";
 import type { Activity, ClockEvent, EventBody } from "@/lib/ledger/schema";
+import { type SaidAct, saidActs } from "@/lib/sheet/taps";
 import { instantMs } from "@/lib/time/instant";
 import { dayBounds, productionDay } from "@/lib/time/site-day";
 import { sumWindow } from "@/lib/timeline/day-sums";
@@ -46,6 +47,9 @@ export interface BenchView {
   planned: { start: number; end: number } | null;
   /** `operation version` of every caution read in this shift. */
   cautionsRead: ReadonlySet<string>;
+  /** What stands of all that is known here of this worker, and the ids of every record of it. */
+  acts: readonly SaidAct[];
+  known: ReadonlySet<string>;
   changes: Bench["changes"];
   looseEnds: Bench["looseEnds"];
   next: Bench["next"];
@@ -88,10 +92,17 @@ export function benchView(state: KioskState, worker: string): BenchView {
     today: sumWindow(folded.segments, day, now),
     planned,
     cautionsRead: standing ? cautionsRead(effective, standing.shift) : new Set(),
+    acts: saidActs(events.map((event) => ({ ...event, worker, note: noteOf(mine, event) }))),
+    known: new Set(events.map(({ id }) => id)),
     changes: bench?.changes ?? [],
     looseEnds: bench?.looseEnds ?? [],
     next: bench?.next ?? [],
   };
+}
+
+/** The word that went with a record; the server keeps those that it has answered for. */
+function noteOf(waiting: readonly ClockEvent[], { id }: LedgerEvent): string | null {
+  return waiting.find((event) => event.id === id)?.note ?? null;
 }
 
 type Present = Pick<

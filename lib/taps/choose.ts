@@ -134,7 +134,7 @@ export function atOffer(
 }
 
 /** An operation was chosen: said no to, kindly, or shown to be someone's, or begun. */
-function take(state: KioskState, purpose: Purpose, choice: Choice, look: Look): Step {
+export function take(state: KioskState, purpose: Purpose, choice: Choice, look: Look): Step {
   if (!state.visit) return still(state);
   const { worker } = state.visit;
   const view = look(state, worker);

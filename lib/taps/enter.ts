@@ -61,7 +61,10 @@ function handInPin(state: KioskState, screen: At<"pin">): Step {
 
 /** A badge at the reader: it opens its session again, or asks for the PIN (LEDGER.md 9). */
 export function showBadge(state: KioskState, worker: string, look: Look): Step {
-  if (state.visit?.worker === worker && state.screen.at !== "done") return still(state);
+  const isLocked = state.screen.at === "sheet" && state.screen.isLocked;
+  if (state.visit?.worker === worker && state.screen.at !== "done" && !isLocked) {
+    return still(state);
+  }
   if (!state.sessions[worker]) {
     return askPin({ ...state, visit: null }, worker, { for: "enter" });
   }

@@ -1,7 +1,7 @@
 import type { Deed, KioskState, Saving, Screen, UndoOffer } from "@/lib/bench/schema";
 import { askTicket } from "@/lib/taps/choose";
 import type { Effect, Input, Step, Tap } from "@/lib/taps/inputs";
-import { type Look, recordAs, show, still, toBench, toDoor } from "@/lib/taps/moves";
+import { type Look, recordAs, sheetScreen, show, still, toBench, toDoor } from "@/lib/taps/moves";
 
 type At<K extends Screen["at"]> = Extract<Screen, { at: K }>;
 
@@ -24,10 +24,18 @@ export function recorded(
   const quick = deed.what === "shift-start" && isStartWindow(kept, worker, look);
   const next = { ...kept, undo: undoOffer(kept, saving, events) };
   const effects: Effect[] = [{ do: "sound", sound: "accept" }];
+  if (isOnSheet(deed) && next.visit) return show(next, sheetScreen(deed.item), ...effects);
   if (deed.what !== "shift-end") return show(next, { at: "done", deed, quick }, ...effects);
   const { [worker]: _, ...sessions } = state.sessions;
   const ended = { do: "end-sessions", worker } as const;
   return show({ ...next, sessions }, { at: "done", deed, quick }, ...effects, ended);
+}
+
+type StepDeed = Extract<Deed, { what: "step-done" | "step-open" | "step-skip" | "step-undo" }>;
+
+/** What was tapped on a sheet leaves it standing: the row itself says so. */
+function isOnSheet(deed: Deed): deed is StepDeed {
+  return deed.what.startsWith("step-");
 }
 
 function undoOffer(
@@ -36,7 +44,7 @@ function undoOffer(
   events: Extract<Input, { on: "recorded" }>["events"],
 ): UndoOffer | null {
   const event = events.findLast(({ kind }) => kind !== "caution-read");
-  if (!event || deed.what === "undo") return null;
+  if (!event || deed.what === "undo" || deed.what === "step-undo") return null;
   return { event: event.id, worker, session, deed, untilMs: state.nowMs + UNDO_MS };
 }
 
@@ -58,7 +66,9 @@ export function notRecorded(state: KioskState): Step {
 export function undoLast(state: KioskState): Step {
   const { undo } = state;
   if (!undo || state.nowMs >= undo.untilMs) return still({ ...state, undo: null });
-  const deed: Deed = { what: "undo" };
+  const deed: Deed = isOnSheet(undo.deed)
+    ? { what: "step-undo", item: undo.deed.item }
+    : { what: "undo" };
   return recordAs({ ...state, undo: null }, deed, undo, [{ kind: "undo", event: undo.event }]);
 }
 

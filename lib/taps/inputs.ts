@@ -11,6 +11,7 @@ import type {
 import type { Language } from "@/lib/kiosks/languages";
 import type { Bench, KioskCell, KioskTicket } from "@/lib/kiosks/schema";
 import type { ClockEvent, EventBody } from "@/lib/ledger/schema";
+import type { HandOverReason, SkipReason } from "@/lib/sheet/reasons";
 
 /** What happens: the world's answers, time, and taps. */
 export type Input =
@@ -69,6 +70,21 @@ export type Tap =
   | { on: "key-count"; field: CountField }
   | { on: "counted"; stop: boolean }
   | { on: "cause"; operation: string }
+  | { on: "show-sheet"; item: ItemKey | null }
+  | { on: "show-bench" }
+  | { on: "pick-step"; step: string | null }
+  | { on: "tap-off"; step: string }
+  | { on: "take-back"; step: string }
+  | { on: "skip-step"; step: string }
+  | { on: "skip-because"; reason: SkipReason }
+  | { on: "stop-here" }
+  | { on: "put-aside" }
+  | { on: "show-other-sheets" }
+  | { on: "go-on"; item: ItemKey }
+  | { on: "show-hand-over" }
+  | { on: "hand-to"; to: string }
+  | { on: "hand-because"; reason: HandOverReason }
+  | { on: "key-pin" }
   | { on: "show-hours" }
   | { on: "wrong-ticket" }
   | { on: "wrong-count" }
@@ -86,7 +102,14 @@ export interface Known {
 
 /** What the reducer asks of the world; `kiosk/` does it and answers with an input. */
 export type Effect =
-  | { do: "record"; bodies: readonly EventBody[]; worker: string; session: string }
+  | {
+      do: "record";
+      bodies: readonly EventBody[];
+      worker: string;
+      session: string;
+      /** The word why; it goes with every one of them. */
+      note?: string;
+    }
   | { do: "sign-in"; worker: string; pin: string }
   | { do: "find-ticket"; code: string; worker: string }
   | { do: "fetch-bench"; worker: string }

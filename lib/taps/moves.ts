@@ -1,6 +1,7 @@
 import type { Deed, ItemKey, KioskState, Screen } from "@/lib/bench/schema";
 import type { BenchView } from "@/lib/bench/view";
 import type { EventBody } from "@/lib/ledger/schema";
+import { handedTo, sheetItem } from "@/lib/sheet/on-bench";
 import type { Effect, Step } from "@/lib/taps/inputs";
 
 /** How the reducer sees a worker's bench: `benchView`, or a plain value in a test. */
@@ -28,13 +29,26 @@ export function toDoor(state: KioskState): Step {
 }
 
 /**
- * The visitor's bench. Where no shift is open, the start of one is offered instead; a kiosk that
+ * The visitor's bench: what was handed over first, the sheet where the work is built in steps. Where
+ * no shift is open, the start of one is offered instead; a kiosk that
  * knows nothing of the worker's day takes their word for being in.
  */
 export function toBench(state: KioskState, look: Look, ...effects: Effect[]): Step {
   if (!state.visit) return toDoor(state);
-  const isIn = look(state, state.visit.worker).shiftStart !== null || state.visit.saidIn;
-  return show(state, isIn ? { at: "bench" } : { at: "start-shift" }, ...effects);
+  const view = look(state, state.visit.worker);
+  if (view.shiftStart === null && !state.visit.saidIn) {
+    return show(state, { at: "start-shift" }, ...effects);
+  }
+  const handed = handedTo(state, state.visit.worker);
+  const isNew = handed && !state.visit.notNow?.includes(handed.event);
+  if (isNew) return show(state, { at: "handed", ...handed }, ...effects);
+  const item = sheetItem(state, view);
+  return show(state, item ? sheetScreen(item) : { at: "bench" }, ...effects);
+}
+
+/** The sheet of a ticket operation, nothing picked on it. */
+export function sheetScreen(item: ItemKey): Extract<Screen, { at: "sheet" }> {
+  return { at: "sheet", item: keyOf(item), picked: null, isLocked: false };
 }
 
 /** Writes acts down for the visitor; the card that says so comes once they are kept. */
@@ -42,6 +56,17 @@ export function record(state: KioskState, deed: Deed, ...bodies: EventBody[]): S
   const session = state.visit && state.sessions[state.visit.worker];
   if (!session) return toDoor(state);
   return recordAs(state, deed, session, bodies);
+}
+
+/** Writes an act down for the visitor with the word why. */
+export function recordBecause(
+  state: KioskState,
+  deed: Deed,
+  body: EventBody,
+  reason: string,
+): Step {
+  const [next, effects] = record(state, deed, body);
+  return [next, effects.map((one) => (one.do === "record" ? { ...one, note: reason } : one))];
 }
 
 /** Writes acts down for the worker of a session, signed in or not. */

@@ -16,6 +16,7 @@ import {
   type Look,
   record,
   refuse,
+  sheetScreen,
   show,
   still,
   toBench,
@@ -34,7 +35,7 @@ export function askCount(state: KioskState, view: BenchView): Step {
 }
 
 /** The count of one ticket, begun as if all that is open came out good: the usual case. */
-function countItem(state: KioskState, item: ItemView): Step {
+export function countItem(state: KioskState, item: ItemView): Step {
   const counts = { good: item.open, rework: 0, scrap: 0 };
   const screen: Screen = { at: "count", item: keyOf(item), counts, open: item.open, keying: null };
   const worker = state.visit?.worker ?? "";
@@ -57,6 +58,7 @@ export function atPickItem(
   const picked = items.find((item) => isSameItem(item, tap.item));
   if (!picked) return still(state);
   if (screen.to === "count") return countItem(state, picked);
+  if (screen.to === "sheet") return show(state, sheetScreen(picked));
   return askReassign(items.filter((item) => item !== picked).map(keyOf));
 }
 

@@ -35,6 +35,17 @@ import { atDone, notRecorded, recorded, settled, undoLast } from "@/lib/taps/fin
 import type { Input, Step, Tap } from "@/lib/taps/inputs";
 import { type Look, refuse, show, still, toDoor } from "@/lib/taps/moves";
 import { atCause, atCount, atPickItem, atScrap } from "@/lib/taps/report";
+import {
+  atHanded,
+  atHandOver,
+  atOtherSheets,
+  atSheet,
+  atSkipStep,
+  atStopHere,
+  goOn,
+  showSheet,
+  watched,
+} from "@/lib/taps/sheet";
 
 /**
  * What becomes of the kiosk when something happens at an instant: the next state, and what is to be
@@ -106,9 +117,21 @@ function tapped(state: KioskState, tap: Tap, look: Look): Step {
     case "start-shift":
       return atStartShift(state, tap);
     case "bench":
-      return tap.on === "take-ticket"
-        ? findTicket(state, { for: "work" }, tap.ticket)
-        : atBench(state, tap, look);
+      if (tap.on === "take-ticket") return findTicket(state, { for: "work" }, tap.ticket);
+      if (tap.on === "show-sheet") return showSheet(state, tap.item, look);
+      return tap.on === "go-on" ? goOn(state, tap.item, look) : atBench(state, tap, look);
+    case "sheet":
+      return atSheet(state, screen, tap, look);
+    case "skip-step":
+      return atSkipStep(state, screen, tap);
+    case "stop-here":
+      return atStopHere(state, screen, tap, look);
+    case "other-sheets":
+      return atOtherSheets(state, screen, tap, look);
+    case "hand-over":
+      return atHandOver(state, screen, tap);
+    case "handed":
+      return atHanded(state, screen, tap, look);
     case "scan":
       return atScan(state, screen, tap, look);
     case "cell-tickets":
@@ -155,8 +178,9 @@ function scanned(state: KioskState, text: string, look: Look): Step {
   }
   if (screen.at === "scan") return readTicket(state, screen.purpose, text);
   const takesTickets = ["bench", "cell-tickets", "offer", "refused", "done"].includes(screen.at);
+  const isSheetOpen = screen.at === "sheet" && !screen.isLocked;
   const isOut = screen.at === "done" && screen.deed.what === "shift-end";
-  if (!takesTickets || isOut || !state.visit) return still(state);
+  if (!(takesTickets || isSheetOpen) || isOut || !state.visit) return still(state);
   return readTicket(state, "purpose" in screen ? screen.purpose : { for: "work" }, text);
 }
 
@@ -169,7 +193,7 @@ function tick(before: KioskState): Step {
     return show({ ...state, touchedMs: nowMs }, { ...screen, says: null, waitUntilMs: null });
   }
   const stay = stayOf(state);
-  return stay && nowMs >= stay.untilMs ? toDoor(state) : still(state);
+  return stay && nowMs >= stay.untilMs ? toDoor(state) : still(watched(state));
 }
 
 function started(state: KioskState, { known }: Extract<Input, { on: "started" }>): Step {
