@@ -150,7 +150,8 @@ export const en = {
     break: "Break",
     breakHow: "and back to this one",
     other: "Another instrument",
-    otherHow: "{count, plural, =0 {none begun here} one {# more begun here} other {# more begun here}}",
+    otherHow:
+      "{count, plural, =0 {none begun here} one {# more begun here} other {# more begun here}}",
     otherWork: "Other work",
     otherWorkHow: "cleaning, jigs, waiting",
     pause: "Pause this instrument",
@@ -158,7 +159,8 @@ export const en = {
     handOver: "Hand it over",
     handOverHow: "a colleague goes on",
     finish: "It is finished",
-    finishHow: "{count, plural, =0 {every step is tapped off} one {# step is not tapped off} other {# steps are not tapped off}}",
+    finishHow:
+      "{count, plural, =0 {every step is tapped off} one {# step is not tapped off} other {# steps are not tapped off}}",
     which: "Which one now?",
     whichHow: "Each goes on where it stands",
     none: "No other one is begun",

@@ -153,7 +153,8 @@ export const es: Messages = {
     break: "Descanso",
     breakHow: "y de vuelta a este",
     other: "Otro instrumento",
-    otherHow: "{count, plural, =0 {ninguno empezado aquí} one {# más empezado aquí} other {# más empezados aquí}}",
+    otherHow:
+      "{count, plural, =0 {ninguno empezado aquí} one {# más empezado aquí} other {# más empezados aquí}}",
     otherWork: "Otro trabajo",
     otherWorkHow: "limpieza, plantillas, espera",
     pause: "Pausar este instrumento",
@@ -161,7 +162,8 @@ export const es: Messages = {
     handOver: "Entregarlo",
     handOverHow: "sigue un compañero",
     finish: "Está terminado",
-    finishHow: "{count, plural, =0 {todos los pasos marcados} one {# paso sin marcar} other {# pasos sin marcar}}",
+    finishHow:
+      "{count, plural, =0 {todos los pasos marcados} one {# paso sin marcar} other {# pasos sin marcar}}",
     which: "¿Cuál ahora?",
     whichHow: "Cada uno sigue donde está",
     none: "No hay otro empezado",
