@@ -96,7 +96,7 @@ function Across({ tap, sheet, inHand, screen }: BarProps) {
   const then = isOutOfOrder(sheet, step.step)
     ? t("outOfOrder")
     : after && screen.picked === null
-      ? t("then", { step: after.name })
+      ? t("thenStep", { step: after.name })
       : screen.picked === null
         ? t("last")
         : "";

@@ -118,7 +118,7 @@ export const en = {
     skipped: "does not apply",
     more: "{count, plural, one {# step more} other {# steps more}}",
     tapOff: "Tap off step {number, number}",
-    then: "then: {step}",
+    thenStep: "then: {step}",
     last: "then it is done",
     outOfOrder: "out of order, tap once more",
     done: "Done",

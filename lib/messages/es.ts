@@ -121,7 +121,7 @@ export const es: Messages = {
     skipped: "no corresponde",
     more: "{count, plural, one {# paso más} other {# pasos más}}",
     tapOff: "Marcar el paso {number, number}",
-    then: "luego: {step}",
+    thenStep: "luego: {step}",
     last: "luego está listo",
     outOfOrder: "fuera de orden, toque otra vez",
     done: "Listo",
