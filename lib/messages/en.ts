@@ -128,7 +128,7 @@ export const en = {
     applies: "Step {number, number} applies",
     appliesThen: "it is open again",
     undo: "Undo last tap",
-    undoLeft: "{seconds, plural, one {# second left} other {# seconds left}}",
+    undoLeft: "{seconds, number} s left",
     myBench: "My bench",
     doesNotApply: "Does not apply",
     notThat: "Not that one",

@@ -131,7 +131,7 @@ export const es: Messages = {
     applies: "El paso {number, number} corresponde",
     appliesThen: "queda abierto otra vez",
     undo: "Deshacer lo último",
-    undoLeft: "{seconds, plural, one {queda # segundo} other {quedan # segundos}}",
+    undoLeft: "quedan {seconds, number} s",
     myBench: "Mi banco",
     doesNotApply: "No corresponde",
     notThat: "Ese no",
