@@ -38,8 +38,7 @@ export function FloorHead({
         <p className="desk-figure">
           <span className="text-standard-ink">
             on
-            <br />
-            tickets
+            <br /> tickets
           </span>
           <b>{count.onTickets}</b>
         </p>
@@ -49,8 +48,7 @@ export function FloorHead({
           <b>{over.length}</b>
           <span>
             <span className="tag">over {over.length > 0 && <Icon name="over" />}</span>
-            <br />
-            standard
+            <br /> standard
           </span>
         </p>
         <OverrunList over={over} linksTickets={linksTickets} />

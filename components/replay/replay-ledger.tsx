@@ -44,8 +44,7 @@ export function ReplayLedger({ open, replay }: { open: OpenStandard; replay: Rep
           <p className="desk-figure text-standard-ink">
             <span>
               earned,
-              <br />
-              was {total.wasSeconds === null ? "none" : hours(total.wasSeconds)}
+              <br /> was {total.wasSeconds === null ? "none" : hours(total.wasSeconds)}
             </span>
             <b>{hours(total.wouldSeconds)}</b>
           </p>
@@ -55,8 +54,7 @@ export function ReplayLedger({ open, replay }: { open: OpenStandard; replay: Rep
             <b>{hours(total.actualSeconds)}</b>
             <span>
               actual
-              <br />
-              hours
+              <br /> hours
             </span>
           </p>
           <p className="ml-auto text-right">

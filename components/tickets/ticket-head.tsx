@@ -39,8 +39,7 @@ export function TicketHead({
         <p className="desk-figure">
           <span className="text-standard-ink">
             standard
-            <br />
-            hours
+            <br /> hours
           </span>
           <b>{standardSeconds === null ? "–" : hours(standardSeconds)}</b>
         </p>
@@ -50,8 +49,7 @@ export function TicketHead({
           <b>{hours(actualSeconds)}</b>
           <span>
             actual
-            <br />
-            hours
+            <br /> hours
           </span>
         </p>
         <p className="desk-aside desk-aside-wide">
