@@ -23,18 +23,6 @@ export function SetForm({
   const sent = useAnswer(action);
   const { setupSeconds, runSeconds, effectiveFrom, option, ...same } = entry;
   const figures = { setup: minutesText(setupSeconds), run: minutesText(runSeconds) };
-  if (sent.isDone) {
-    return (
-      <p role="status" className="standards-foot">
-        <b>
-          Set: {figures.setup} and {figures.run} min from {dateText(effectiveFrom)}.
-        </b>
-        <Link href={drop} scroll={false} className="button" data-rim="right">
-          Go on
-        </Link>
-      </p>
-    );
-  }
   const values = { id, ...same, ...figures, option: option ?? "", from: effectiveFrom };
   return (
     <form action={sent.send} className="standards-foot">

@@ -6,6 +6,8 @@ import { standardsAddress } from "@/components/standards/address";
 import { StandardBoards } from "@/components/standards/standard-boards";
 import { StandardEntries } from "@/components/standards/standard-entries";
 import type { OpenStandard, StandardsView } from "@/lib/replay/page";
+import { minutesText } from "@/lib/standards/minutes";
+import { dateText } from "@/lib/time/format";
 
 /** The operation that is open: what held when, the change that is drafted, and who entered what. */
 export function StandardPanel({
@@ -39,6 +41,7 @@ export function StandardPanel({
         </h2>
         <OptionLinks open={open} view={view} />
       </div>
+      <JustSet open={open} id={query.set} />
       <StandardBoards history={open.history} draft={entry} />
       {maySet && (
         <>
@@ -59,7 +62,19 @@ export function StandardPanel({
   );
 }
 
-const noDraft = { setup: "", run: "", from: "", reason: "" };
+const noDraft = { setup: "", run: "", from: "", reason: "", set: "" };
+
+/** Says which row was just set, once the page has come back with it. */
+function JustSet({ open, id }: { open: OpenStandard; id: string }) {
+  const row = open.history.find((each) => each.id === id);
+  if (!row) return null;
+  const figures = `${minutesText(row.setupSeconds)} and ${minutesText(row.runSeconds)} min`;
+  return (
+    <p role="status" className="font-[650]">
+      Set: {figures} from {dateText(row.effectiveFrom)}.
+    </p>
+  );
+}
 
 /** For which tickets the rows are: all of the model, or what an option adds. */
 function OptionLinks({ open, view }: { open: OpenStandard; view: StandardsView }) {

@@ -54,6 +54,8 @@ export const standardsQuery = z.object({
   run: sought(20),
   from: sought(20),
   reason: sought(300),
+  /** The id of the row that was just set, to say so. */
+  set: sought(40),
 });
 export type StandardsQuery = z.infer<typeof standardsQuery>;
 

@@ -49,7 +49,6 @@ test("a planner drafts a standard, sees the replay, and sets it for tomorrow: to
   const before = await wasByWeek(page);
   await page.getByRole("button", { name: /^Set / }).click();
   await expect(page.getByRole("status").filter({ hasText: `${run} min from` })).toBeVisible();
-  await page.getByRole("link", { name: "Go on" }).click();
   await expect(row(page)).toContainText(old);
   await expect(row(page)).toContainText("changes");
   await expect(page.getByText("Five-piece neck, time study of the week")).toBeVisible();
@@ -92,7 +91,6 @@ test("of two changes for one day the later counts and both stay; what cannot be 
   for (const run of ["70", "75"]) {
     await draft(page, { run, from, reason: `Study says ${run}` });
     await page.getByRole("button", { name: /^Set / }).click();
-    await page.getByRole("link", { name: "Go on" }).click();
     await expect(page.getByText(`Study says ${run}`)).toBeVisible();
   }
   await expect(page.getByText(/replaced by a later entry/)).toHaveCount(1);

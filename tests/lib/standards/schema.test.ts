@@ -71,6 +71,7 @@ describe("standardsQuery", () => {
       run: "82",
       from: "",
       reason: "",
+      set: "",
     });
   });
 });
