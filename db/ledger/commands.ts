@@ -162,8 +162,7 @@ export async function book(scope: Scope, booking: Booking): Promise<boolean> {
 
 async function bookAll(scope: Scope, bookings: readonly Booking[]): Promise<boolean> {
   try {
-    await scope.db.execute(sql`
-      select book(${scope.siteId}, ${payloadOf(bookings)}::jsonb)
+    await scope.db.execute(sql`select book(${scope.siteId}, ${payloadOf(bookings)}::jsonb)
       from pg_advisory_xact_lock_shared(${closingKey(scope.siteId)})`);
     return true;
   } catch (error) {
