@@ -67,7 +67,7 @@ test("an admin makes an account, which opens what its role may and nothing else"
   await enterOffice(page, signIns, "admin");
   await page.goto("/people/accounts");
   await page.getByLabel("Name", { exact: true }).fill("Tove Lind");
-  await page.getByLabel("E-mail").fill("Tove.Lind@larkmoor.example");
+  await page.getByLabel("E-mail", { exact: true }).fill("Tove.Lind@larkmoor.example");
   await page.getByLabel("planner").check();
   await page.getByRole("button", { name: "Add and show the password" }).click();
   const password = ((await page.locator(".desk-secret").textContent()) ?? "").trim();
